@@ -1,0 +1,5 @@
+import type { Reading } from './reading.ts';
+
+export function readMinutes(text: string): Reading<number> {
+  throw new Error(`readMinutes ${text}`);
+}
