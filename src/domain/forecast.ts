@@ -1,6 +1,8 @@
-import type Fraction from 'fraction.js';
+import Fraction from 'fraction.js';
+import { roundHalfEven } from './rounding.ts';
 
 export interface StageFigures {
+  /** minor units; null when the stage has no plan */
   readonly planned: number | null;
   readonly used: number;
   readonly wasted: number;
@@ -8,10 +10,34 @@ export interface StageFigures {
   readonly usedForEach: number;
   readonly workPlanned: Fraction | null;
   readonly workDone: Fraction | null;
+  /** how far the stage is said to be, out of a hundred (40, not 0.4) */
   readonly percent: Fraction | null;
   readonly done: boolean;
 }
 
+function byWork(soFar: number, forEach: number, planned: Fraction, done: Fraction): number {
+  const remaining = planned.gt(done) ? planned.sub(done) : new Fraction(0);
+  return roundHalfEven(remaining.mul(forEach).div(done).add(soFar));
+}
+
+// Planned ÷ (earned ÷ so far), the estimate at completion of earned value, where earned is planned × percent.
+function byPercent(soFar: number, planned: number, percent: Fraction): number {
+  const earned = percent.mul(planned).div(100);
+  return roundHalfEven(new Fraction(planned).div(earned.div(soFar)));
+}
+
+/**
+ * Where a stage will finish, minor units. Done: what it took. Nothing used yet: the plan. Work
+ * measured and planned: what it took so far and the remaining work at the pace of *for each*
+ * lines. Only a percent: the usual estimate at completion (planned ÷ cost performance index).
+ * @returns null where there is not enough to go on beyond the plan
+ */
 export function finishAt(stage: StageFigures): number | null {
-  throw new Error(`finishAt ${stage.used}`);
+  const { planned, workPlanned, workDone, percent } = stage;
+  const soFar = stage.used + stage.wasted;
+  if (stage.done) return soFar;
+  if (soFar === 0) return planned;
+  if (workPlanned && workDone && workDone.n > 0n) return byWork(soFar, stage.usedForEach, workPlanned, workDone);
+  if (planned && percent && percent.n > 0n) return byPercent(soFar, planned, percent);
+  return null;
 }

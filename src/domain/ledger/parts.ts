@@ -1,0 +1,27 @@
+import Fraction from 'fraction.js';
+
+/**
+ * The amounts of one material as whole numbers of their smallest common part (a third of a
+ * litre beside a half: sixths), so that a replay adds and compares whole numbers and stays exact.
+ */
+export interface Parts {
+  readonly of: (amount: Fraction) => bigint;
+  readonly back: (parts: bigint) => Fraction;
+}
+
+function greatestCommonDivisor(a: bigint, b: bigint): bigint {
+  let [larger, smaller] = [a, b];
+  while (smaller !== 0n) [larger, smaller] = [smaller, larger % smaller];
+  return larger;
+}
+
+export function commonParts(amounts: readonly Fraction[]): Parts {
+  let part = 1n;
+  for (const { d } of amounts) {
+    if (part % d !== 0n) part *= d / greatestCommonDivisor(part, d);
+  }
+  return {
+    of: ({ s, n, d }) => s * n * (part / d),
+    back: (parts) => new Fraction(parts, part),
+  };
+}
