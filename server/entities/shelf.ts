@@ -1,0 +1,21 @@
+import { defineEntity, p, type InferEntity } from '@mikro-orm/core';
+import type { PricingMethod } from '#domain/ledger/price.ts';
+import { Build } from './build.ts';
+import { Person } from './person.ts';
+
+/** Materials on hand: of a build, or (the shed) of a person. Exactly one of the two is set. */
+export const Shelf = defineEntity({
+  name: 'Shelf',
+  tableName: 'shelf',
+  checks: [{ expression: '(build_id is null) <> (person_id is null)' }],
+  properties: {
+    id: p.integer().primary(),
+    build: () => p.manyToOne(Build).nullable().unique().deleteRule('cascade'),
+    person: () => p.manyToOne(Person).nullable().deleteRule('cascade').index(),
+    currency: p.string(),
+    method: p.string().$type<PricingMethod>().default('fifo'),
+    /** Sequence of acts on the shed itself (a build's shelf uses the build's). */
+    sequence: p.integer().default(0),
+  },
+});
+export type Shelf = InferEntity<typeof Shelf>;

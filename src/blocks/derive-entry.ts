@@ -1,0 +1,88 @@
+import { readAmountOfWork } from '#domain/work.ts';
+import type { BlockContext, BlockDerivation, DerivedCost, DerivedReceipt, DerivedTime, DerivedUse, PureBlock, ShownPicture } from './block.ts';
+import { isProse, type BlockNode, type EntryDocument, type TopNode } from './entry-document.ts';
+import { pureBlocks, type BlockType } from './pure-list.ts';
+import { plainWords } from './prose.ts';
+
+/** What stands around an entry: everything of `BlockContext` that is not in the document itself. */
+export type EntryContext = Omit<BlockContext, 'day' | 'dayTo' | 'stage'>;
+
+interface Placed { block: string; place: number }
+export interface EntryDerivation {
+  /** Words for beside each field, by `title`, `work.amount` or `block.line.field`. Signing off needs none. */
+  faults: Record<string, string>;
+  remarks: string[];
+  uses: (DerivedUse & Placed)[];
+  receipts: (DerivedReceipt & Placed)[];
+  costs: (DerivedCost & Placed)[];
+  times: (DerivedTime & Placed)[];
+  pictures: (ShownPicture & Placed)[];
+  /** Exact `n/d` in `unit`, with its kind; nothing where none was written up. */
+  work: { amount: string; unit: string; kind: string } | null;
+}
+
+export function contextOf(document: EntryDocument, context: EntryContext): BlockContext {
+  return { ...context, day: document.day, dayTo: document.dayTo, stage: document.stage };
+}
+
+// One type's data always meets its own block, which the index type cannot say.
+function pureOf(type: BlockType): PureBlock<BlockType, unknown> {
+  return pureBlocks[type] as unknown as PureBlock<BlockType, unknown>;
+}
+
+function entryFaults(document: EntryDocument): Record<string, string> {
+  const faults: Record<string, string> = {};
+  if (document.title.trim() === '') faults['title'] = 'Give the day a title.';
+  if (document.dayTo !== null && document.dayTo < document.day) faults['dayTo'] = 'The last day comes before the first.';
+  if (document.content.every((node) => isProse(node) && plainWords(node).trim() === '')) faults['content'] = 'Write a few words, or put in a block.';
+  return faults;
+}
+
+function workOf(document: EntryDocument, faults: Record<string, string>): EntryDerivation['work'] {
+  const { work } = document;
+  if (!work || (work.amount.trim() === '' && work.kind.trim() === '')) return null;
+  if (work.kind.trim() === '') faults['work.kind'] = 'Say what was done, such as “panel coated”.';
+  const amount = readAmountOfWork(work.amount);
+  if (!amount.ok) faults['work.amount'] = amount.problem;
+  return amount.ok && work.kind.trim() !== '' ? { amount: amount.value, unit: work.unit, kind: work.kind.trim().toLowerCase() } : null;
+}
+
+/** Everything an entry says to the ledger, as one pure function of its document: movements, receipts, costs, time, work, pictures, and what bars signing off. */
+export function deriveEntry(document: EntryDocument, context: EntryContext): EntryDerivation {
+  const around = contextOf(document, context);
+  const faults = entryFaults(document);
+  const result: EntryDerivation = { faults, remarks: [], uses: [], receipts: [], costs: [], times: [], pictures: [], work: workOf(document, faults) };
+  let place = 0;
+  for (const node of document.content) {
+    if (isProse(node)) continue;
+    const block = node.attrs.id;
+    const derived: BlockDerivation = pureOf(node.type).derive(node.attrs.data, around);
+    for (const fault of derived.faults) faults[fault.path === '' ? block : `${block}.${fault.path}`] = fault.problem;
+    result.remarks.push(...(derived.remarks ?? []));
+    const placed = <T>(items: readonly T[] | undefined) => (items ?? []).map((item) => ({ ...item, block, place: place++ }));
+    result.uses.push(...placed(derived.uses));
+    result.costs.push(...placed(derived.costs));
+    result.times.push(...placed(derived.times));
+    result.pictures.push(...placed(derived.pictures));
+    if (derived.receipt) {
+      result.receipts.push({ ...derived.receipt, block, place });
+      place += derived.receipt.lines.length;
+    }
+  }
+  return result;
+}
+
+/** Reads every typed amount that is new or changed; words that stood in `kept` keep the amount they had. */
+export function readEntry(document: EntryDocument, kept: readonly EntryDocument[], context: EntryContext): EntryDocument {
+  const around = contextOf(document, context);
+  const before = new Map<string, BlockNode>();
+  for (const old of kept) for (const node of old.content) if (!isProse(node)) before.set(`${node.type}:${node.attrs.id}`, node);
+  const content = document.content.map((node) => {
+    if (isProse(node)) return node;
+    const { read } = pureOf(node.type);
+    if (!read) return node;
+    const data = read(node.attrs.data, before.get(`${node.type}:${node.attrs.id}`)?.attrs.data ?? null, around);
+    return { ...node, attrs: { ...node.attrs, data } } as TopNode;
+  });
+  return { ...document, content };
+}
