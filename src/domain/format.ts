@@ -19,7 +19,8 @@ function whole(value: number, what: string): number {
   return value;
 }
 
-function grouped(digits: string): string {
+/** Digits with commas between thousands: `1,234,567`. */
+export function grouped(digits: string): string {
   return digits.replace(/\B(?=(\d{3})+$)/g, ',');
 }
 

@@ -1,4 +1,4 @@
-import { exponentOf } from './currency.ts';
+import { exponentOf, isCurrency } from './currency.ts';
 import { read, unread } from './reading.ts';
 import type { Reading } from './reading.ts';
 import { wholeNumber } from './rounding.ts';
@@ -63,7 +63,7 @@ function shapeProblem(figure: string, currency: string): string {
   const comma = /^(\d+),(\d{1,2})$/.exec(figure);
   if (comma) return `Write ${comma[1]}.${comma[2]} with a point`;
   if (figure.includes(',')) return 'Commas only stand between thousands, like 1,234.50';
-  if (/[£$€¥]|[a-z]{3}/i.test(figure)) return `This amount is in ${currency}: write the figure alone, or with ${currency}`;
+  if (/[£$€¥]/.test(figure) || isCurrency(/[a-z]+/i.exec(figure)?.[0].toUpperCase() ?? '')) return `This amount is in ${currency}: write the figure alone, or with ${currency}`;
   return 'Write the amount as a figure, like 12.50';
 }
 
