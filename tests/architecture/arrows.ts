@@ -17,6 +17,8 @@ export function areaOf(path: string): string {
 
 // The two lists of blocks that may be read outside a browser.
 const LIGHT_BLOCK_LISTS = ['src/blocks/pure.ts', 'src/blocks/views.ts'];
+// What a contract may hold of blocks: the stored document, never how it is shown or edited.
+const DOCUMENT_OF_BLOCKS = /^src\/blocks\/(?!views|desk)[^/]+\.ts$/;
 const DOMAIN_PACKAGES = ['fraction.js'];
 
 // Each line: an area, and the areas it may import beside itself.
@@ -38,7 +40,7 @@ const ARROWS: Readonly<Record<string, readonly string[]>> = {
   'src/queries': LIB,
   'src/components': LIB,
   'src/lib': CONTRACTS,
-  'src/contracts': ['src/domain'],
+  'src/contracts': ['src/domain', 'src/blocks'],
   'src/domain': [],
   'server/main': ['server/app', 'server/features/*', 'server/seeders', 'server/migrations', ...SERVER_PARTS, ...SERVER_READS],
   'server/app': ['server/features/*', ...SERVER_PARTS, ...SERVER_READS],
@@ -48,7 +50,7 @@ const ARROWS: Readonly<Record<string, readonly string[]>> = {
   'server/jobs': ['server/entities', 'server/config', 'server/database'],
   'server/email': ['server/jobs', 'server/entities', 'server/config', ...SERVER_READS],
   'server/entities': SERVER_READS,
-  'server/database': ['server/entities', 'server/migrations', 'server/config'],
+  'server/database': ['mikro-orm.config.ts', 'server/entities', 'server/migrations', 'server/config'],
   'server/config': [],
   'server/migrations': [],
 };
@@ -73,14 +75,17 @@ function insideProblem({ from, to }: ModuleImport): string | null {
   return null;
 }
 
-function serverProblem({ from, to }: ModuleImport, fromArea: string, toArea: string): string | null {
+function narrowProblem({ from, to }: ModuleImport, fromArea: string, toArea: string): string | null {
   if (fromArea.startsWith('server/features/') && toArea.startsWith('server/features/') && !to.endsWith('.service.ts')) {
     return 'a feature uses another only through its .service.ts';
   }
   if (from.startsWith('server/') && toArea === 'src/blocks' && !LIGHT_BLOCK_LISTS.includes(to)) {
     return 'the server reads only the pure and views lists of blocks';
   }
-  if (toArea === 'src/entry' && posix.basename(to) !== 'entry-server.tsx') return 'only entry-server is for the server';
+  if (fromArea === 'src/contracts' && toArea === 'src/blocks' && !DOCUMENT_OF_BLOCKS.test(to)) {
+    return 'a contract holds the stored document of blocks, not how it is shown or edited';
+  }
+  if (fromArea.startsWith('server/') && toArea === 'src/entry' && posix.basename(to) !== 'entry-server.tsx') return 'only entry-server is for the server';
   return null;
 }
 
@@ -100,7 +105,7 @@ export function arrowProblem(edge: ModuleImport): string | null {
   const toRule = ruleName(toArea);
   const isSisterFeature = rule === 'server/features/*' && toRule === rule;
   if (!allowed.includes(toRule) && !isSisterFeature) return `${fromArea} may not import ${toArea}`;
-  return serverProblem(edge, fromArea, toArea);
+  return narrowProblem(edge, fromArea, toArea);
 }
 
 // Two entities that know each other name each other in functions called later, as the ORM asks.

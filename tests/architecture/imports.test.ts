@@ -43,6 +43,7 @@ test.each([
   ['src/domain/money.ts', `import { z } from 'zod';`],
   ['src/domain/money.ts', `import { readFileSync } from 'node:fs';`],
   ['src/blocks/used/view.tsx', `import { x } from '../time/view.tsx';`],
+  ['src/contracts/entries.ts', `import { x } from '#src/blocks/views.ts';`],
   ['src/components/slip.tsx', `import { x } from '#src/queries/builds.ts';`],
   ['server/features/builds/build.service.ts', `import { x } from '../shelf/lot-lookup.ts';`],
   ['server/features/builds/build.service.ts', `import { x } from '#src/blocks/desk.ts';`],
