@@ -1,0 +1,36 @@
+import type { QueryClient } from '@tanstack/react-query';
+import { lazy, Suspense, useEffect, useState } from 'react';
+import { type LoaderFunction, useParams } from 'react-router-dom';
+import { Loading } from '#src/components/loading.tsx';
+import { PageFrame } from '#src/components/page-frame.tsx';
+import { deskQuery } from '#src/queries/entries.ts';
+
+// Editor, schemas and exact arithmetic come only here, and never on the server.
+const Desk = lazy(async () => ({ default: (await import('#src/features/desk/desk.tsx')).Desk }));
+
+export function makeLoader(client: QueryClient): LoaderFunction {
+  return async ({ params }) => {
+    await client.fetchQuery(deskQuery({ build: params['build'] ?? '', number: Number(params['entry']) }));
+    return null;
+  };
+}
+
+function DeskShape() {
+  return (
+    <PageFrame>
+      <Loading label="Fetching the desk" shape="page" />
+    </PageFrame>
+  );
+}
+
+export function Component() {
+  const { build = '', entry = '' } = useParams();
+  const [mounted, setMounted] = useState(false);
+  useEffect(() => setMounted(true), []);
+  if (!mounted) return <DeskShape />;
+  return (
+    <Suspense fallback={<DeskShape />}>
+      <Desk key={`${build}/${entry}`} build={build} number={Number(entry)} />
+    </Suspense>
+  );
+}
