@@ -1,4 +1,3 @@
-import { posix } from 'node:path';
 import type { ModuleImport } from './module-graph.ts';
 
 /** The area of the tree a module belongs to: the unit the arrows are drawn between. */
@@ -9,7 +8,7 @@ export function areaOf(path: string): string {
     return `src/${second}`;
   }
   if (top === 'server') {
-    if (second === 'features') return `server/features/${third}`;
+    if (second === 'features') return /\.tsx?$/.test(third) ? 'server/features' : `server/features/${third}`;
     return `server/${second.replace(/\.tsx?$/, '')}`;
   }
   return top;
@@ -29,6 +28,8 @@ const BLOCKS = ['src/blocks', ...COMPONENTS];
 const FEATURES = ['src/features', 'src/queries', ...BLOCKS];
 const PAGES = ['src/pages', ...FEATURES];
 const SERVER_PARTS = ['server/http', 'server/jobs', 'server/email', 'server/entities', 'server/config', 'server/database'];
+// What page rendering reads of the site: the way in, and the type of the transport it is handed.
+const PAGE_RENDERING = ['src/entry-server.tsx', 'src/lib/transport.ts'];
 const SERVER_READS = ['src/blocks', ...CONTRACTS];
 
 const ARROWS: Readonly<Record<string, readonly string[]>> = {
@@ -42,11 +43,14 @@ const ARROWS: Readonly<Record<string, readonly string[]>> = {
   'src/lib': CONTRACTS,
   'src/contracts': ['src/domain', 'src/blocks'],
   'src/domain': [],
-  'server/main': ['server/app', 'server/features/*', 'server/seeders', 'server/migrations', ...SERVER_PARTS, ...SERVER_READS],
-  'server/app': ['server/features/*', ...SERVER_PARTS, ...SERVER_READS],
+  'server/main': ['server/app', 'server/demo', 'server/features', 'server/features/*', 'server/seeders', 'server/migrations', ...SERVER_PARTS, ...SERVER_READS],
+  'server/demo': ['server/features/*', 'server/seeders', ...SERVER_PARTS, ...SERVER_READS],
+  'server/app': ['server/features', ...SERVER_PARTS, ...SERVER_READS],
+  // The lists that put the features together.
+  'server/features': ['server/features/*', ...SERVER_PARTS],
   'server/features/*': [...SERVER_PARTS, ...SERVER_READS],
   'server/seeders': ['server/features/*', 'content-fixtures', ...SERVER_PARTS, ...SERVER_READS],
-  'server/http': ['server/entities', 'server/config', 'server/database', 'src/entry', ...SERVER_READS],
+  'server/http': ['server/entities', 'server/config', 'server/database', 'src/entry', 'src/lib', ...SERVER_READS],
   'server/jobs': ['server/entities', 'server/config', 'server/database'],
   'server/email': ['server/jobs', 'server/entities', 'server/config', ...SERVER_READS],
   'server/entities': SERVER_READS,
@@ -75,7 +79,7 @@ function insideProblem({ from, to }: ModuleImport): string | null {
   return null;
 }
 
-function narrowProblem({ from, to }: ModuleImport, fromArea: string, toArea: string): string | null {
+function narrowProblem({ from, to, kind }: ModuleImport, fromArea: string, toArea: string): string | null {
   if (fromArea.startsWith('server/features/') && toArea.startsWith('server/features/') && !to.endsWith('.service.ts')) {
     return 'a feature uses another only through its .service.ts';
   }
@@ -85,7 +89,9 @@ function narrowProblem({ from, to }: ModuleImport, fromArea: string, toArea: str
   if (fromArea === 'src/contracts' && toArea === 'src/blocks' && !DOCUMENT_OF_BLOCKS.test(to)) {
     return 'a contract holds the stored document of blocks, not how it is shown or edited';
   }
-  if (fromArea.startsWith('server/') && toArea === 'src/entry' && posix.basename(to) !== 'entry-server.tsx') return 'only entry-server is for the server';
+  if (fromArea === 'server/http' && /^src\/(entry|lib)/.test(toArea) && !(PAGE_RENDERING.includes(to) && kind === 'type')) {
+    return `page rendering reads only the types of ${PAGE_RENDERING.join(' and ')}`;
+  }
   return null;
 }
 

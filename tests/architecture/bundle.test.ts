@@ -9,13 +9,13 @@ const MOST_BYTES = 130_000; // what a reader's page may load, gzipped
 const small: Manifest = {
   'index.html': { file: 'assets/index.js', isEntry: true, imports: ['_react.js'] },
   '_react.js': { file: 'assets/react.js' },
-  'src/pages/entry-page.tsx': { file: 'assets/entry.js', imports: ['_react.js', '_slip.js'] },
+  'src/pages/entry.tsx': { file: 'assets/entry.js', imports: ['_react.js', '_slip.js'] },
   '_slip.js': { file: 'assets/slip.js' },
-  'src/pages/desk-page.tsx': { file: 'assets/desk.js', imports: ['_slip.js'] },
+  'src/pages/edit-entry.tsx': { file: 'assets/desk.js', imports: ['_slip.js'] },
 };
 
 test('a page loads the way in, itself and what they import, each once, and no other page', () => {
-  expect(filesLoadedFor('src/pages/entry-page.tsx', small).toSorted()).toEqual(
+  expect(filesLoadedFor('src/pages/entry.tsx', small).toSorted()).toEqual(
     ['assets/entry.js', 'assets/index.js', 'assets/react.js', 'assets/slip.js'],
   );
 });
@@ -34,7 +34,7 @@ describe('the built client', () => {
   });
 
   test.each(['home', 'builds', 'build', 'entry'])('the %s page is light: no heavy package, at most 130 kB of JavaScript', (name) => {
-    const pages = Object.keys(manifest).filter((key) => new RegExp(`^src/pages/${name}(-page)?([./]|$)`).test(key));
+    const pages = Object.keys(manifest).filter((key) => new RegExp(`^src/pages/${name}(\\.tsx$|/)`).test(key));
     expect(pages, `pages named ${name} with a chunk of their own`).not.toEqual([]);
     for (const page of pages) {
       const files = filesLoadedFor(page, manifest);

@@ -49,6 +49,8 @@ test.each([
   ['server/features/builds/build.service.ts', `import { x } from '#src/blocks/desk.ts';`],
   ['server/features/builds/build.service.ts', `import { x } from '#src/entry-server.tsx';`],
   ['server/http/page.ts', `import { x } from '#server/features/builds/build.service.ts';`],
+  ['server/http/pages.ts', `import { render } from '#src/entry-server.tsx';`],
+  ['server/http/pages.ts', `import type { x } from '#src/lib/format.ts';`],
   ['server/jobs/runner.ts', `import { x } from '#server/features/media/media.jobs.ts';`],
   ['server/entities/build.ts', `import { x } from '#server/http/session.ts';`],
   ['server/app.ts', `import { x } from '#tests/support/test-server.ts';`],
@@ -62,6 +64,7 @@ test.each([
   ['src/domain/money.ts', `import Fraction from 'fraction.js';`],
   ['src/features/desk/desk.tsx', `import { x } from './tray.tsx'; import { y } from '#src/blocks/desk.ts';`],
   ['server/features/builds/build.service.ts', `import { x } from '../shelf/shelf.service.ts';`],
+  ['server/features/index.ts', `import { x } from './builds/builds.routes.ts';`],
   ['server/http/page-rendering.ts', `import type { render } from '#src/entry-server.tsx';`],
 ])('a right arrow passes: %s with %s', (path, source) => {
   expect(problems(path, source)).toEqual([]);
@@ -94,12 +97,12 @@ test('no module imports itself round a ring', () => {
 
 test('a heavy package is found behind a reader page, by the way it came', () => {
   const heavy = [
-    ...edges('src/pages/entry-page.tsx', `import { x } from '#src/components/slip.tsx';`),
+    ...edges('src/pages/entry.tsx', `import { x } from '#src/components/slip.tsx';`),
     ...edges('src/components/slip.tsx', `import { z } from 'zod';`),
   ];
   expect(heavyReaderImports(heavy)).toContainEqual(expect.stringContaining('zod'));
   const light = [
-    ...edges('src/pages/entry-page.tsx', `import type { Z } from 'zod'; const desk = () => import('#src/pages/desk.tsx');`),
+    ...edges('src/pages/entry.tsx', `import type { Z } from 'zod'; const desk = () => import('#src/pages/desk.tsx');`),
     ...edges('src/pages/desk.tsx', `import { Editor } from '@tiptap/core';`),
     ...edges('src/components/prose.tsx', `import { r } from '@tiptap/static-renderer/json/react';`),
   ];

@@ -8,7 +8,7 @@ const LIGHT_EXCEPTIONS = [/^@tiptap\/static-renderer\/json\//];
 const READER_PARTS = [
   /^src\/entry-client\.tsx$/,
   /^src\/(app|lib|queries|components)\//,
-  /^src\/pages\/(home|builds|build|entry)([-./]|$)/,
+  /^src\/pages\/(home|builds|build|entry)(\.tsx$|\/)/,
   /^src\/blocks\/views\.ts$/,
 ];
 
