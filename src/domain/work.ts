@@ -1,16 +1,19 @@
-import Fraction from 'fraction.js';
+import { decimalCommaProblem, numberAtStart, plainText } from './numbers-written.ts';
 import { exactText } from './quantity.ts';
-import { read, unread, type Reading } from './reading.ts';
+import { read, unread } from './reading.ts';
+import type { Reading } from './reading.ts';
 
 /**
- * Reads an amount of work as people write it: `17`, `3.2`, `4 1/2`.
+ * Reads an amount of work as people write it: `17`, `3.2`, `4 1/2`, `4½`.
  * @returns the exact amount as `n/d`, above nought, in whatever unit stands beside the field; or words for beside it
  */
 export function readAmountOfWork(text: string): Reading<string> {
-  const typed = text.trim();
-  if (typed === '') return unread('Say how many, such as 17 or 3.2.');
-  if (/^\d+,\d+$/.test(typed)) return unread(`Write ${typed.replace(',', '.')} with a point.`);
-  if (!/^(\d+(\.\d+)?|\d+\s+\d+\/[1-9]\d*|\d+\/[1-9]\d*)$/.test(typed)) return unread(`“${typed}” is not an amount. Write 17, 3.2 or 4 1/2.`);
-  const amount = new Fraction(typed);
-  return amount.compare(0) > 0 ? read(exactText(amount)) : unread('Work done is more than nought.');
+  const typed = plainText(text);
+  if (typed === '') return unread('Say how many, like 17 or 3.2');
+  if (typed.startsWith('-')) return unread('Work done is more than nought: leave the minus out');
+  const comma = decimalCommaProblem(typed);
+  if (comma !== null) return unread(comma);
+  const found = numberAtStart(typed);
+  if (!found || found.rest !== '') return unread(`“${text.trim()}” is not an amount: write 17, 3.2 or 4 1/2`);
+  return found.value.n > 0n ? read(exactText(found.value)) : unread('Work done is more than nought');
 }
