@@ -19,6 +19,7 @@ export const errorStatus = {
   'cross-site': 403,
   'broken': 500,
   'not-ready': 503,
+  'unreachable': 503,
 } as const;
 export type ErrorCode = keyof typeof errorStatus;
 

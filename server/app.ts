@@ -1,0 +1,95 @@
+import type { Server } from 'node:http';
+import express, { type ErrorRequestHandler, type Express } from 'express';
+import helmet from 'helmet';
+import { pinoHttp } from 'pino-http';
+import { AppError } from '#contracts/errors.ts';
+import { apiRouter } from './http/api.ts';
+import type { Parts } from './http/context.ts';
+import type { EndpointTable } from './http/endpoint-table.ts';
+import { problemReply } from './http/error-reply.ts';
+import { builtShell, viteShell, type PageShell } from './http/page-shell.ts';
+import { pageHandler } from './http/pages.ts';
+import { sameOrigin } from './http/same-origin.ts';
+import { sessions } from './http/sessions.ts';
+import { registerFeatures, featureRouters, featureLimits } from './features/index.ts';
+
+export interface AppOptions {
+  readonly parts: Parts;
+  /** `api`: no pages, for tests of services; `dev`: pages by Vite on the given server. */
+  readonly pages: 'built' | 'dev' | 'api';
+  readonly http?: Server;
+  /** Whether the demo is in and the site may be sent readers. */
+  readonly ready?: () => boolean;
+}
+
+export interface App {
+  readonly app: Express;
+  readonly table: EndpointTable;
+  close(): Promise<void>;
+}
+
+function security(parts: Parts, dev: boolean) {
+  const secure = parts.config.publicUrl.startsWith('https:');
+  return helmet({
+    contentSecurityPolicy: dev ? false : {
+      directives: {
+        'default-src': ["'none'"], 'script-src': ["'self'"], 'style-src': ["'self'"], 'style-src-attr': ["'unsafe-inline'"],
+        'img-src': ["'self'", 'data:', 'blob:'], 'font-src': ["'self'"], 'connect-src': ["'self'"], 'manifest-src': ["'self'"],
+        'form-action': ["'self'"], 'base-uri': ["'none'"], 'frame-ancestors': ["'none'"], 'object-src': ["'none'"],
+        'upgrade-insecure-requests': secure ? [] : null,
+      },
+    },
+    strictTransportSecurity: secure ? { maxAge: 31_536_000, includeSubDomains: true } : false,
+    referrerPolicy: { policy: 'strict-origin-when-cross-origin' },
+    crossOriginOpenerPolicy: { policy: 'same-origin' },
+    crossOriginResourcePolicy: { policy: 'same-origin' },
+  });
+}
+
+/** The page a browser gets for a fault outside the page tree; the API answers problem details. */
+const pageFault: ErrorRequestHandler = (error: unknown, req, res, next) => {
+  if (req.path.startsWith('/api/') || !req.accepts('html') || res.headersSent) {
+    problemReply(error, req, res, next);
+    return;
+  }
+  const known = error instanceof AppError;
+  if (!known) req.log.error({ err: error }, 'unexpected fault');
+  const words = known ? error.message : 'Something went wrong here. It has been noted; go back and try again.';
+  const escaped = words.replace(/[&<>"]/g, (c) => `&#${c.charCodeAt(0)};`);
+  res.status(known ? error.status : 500).type('html').send(`<!doctype html><html lang="en"><meta charset="utf-8"><title>Tallywright</title><h1>That did not work</h1><p>${escaped}</p><p><a href="/">Back to the start</a></p></html>`);
+};
+
+/** Builds the Express app from its parts. Listens to nothing and starts nothing. */
+export async function createApp({ parts, pages, http, ready }: AppOptions): Promise<App> {
+  const app = express();
+  app.disable('x-powered-by');
+  app.set('trust proxy', parts.config.trustProxy);
+  app.set('query parser', 'simple');
+  app.get('/healthz', (_req, res) => void res.type('text').send('ok\n'));
+  app.get('/readyz', (_req, res) => void res.status(ready?.() === false ? 503 : 200).type('text').send(ready?.() === false ? 'not yet\n' : 'ready\n'));
+  app.use(pinoHttp({ logger: parts.log, autoLogging: false, quietReqLogger: true }));
+  app.use(security(parts, pages === 'dev'));
+
+  let shell: PageShell | null = null;
+  if (pages === 'built') shell = await builtShell(app);
+  if (pages === 'dev' && http) shell = await viteShell(app, http);
+
+  app.use(sameOrigin(parts.config));
+  app.use(sessions(parts));
+  if (parts.limits) app.use(featureLimits(parts));
+  app.use('/api', express.json({ limit: '2mb' }));
+  app.use(express.urlencoded({ extended: false, limit: '512kb' }));
+
+  const table: EndpointTable = new Map();
+  registerFeatures(table, parts);
+  for (const router of featureRouters(parts)) app.use(router);
+  app.use(apiRouter(table, parts));
+  if (shell) {
+    const page = pageHandler(table, parts, shell);
+    app.get('/{*path}', page);
+    app.post('/{*path}', page);
+  }
+  app.use((_req, _res, next) => next(new AppError('not-found', 'There is nothing at this address.')));
+  app.use(pageFault);
+  return { app, table, close: async () => shell?.close() };
+}
