@@ -1,6 +1,6 @@
 import type { ComponentProps } from 'react';
-import { controlClass, controlProps, fieldId, FieldNotes, type FieldWords } from './field.tsx';
-import type { SelectOption } from './select-field.tsx';
+import { controlLook, controlProps, fieldId, FieldNotes, type FieldWords } from './field.tsx';
+import { SelectBox, type SelectOption } from './select-box.tsx';
 
 export interface AmountFieldProps extends FieldWords {
   /** Props of the amount's own box: value, onChange, defaultValue. */
@@ -8,7 +8,7 @@ export interface AmountFieldProps extends FieldWords {
   /** Props of the unit's box. */
   unit: Omit<ComponentProps<'select'>, 'className' | 'id' | 'name' | 'children'>;
   unitName: string;
-  units: SelectOption[];
+  units: readonly SelectOption[];
   /** In a row of a block the label is read out only, naming the material. */
   labelHidden?: boolean;
 }
@@ -23,14 +23,8 @@ export function AmountField({ amount, unit, unitName, units, labelHidden = false
         {words.optional && <span className="font-normal text-ink-soft"> (optional)</span>}
       </label>
       <div className="flex gap-1">
-        <input {...amount} {...control} type="text" inputMode="decimal" autoComplete="off" className={`${controlClass} num w-20 flex-none`} />
-        <select {...unit} id={fieldId(unitName)} name={unitName} aria-label={`${words.label}, unit`} className={`${controlClass} select-control w-auto min-w-20 pr-8`}>
-          {units.map((option) => (
-            <option key={option.value} value={option.value}>
-              {option.label}
-            </option>
-          ))}
-        </select>
+        <input {...amount} {...control} type="text" inputMode="decimal" autoComplete="off" className={`${controlLook} num w-20 flex-none`} />
+        <SelectBox {...unit} id={fieldId(unitName)} name={unitName} aria-label={`${words.label}, unit`} options={units} snug />
       </div>
       <FieldNotes id={control.id} hint={words.hint} error={words.error} />
     </div>

@@ -24,10 +24,11 @@ interface Manner {
   full?: boolean;
 }
 
-export type ButtonProps = Manner & Omit<ButtonHTMLAttributes<HTMLButtonElement>, 'className'>;
+export type ButtonProps = Manner & Omit<ButtonHTMLAttributes<HTMLButtonElement>, 'className' | 'type'> & { type?: 'button' | 'submit' };
 
 export function Button({ kind = 'scribe', size = 'usual', full = false, type = 'button', ...rest }: ButtonProps) {
-  return <button type={type} className={buttonClass(kind, size, full)} {...rest} />;
+  const look = buttonClass(kind, size, full);
+  return type === 'submit' ? <button type="submit" className={look} {...rest} /> : <button type="button" className={look} {...rest} />;
 }
 
 export interface ButtonLinkProps extends Manner {

@@ -11,7 +11,9 @@ export function Checkbox({ name, label, hint, error, id, ...input }: CheckboxPro
         <input {...input} {...control} type="checkbox" className="mt-0.5 size-[18px] flex-none accent-scribe" />
         <span>{label}</span>
       </label>
-      <FieldNotes id={control.id} hint={hint} error={error} />
+      <div className="-mt-1.5 pl-7">
+        <FieldNotes id={control.id} hint={hint} error={error} />
+      </div>
     </div>
   );
 }

@@ -23,16 +23,19 @@ export interface DataTableProps {
   columns: DataColumn[];
   rows: DataRow[];
   foot?: ReactNode[];
-  /** On a phone: rows become slips, or the first column stays and the rest slides. */
-  phone?: 'stack' | 'slide';
+  /**
+   * On a phone: rows become slips, the first column stays and the rest slides, or the table stays as it is.
+   * Left out, more than three columns are stacked.
+   */
+  phone?: 'stack' | 'slide' | 'keep';
 }
 
 /** Anything countable. Explicit roles keep it a table to a screen reader when rows are stacked. */
-export function DataTable({ caption, captionHidden = false, columns, rows, foot, phone = 'stack' }: DataTableProps) {
+export function DataTable({ caption, captionHidden = false, columns, rows, foot, phone = columns.length > 3 ? 'stack' : 'keep' }: DataTableProps) {
   return (
     <div className={phone === 'slide' ? 'overflow-x-auto wide:overflow-visible' : ''}>
       <table role="table" data-phone={phone} className="data-table num w-full border-collapse text-control">
-        <caption className={captionHidden ? 'sr-only' : 'pb-2 text-left text-small text-ink-soft'}>{caption}</caption>
+        <caption className={captionHidden ? 'sr-only' : 'px-3 py-2 text-left text-small text-ink-soft'}>{caption}</caption>
         <thead role="rowgroup" className="wide:sticky wide:top-0 wide:z-10">
           <tr role="row">{columns.map((column) => <Heading key={column.key} column={column} />)}</tr>
         </thead>
@@ -46,7 +49,7 @@ export function DataTable({ caption, captionHidden = false, columns, rows, foot,
         {foot && (
           <tfoot role="rowgroup">
             <tr role="row" className="border-t-2 border-ink font-[680]">
-              <Cells columns={columns} cells={foot} look="px-3 py-[11px] align-top" head="font-[680]" />
+              <Cells columns={columns} cells={foot} look="px-2 py-[11px] wide:px-3 align-top" head="font-[680]" />
             </tr>
           </tfoot>
         )}
@@ -61,9 +64,9 @@ function Heading({ column }: { column: DataColumn }) {
   const { href, direction } = column.sort;
   return (
     <th role="columnheader" scope="col" aria-sort={direction ?? 'none'} className={look}>
-      <Link to={href} preventScrollReset className="inline-flex min-h-6 items-center gap-1 text-inherit no-underline hover:underline">
+      <Link to={href} preventScrollReset className="-my-1 inline-block py-1 text-inherit no-underline hover:underline">
         {column.label}
-        <span aria-hidden="true" className={direction ? '' : 'opacity-0'}>{direction === 'ascending' ? '▴' : '▾'}</span>
+        {direction && <span aria-hidden="true"> {direction === 'ascending' ? '▴' : '▾'}</span>}
       </Link>
     </th>
   );

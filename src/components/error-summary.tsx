@@ -8,19 +8,19 @@ export interface FormError {
 }
 
 export interface ErrorSummaryProps {
-  errors: FormError[];
+  errors: readonly FormError[];
   /** Anything new each time the form comes back, so that the focus is taken again. */
   attempt?: number | string;
 }
 
 /** What is wrong, above the form: takes the focus when it comes, and each line leads to its field. */
 export function ErrorSummary({ errors, attempt }: ErrorSummaryProps) {
+  return errors.length > 0 ? <SummaryBox key={attempt} errors={errors} /> : null;
+}
+
+function SummaryBox({ errors }: { errors: readonly FormError[] }) {
   const box = useRef<HTMLDivElement>(null);
-  const shown = errors.length > 0;
-  useEffect(() => {
-    if (shown) box.current?.focus();
-  }, [shown, attempt]);
-  if (!shown) return null;
+  useEffect(() => box.current?.focus(), []);
   const title = errors.length === 1 ? 'One thing needs mending' : `${errors.length} things need mending`;
   return (
     <div ref={box} role="alert" tabIndex={-1} aria-labelledby="error-summary-title" className="mb-6 border border-l-[5px] border-lead bg-card px-4 py-3 text-control [--focus:var(--color-lead)]">

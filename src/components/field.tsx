@@ -67,6 +67,7 @@ export function FieldNotes({ id, hint, error }: { id: string; hint?: ReactNode; 
   );
 }
 
-/** The box of every control one types in. */
-export const controlClass =
-  'block w-full rounded-edge border border-edge bg-card px-[11px] py-2 text-control font-medium text-ink placeholder:font-normal placeholder:text-ink-faint aria-[invalid]:border-2 aria-[invalid]:border-lead';
+/** The box of every control one types in; `controlClass` is as wide as what it stands in. */
+export const controlLook =
+  'block rounded-edge border border-edge bg-card px-[11px] py-2 text-control font-medium text-ink placeholder:font-normal placeholder:text-ink-faint aria-[invalid]:border-2 aria-[invalid]:border-lead';
+export const controlClass = `w-full ${controlLook}`;

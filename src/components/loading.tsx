@@ -13,14 +13,14 @@ export function Loading({ label, shape = 'rows', count = 4 }: LoadingProps) {
       <div aria-hidden="true" className="waiting">
         {shape === 'page' && (
           <>
-            <div className="h-4 w-48 bg-grey-wash" />
-            <div className="mt-4 h-11 w-[min(28rem,90%)] bg-grey-wash" />
-            <div className="mt-4 h-6 w-[min(36rem,100%)] bg-grey-wash" />
-            <div className="mt-10 h-64 bg-grey-wash" />
+            <div className="h-4 w-48 bg-rule" />
+            <div className="mt-4 h-11 w-[min(28rem,90%)] bg-rule" />
+            <div className="mt-4 h-6 w-[min(36rem,100%)] bg-rule" />
+            <div className="mt-10 h-64 bg-rule" />
           </>
         )}
         {shape === 'rows' && Array.from({ length: count }, (_, index) => <LoadingRow key={index} />)}
-        {shape === 'slip' && <div className="h-40 border-l-[5px] border-rule bg-grey-wash" />}
+        {shape === 'slip' && <div className="h-40 border-l-[5px] border-rule bg-rule" />}
       </div>
     </div>
   );
@@ -29,10 +29,10 @@ export function Loading({ label, shape = 'rows', count = 4 }: LoadingProps) {
 function LoadingRow() {
   return (
     <div className="flex gap-5 border-b border-rule py-4">
-      <div className="h-[90px] w-[132px] flex-none bg-grey-wash" />
+      <div className="h-[90px] w-[132px] flex-none bg-rule" />
       <div className="flex-1">
-        <div className="h-3.5 w-32 bg-grey-wash" />
-        <div className="mt-3 h-5 w-3/4 bg-grey-wash" />
+        <div className="h-3.5 w-32 bg-rule" />
+        <div className="mt-3 h-5 w-3/4 bg-rule" />
       </div>
     </div>
   );

@@ -23,42 +23,44 @@ export interface PlanTableProps {
 export function PlanTable({ caption, rows, foot }: PlanTableProps) {
   const forecast = foot.finishAt !== undefined || rows.some((row) => row.finishAt !== undefined);
   return (
-    <table className="num w-full border-collapse text-control">
-      <caption className="sr-only">{caption}</caption>
-      <thead>
-        <tr>
-          <th scope="col" className={headClass}>Stage</th>
-          <th scope="col" className={`${headClass} ${numberClass}`}>Planned</th>
-          <th scope="col" className={`${headClass} ${numberClass}`}>Used</th>
-          {forecast && <th scope="col" className={`${headClass} ${numberClass}`}>Finish at</th>}
-        </tr>
-      </thead>
-      <tbody>
-        {rows.map((row) => (
-          <tr key={row.key}>
-            <th scope="row" className={`${cellClass} text-left font-normal`}>
-              <span className="mr-1.5">{row.stage}</span>
-              {row.done && <Chip kind="grey">done</Chip>}
-              {row.bar && (
-                <span className="mt-2 block">
-                  <PlanBar {...row.bar} label={`${row.used} used of ${row.planned} planned`} />
-                </span>
-              )}
-            </th>
-            <td className={`${cellClass} ${numberClass}`}>{row.planned}</td>
-            <td className={`${cellClass} ${numberClass}`}>{row.used}</td>
-            {forecast && <td className={`${cellClass} ${numberClass}`}>{row.finishAt}</td>}
+    <div className="overflow-x-auto">
+      <table className="num w-full border-collapse text-control">
+        <caption className="sr-only">{caption}</caption>
+        <thead>
+          <tr>
+            <th scope="col" className={headClass}>Stage</th>
+            <th scope="col" className={`${headClass} ${numberClass}`}>Planned</th>
+            <th scope="col" className={`${headClass} ${numberClass}`}>Used</th>
+            {forecast && <th scope="col" className={`${headClass} ${numberClass}`}>Finish at</th>}
           </tr>
-        ))}
-      </tbody>
-      <tfoot>
-        <tr className="border-t-2 border-ink font-[680]">
-          <th scope="row" className="px-3 py-[11px] text-left font-[680]">{foot.label}</th>
-          <td className={`px-3 py-[11px] ${numberClass}`}>{foot.planned}</td>
-          <td className={`px-3 py-[11px] ${numberClass}`}>{foot.used}</td>
-          {forecast && <td className={`px-3 py-[11px] ${numberClass}`}>{foot.finishAt}</td>}
-        </tr>
-      </tfoot>
-    </table>
+        </thead>
+        <tbody>
+          {rows.map((row) => (
+            <tr key={row.key}>
+              <th scope="row" className={`${cellClass} text-left font-normal`}>
+                <span className="mr-1.5">{row.stage}</span>
+                {row.done && <Chip kind="grey">done</Chip>}
+                {row.bar && (
+                  <span className="mt-2 block">
+                    <PlanBar {...row.bar} label={`${row.used} used of ${row.planned} planned`} />
+                  </span>
+                )}
+              </th>
+              <td className={`${cellClass} ${numberClass}`}>{row.planned}</td>
+              <td className={`${cellClass} ${numberClass}`}>{row.used}</td>
+              {forecast && <td className={`${cellClass} ${numberClass}`}>{row.finishAt}</td>}
+            </tr>
+          ))}
+        </tbody>
+        <tfoot>
+          <tr className="border-t-2 border-ink font-[680]">
+            <th scope="row" className="px-2 py-[11px] wide:px-3 text-left font-[680]">{foot.label}</th>
+            <td className={`px-2 py-[11px] wide:px-3 ${numberClass}`}>{foot.planned}</td>
+            <td className={`px-2 py-[11px] wide:px-3 ${numberClass}`}>{foot.used}</td>
+            {forecast && <td className={`px-2 py-[11px] wide:px-3 ${numberClass}`}>{foot.finishAt}</td>}
+          </tr>
+        </tfoot>
+      </table>
+    </div>
   );
 }

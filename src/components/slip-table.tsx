@@ -27,8 +27,9 @@ export function SlipTable({ word, note, lines, text, sum, footnote }: SlipConten
           {sum && (
             <tfoot>
               <tr>
-                <th scope="row">{sum.label}</th>
-                <td />
+                <th scope="row" colSpan={2}>
+                  {sum.label}
+                </th>
                 <td>{sum.value}</td>
               </tr>
             </tfoot>

@@ -1,17 +1,11 @@
-export type TapeScale = 'money' | 'hours';
+import { useEffect, useRef } from 'react';
+import { SkipLink } from './skip-link.tsx';
+import { layoutTape, type Strip, type TapeUnit } from './tape-layout.ts';
+import type { TapeBar } from './tape-slots.ts';
+import { type TapeSize, TapeStrip } from './tape-strip.tsx';
+import { TapeTable } from './tape-table.tsx';
 
-export interface TapeBar {
-  /** Plain date, YYYY-MM-DD. */
-  day: string;
-  /** Last day, where the entry covers several. */
-  to?: string | null;
-  /** Minor units of money, or minutes. */
-  amount: number;
-  /** Title of the entry and the figure in words; read out, and shown on hover. */
-  label: string;
-  href: string;
-  current?: boolean;
-}
+export type TapeScale = 'money' | 'hours';
 
 export interface TapeProps {
   /** "Curlew, day by day". */
@@ -24,13 +18,71 @@ export interface TapeProps {
   /** Writes an amount out: `£91.74` or `7 h 30 min`. */
   show: (amount: number) => string;
   /** Chosen by the layout when left out: days while they can be told apart, then weeks. */
-  unit?: 'day' | 'week';
+  unit?: TapeUnit;
   /** The same page with the other scale. */
   toggleHref?: string;
   /** Taller on a build's own page. */
-  size?: 'tall' | 'short';
+  size?: TapeSize;
+  /** Only where a page has more than one tape. */
+  id?: string;
 }
 
-export function Tape({ title }: TapeProps) {
-  return <p>{title}</p>;
+const scaleWords = {
+  money: { said: 'Money used', heading: 'Used', other: 'by hours' },
+  hours: { said: 'Hands on', heading: 'Hands on', other: 'by money' },
+} as const;
+/** More links than this before the words want a way past. */
+const manyBars = 8;
+
+/** A build's life as a measuring tape, with the same figures as a table under it. */
+export function Tape({ title, scale, from, to, bars, show, unit, toggleHref, size = 'short', id = 'tape' }: TapeProps) {
+  const layout = layoutTape({ from, to, bars, unit });
+  const words = scaleWords[scale];
+  const slots = layout.strips.flatMap((strip) => strip.bars);
+  return (
+    <div className="relative">
+      {slots.length > manyBars && <SkipLink to={`#${id}-after`}>Past the tape</SkipLink>}
+      {layout.strips.map((strip) => (
+        <TapeLength key={strip.year ?? 'all'} strip={strip} title={title} size={size} show={show} />
+      ))}
+      <div id={`${id}-after`} tabIndex={-1} className="mt-2 flex flex-wrap items-baseline gap-x-4 gap-y-1 text-note text-ink-soft">
+        <p className="num mr-auto max-wide:basis-full">
+          {words.said}, a bar a {layout.unit}
+          {layout.tallest > 0 && <>. The tallest is {show(layout.tallest)}</>}
+        </p>
+        {toggleHref && (
+          <a href={toggleHref} className="not-printed">
+            {words.other}
+          </a>
+        )}
+        <TapeTable title={title} amountWord={words.heading} slots={slots} show={show} />
+      </div>
+    </div>
+  );
+}
+
+interface TapeLengthProps {
+  strip: Strip;
+  title: string;
+  size: TapeSize;
+  show: (amount: number) => string;
+}
+
+/** One tape in its own sideways window, opened where the reader is. */
+function TapeLength({ strip, title, size, show }: TapeLengthProps) {
+  const box = useRef<HTMLDivElement>(null);
+  useEffect(() => {
+    const region = box.current;
+    if (region) region.scrollLeft = strip.mark - region.clientWidth / 2;
+  }, [strip.mark]);
+  const name = strip.year === null ? title : `${title}, ${strip.year}`;
+  return (
+    <>
+      {strip.year !== null && <p className="lettering-name num mt-4 mb-1 text-control">{strip.year}</p>}
+      {/* oxlint-disable-next-line jsx-a11y/no-noninteractive-tabindex -- what slides sideways must be reached and slid by keyboard */}
+      <section ref={box} aria-label={name} tabIndex={0} className="tape">
+        <TapeStrip strip={strip} name={name} size={size} show={show} />
+      </section>
+    </>
+  );
 }
