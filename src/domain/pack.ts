@@ -46,6 +46,12 @@ function comesOutNeat(packs: Fraction, dimension: Dimension): boolean {
   return packs.d === 1n || (dimension !== 'count' && shareOf(packs).share !== undefined);
 }
 
+/** Whole packs before packs and a share, and those before a share of one. */
+function rank(packs: Fraction): number {
+  if (packs.d === 1n) return 0;
+  return packs.gt(1) ? 1 : 2;
+}
+
 /**
  * An amount in the words of one of its material's packs, whole ones before shares and the larger
  * pack before the smaller.
@@ -61,7 +67,7 @@ export function wordsInPacks(
     .map((pack) => ({ pack, size: exactFrom(pack.amount) }))
     .map(({ pack, size }) => ({ pack, size, count: amount.div(size) }))
     .filter(({ size, count }) => !(dimension === 'count' && size.equals(1)) && comesOutNeat(count, dimension))
-    .sort((a, b) => Number(a.count.d !== 1n) - Number(b.count.d !== 1n) || b.size.compare(a.size));
+    .sort((a, b) => rank(a.count) - rank(b.count) || b.size.compare(a.size));
   const best = neat[0];
   return best ? packWords(best.count, best.pack, sizeWords(best.size)) : null;
 }
