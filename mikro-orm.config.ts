@@ -20,7 +20,7 @@ const pragmas = `
 // ES module, so knex's own require() would get a namespace without the OPEN_* constants: it is handed the default export.
 const sqlite3 = (sqlite3Module as unknown as { default: unknown }).default;
 class SqliteDialect extends SqliteKnexDialect {
-  override _driver() {
+  _driver() {
     return sqlite3;
   }
 }

@@ -30,7 +30,7 @@ async function start(): Promise<void> {
   const client = makeQueryClient(false);
   bindTransport(client, fetchTransport);
   hydrate(client, state.query);
-  const routes = makeRoutes(client, { publicUrl: state.publicUrl, onFault: (error) => console.error(error) });
+  const routes = makeRoutes(client, { onFault: (error) => console.error(error) });
   await resolveLazy(routes);
   const router = createBrowserRouter(routes, { hydrationData: { ...state.router, errors: thawedErrors(state.router.errors) } });
   startTransition(() => {

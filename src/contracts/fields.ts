@@ -17,3 +17,5 @@ export const ok = z.object({ ok: z.literal(true) });
 
 export const personView = z.object({ handle: z.string(), name: z.string() });
 export type PersonView = z.output<typeof personView>;
+/** The reply of a case that has nothing to tell. */
+export const done = { ok: true } as const;

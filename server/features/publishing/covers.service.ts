@@ -1,0 +1,37 @@
+import type { PictureView } from '#contracts/pictures.ts';
+import { Build, PublishedPicture } from '#server/entities/index.ts';
+import { pictureView } from '#server/features/media/pictures.service.ts';
+import type { Em } from '#server/http/context.ts';
+
+export interface EntryPictures {
+  readonly cover: PictureView | null;
+  readonly count: number;
+}
+
+/** The cover (the one marked, else the first) and the number of pictures of each published entry. */
+export async function picturesOfEntries(em: Em, entryIds: readonly number[]): Promise<Map<number, EntryPictures>> {
+  const rows = await em.find(PublishedPicture, { entry: { $in: [...entryIds] } }, { populate: ['picture'], orderBy: { position: 'asc' } });
+  const byEntry = Map.groupBy(rows, (row) => row.entry.id);
+  return new Map([...byEntry].map(([id, shown]) => {
+    const cover = shown.find((row) => row.cover) ?? shown[0];
+    return [id, { cover: cover ? pictureView(cover.picture, { alt: cover.alt, caption: '' }) : null, count: shown.length }];
+  }));
+}
+
+/** A picture for each build: how it stands now if the restorer picked one, else the cover of its latest published day. */
+export async function coversOfBuilds(em: Em, buildIds: readonly number[]): Promise<Map<number, PictureView>> {
+  const builds = await em.find(Build, { id: { $in: [...buildIds] } }, { populate: ['afterPicture', 'beforePicture'] });
+  const covers = new Map<number, PictureView>();
+  for (const build of builds) {
+    const picked = build.afterPicture ?? build.beforePicture;
+    if (picked) covers.set(build.id, pictureView(picked, { alt: `${build.title}, how it stands`, caption: '' }));
+  }
+  const without = builds.filter((build) => !covers.has(build.id)).map((build) => build.id);
+  if (without.length === 0) return covers;
+  const rows = await em.find(PublishedPicture, { entry: { build: { $in: without } } }, { populate: ['picture', 'entry'], orderBy: { entry: { day: 'desc' }, cover: 'desc', position: 'asc' } });
+  for (const row of rows) {
+    const build = row.entry.build.id;
+    if (!covers.has(build)) covers.set(build, pictureView(row.picture, { alt: row.alt, caption: '' }));
+  }
+  return covers;
+}

@@ -1,0 +1,69 @@
+import type { EntryCard } from '#contracts/builds.ts';
+import type { HomeView } from '#contracts/home.ts';
+import type { SlipView } from '#contracts/slip.ts';
+import { formatMinutes, formatMoney } from '#domain/format.ts';
+import { Entry } from '#server/entities/index.ts';
+import type { Em } from '#server/http/context.ts';
+import { countByKind, listedBuilds } from './builds-list.service.ts';
+import { entryCards, entryHref } from './entry-cards.service.ts';
+import { entryPageOf } from './entry-page.service.ts';
+import { entryTakes } from './takes.service.ts';
+import { workWords } from './work-words.ts';
+
+const freshCount = 12;
+const takesCount = 6;
+
+/** Published entries of listed builds, by first publication, newest first. */
+export async function freshEntries(em: Em, limit: number, offset = 0): Promise<Entry[]> {
+  return em.find(Entry, { published: { $ne: null }, build: listedBuilds }, {
+    populate: ['build.owner', 'author', 'stage', 'workKind'], orderBy: { firstPublishedAt: 'desc', id: 'desc' }, limit, offset,
+  });
+}
+
+/** The slip of the opening day: its Used block, with what one took as the last word. */
+async function openingSlip(em: Em, entry: Entry): Promise<SlipView | null> {
+  if (!entry.published) return null;
+  const page = await entryPageOf(em, { build: entry.build.unwrap?.() ?? entry.build, entry, document: entry.published, costsShown: entry.build.costsShown, writes: false }, false);
+  const slip = page.rows.flatMap((row) => row.slips).find((one) => one.type === 'used')?.slip;
+  if (!slip) return null;
+  const one = [page.tally.money?.one != null ? formatMoney(page.tally.money.one, page.tally.currency) : '', page.tally.oneMinutes != null ? formatMinutes(page.tally.oneMinutes) : ''].filter(Boolean).join(', ');
+  return page.tally.work && one !== '' ? { ...slip, footnote: undefined, sum: { label: `${page.tally.work.one} takes`, value: one } } : slip;
+}
+
+async function latestTakes(em: Em, entries: readonly Entry[]): Promise<HomeView['takes']> {
+  const takes: HomeView['takes'] = [];
+  const seen = new Set<number>();
+  for (const entry of entries) {
+    if (takes.length === takesCount || !entry.workKind || !entry.workAmount || seen.has(entry.workKind.id)) continue;
+    const one = await entryTakes(em, entry.id, entry.workAmount);
+    if (!one || (one.money === 0 && one.minutes === 0)) continue;
+    seen.add(entry.workKind.id);
+    const work = { amount: '1/1', unit: entry.workUnit ?? 'piece', kind: entry.workKind.one };
+    const words = workWords(work, new Map()).replace(/^1 /, '');
+    takes.push({
+      one: `${words.charAt(0).toUpperCase()}${words.slice(1)}`, href: entryHref(entry.build, entry), build: entry.build.title, currency: entry.build.currency,
+      money: entry.build.costsShown ? one.money : null, minutes: one.minutes > 0 ? one.minutes : null,
+    });
+  }
+  return takes;
+}
+
+/** The day the front page opens on: the freshest with a picture. */
+function openingOf(cards: readonly EntryCard[]): number {
+  const pictured = cards.findIndex((card) => card.picture !== null);
+  return pictured < 0 ? 0 : pictured;
+}
+
+export async function readFrontPage(em: Em): Promise<HomeView> {
+  const entries = await freshEntries(em, 40);
+  const cards = await entryCards(em, entries, (entry) => entry.build.costsShown);
+  const at = openingOf(cards);
+  const opening = cards[at];
+  const entry = entries[at];
+  return {
+    opening: opening && entry ? { entry: opening, slip: await openingSlip(em, entry) } : null,
+    fresh: cards.filter((_, index) => index !== at).slice(0, freshCount),
+    takes: await latestTakes(em, entries),
+    kinds: await countByKind(em),
+  };
+}

@@ -1,0 +1,23 @@
+import type { TapeView } from '#contracts/tape.ts';
+import { Entry, type Build } from '#server/entities/index.ts';
+import { figuresOfEntries } from '#server/features/shelf/figures.service.ts';
+import type { Em } from '#server/http/context.ts';
+import { entryHref } from './entry-cards.service.ts';
+
+/** A build's whole life: a bar for each published day of work. Without money where costs are hidden. */
+export async function tapeOf(em: Em, build: Build, showsCosts: boolean): Promise<TapeView> {
+  const entries = await em.find(Entry, { build: build.id, firstPublishedAt: { $ne: null }, published: { $ne: null } }, {
+    fields: ['id', 'number', 'slug', 'title', 'day', 'dayTo'], orderBy: { day: 'asc', number: 'asc' },
+  });
+  const figures = await figuresOfEntries(em, entries.map((entry) => entry.id));
+  const days = entries.map((entry) => {
+    const sums = figures.get(entry.id);
+    return {
+      day: entry.dayTo ?? entry.day, number: entry.number, title: entry.title, href: entryHref(build, entry), minutes: sums?.minutes ?? 0,
+      ...(showsCosts ? { money: (sums?.used ?? 0) + (sums?.wasted ?? 0) + (sums?.costs ?? 0) } : {}),
+    };
+  });
+  const first = days[0]?.day;
+  const last = days.at(-1)?.day;
+  return { from: first && first < build.startedOn ? first : build.startedOn, to: last && last > build.startedOn ? last : build.startedOn, days };
+}
