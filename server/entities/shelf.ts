@@ -7,11 +7,13 @@ import { Person } from './person.ts';
 export const Shelf = defineEntity({
   name: 'Shelf',
   tableName: 'shelf',
+  // one shed a person and currency; a build's shelf has no person and is unique by its build
+  uniques: [{ properties: ['person', 'currency'] }],
   checks: [{ expression: '(build_id is null) <> (person_id is null)' }],
   properties: {
     id: p.integer().primary(),
     build: () => p.manyToOne(Build).nullable().unique().deleteRule('cascade'),
-    person: () => p.manyToOne(Person).nullable().deleteRule('cascade').index(),
+    person: () => p.manyToOne(Person).nullable().deleteRule('cascade'),
     currency: p.string(),
     method: p.string().$type<PricingMethod>().default('fifo'),
     /** Sequence of acts on the shed itself (a build's shelf uses the build's). */

@@ -1,6 +1,6 @@
 import { Migration } from '@mikro-orm/migrations';
 
-export class Migration20261201090942_first extends Migration {
+export class Migration20261201091938_first extends Migration {
 
   override async up(): Promise<void> {
     this.addSql(`create table \`job\` (\`id\` integer not null primary key autoincrement, \`kind\` text not null, \`payload\` json not null, \`run_at\` datetime not null, \`attempts\` integer not null default 0, \`claimed_at\` datetime null, \`done_at\` datetime null, \`given_up_at\` datetime null, \`failure\` text null, \`created_at\` datetime not null);`);
@@ -42,6 +42,7 @@ export class Migration20261201090942_first extends Migration {
     this.addSql(`create index \`shelf_build_id_index\` on \`shelf\` (\`build_id\`);`);
     this.addSql(`create unique index \`shelf_build_id_unique\` on \`shelf\` (\`build_id\`);`);
     this.addSql(`create index \`shelf_person_id_index\` on \`shelf\` (\`person_id\`);`);
+    this.addSql(`create unique index \`shelf_person_id_currency_unique\` on \`shelf\` (\`person_id\`, \`currency\`);`);
 
     this.addSql(`create table \`work_kind\` (\`id\` integer not null primary key autoincrement, \`one\` text not null, \`many\` text not null, \`created_at\` datetime not null);`);
     this.addSql(`create unique index \`work_kind_one_unique\` on \`work_kind\` (\`one\`);`);
@@ -93,7 +94,7 @@ export class Migration20261201090942_first extends Migration {
     this.addSql(`create index \`movement_build_id_kind_index\` on \`movement\` (\`build_id\`, \`kind\`);`);
     this.addSql(`create unique index \`movement_shelf_id_key_unique\` on \`movement\` (\`shelf_id\`, \`key\`);`);
 
-    this.addSql(`create table \`entry_address\` (\`id\` integer not null primary key autoincrement, \`build_id\` integer not null, \`slug\` text not null, \`entry_id\` integer not null, constraint \`entry_address_build_id_foreign\` foreign key(\`build_id\`) references \`build\`(\`id\`) on delete cascade on update cascade, constraint \`entry_address_entry_id_foreign\` foreign key(\`entry_id\`) references \`entry\`(\`id\`) on delete cascade on update cascade);`);
+    this.addSql(`create table \`entry_address\` (\`id\` integer not null primary key autoincrement, \`build_id\` integer not null, \`slug\` text not null, \`entry_id\` integer null, constraint \`entry_address_build_id_foreign\` foreign key(\`build_id\`) references \`build\`(\`id\`) on delete cascade on update cascade, constraint \`entry_address_entry_id_foreign\` foreign key(\`entry_id\`) references \`entry\`(\`id\`) on delete set null on update cascade);`);
     this.addSql(`create index \`entry_address_build_id_index\` on \`entry_address\` (\`build_id\`);`);
     this.addSql(`create index \`entry_address_entry_id_index\` on \`entry_address\` (\`entry_id\`);`);
     this.addSql(`create unique index \`entry_address_build_id_slug_unique\` on \`entry_address\` (\`build_id\`, \`slug\`);`);
