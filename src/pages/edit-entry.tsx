@@ -10,7 +10,7 @@ const Desk = lazy(async () => ({ default: (await import('#src/features/desk/desk
 
 export function makeLoader(client: QueryClient): LoaderFunction {
   return async ({ params }) => {
-    await client.fetchQuery(deskQuery({ build: params['build'] ?? '', number: Number(params['entry']) }));
+    await client.fetchQuery(deskQuery({ build: params['build'] ?? '', number: Number(params['number']) }));
     return null;
   };
 }
@@ -24,13 +24,13 @@ function DeskShape() {
 }
 
 export function Component() {
-  const { build = '', entry = '' } = useParams();
+  const { build = '', number = '' } = useParams();
   const [mounted, setMounted] = useState(false);
   useEffect(() => setMounted(true), []);
   if (!mounted) return <DeskShape />;
   return (
     <Suspense fallback={<DeskShape />}>
-      <Desk key={`${build}/${entry}`} build={build} number={Number(entry)} />
+      <Desk key={`${build}/${number}`} build={build} number={Number(number)} />
     </Suspense>
   );
 }

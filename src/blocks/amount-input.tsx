@@ -1,0 +1,61 @@
+import type { KeyboardEvent } from 'react';
+import { controlClass, fieldId } from '#src/components/field.tsx';
+import { wordsForQuantity } from '#domain/quantity-words.ts';
+import { materialOf, readAmount, typedAmount, type AmountLine } from './amount-line.ts';
+import { useBench } from './bench.ts';
+import { tall, useLineControl } from './line-fields.tsx';
+import { unitChoices } from './unit-choice.ts';
+
+export interface AmountInputProps<L extends AmountLine> {
+  block: string;
+  line: L;
+  onLine: (change: Partial<AmountLine>) => void;
+  onEnter: () => void;
+}
+
+/** An amount as people write it, and its unit: the menu counts only where the amount names none. */
+export function AmountInput<L extends AmountLine>({ block, line, onLine, onEnter }: AmountInputProps<L>) {
+  const { context } = useBench();
+  const name = `${block}.${line.id}.amount`;
+  const { control, leave } = useLineControl(name, 'Amount');
+  const material = materialOf(line, context);
+  const of = line.name.trim() || 'this line';
+  const named = typedAmount(line) === line.amount.trim() && line.amount.trim() !== '' && line.unit !== '';
+  const onKeyDown = (event: KeyboardEvent) => {
+    if (event.key !== 'Enter' || event.nativeEvent.isComposing) return;
+    event.preventDefault();
+    onEnter();
+  };
+  return (
+    <div role="group" aria-label={`Amount of ${of}`} className="flex gap-1">
+      <input
+        {...control} type="text" inputMode="decimal" autoComplete="off" aria-label={`Amount of ${of}`} value={line.amount}
+        onChange={(event) => onLine({ amount: event.target.value })} onBlur={leave} onKeyDown={onKeyDown}
+        className={`${controlClass} ${tall} num flex-none ${named ? 'w-28' : 'w-18'}`}
+      />
+      <select
+        id={fieldId(`${block}.${line.id}.unit`)} aria-label={`Unit of ${of}`} value={line.unit} onChange={(event) => onLine({ unit: event.target.value })}
+        className={`${controlClass} ${tall} select-control w-auto max-w-32 pr-8 ${named ? 'opacity-50' : ''}`}
+      >
+        {unitChoices(material, context.measures, line.unit).map((option) => <option key={option.value} value={option.value}>{option.label}</option>)}
+      </select>
+    </div>
+  );
+}
+
+/** What a typed amount was read as, where that says more than what was typed. */
+export function useShownBack(line: AmountLine): string | null {
+  const { context } = useBench();
+  if (line.amount.trim() === '' || !materialOf(line, context)) return null;
+  const reading = readAmount(line, context);
+  if (!reading.ok) return null;
+  const same = reading.value.shownBack === typedAmount(line) || reading.value.shownBack === line.amount.trim();
+  return [same ? '' : reading.value.shownBack, reading.value.note ?? ''].filter(Boolean).join('; ') || null;
+}
+
+/** An exact amount of a line's material in the line's own words. */
+export function useAmountWords(line: AmountLine): (exact: string) => string {
+  const { context } = useBench();
+  const material = materialOf(line, context);
+  return (exact) => material ? wordsForQuantity(exact, material.dimension, { measures: context.measures, packs: material.packs, unit: material.unit }) : '';
+}

@@ -1,0 +1,38 @@
+import type { EntryPage, RowView } from '#contracts/entry-view.ts';
+import type { PictureView } from '#contracts/pictures.ts';
+import { SlipTable } from '#src/components/slip-table.tsx';
+import { ProseView } from './prose-view.tsx';
+
+type BodyNode = RowView['body'][number];
+
+function FeedPicture({ photo, publicUrl }: { photo: PictureView; publicUrl: string }) {
+  return (
+    <figure>
+      <img src={`${publicUrl}${photo.src}`} alt={photo.alt} width={photo.width} height={photo.height} />
+      {photo.caption !== '' && <figcaption>{photo.caption}</figcaption>}
+    </figure>
+  );
+}
+
+function FeedBody({ node, publicUrl }: { node: BodyNode; publicUrl: string }) {
+  if (node.type === 'photos') return <>{node.photos.map((photo) => <FeedPicture key={photo.key} photo={photo} publicUrl={publicUrl} />)}</>;
+  if (node.type === 'caution') {
+    return <p><strong>{node.title}.</strong> {node.words}{node.source ? <> <small>Source: {node.source}</small></> : null}</p>;
+  }
+  return <ProseView node={node} />;
+}
+
+/** An entry whole, for feeds and mail: no styles, blocks as plain tables, pictures at absolute addresses. */
+export function FeedEntry({ page, publicUrl }: { page: Pick<EntryPage, 'lead' | 'rows'>; publicUrl: string }) {
+  return (
+    <>
+      {page.lead !== '' && <p><em>{page.lead}</em></p>}
+      {page.rows.map((row, index) => (
+        <div key={index}>
+          {row.body.map((node, at) => <FeedBody key={at} node={node} publicUrl={publicUrl} />)}
+          {row.slips.map(({ id, slip }) => <SlipTable key={id} {...slip} />)}
+        </div>
+      ))}
+    </>
+  );
+}

@@ -1,0 +1,55 @@
+import type { ReactNode } from 'react';
+import type { RowView } from '#contracts/entry-view.ts';
+import type { PictureView } from '#contracts/pictures.ts';
+import { Caution } from '#src/components/caution.tsx';
+import { PhotoGroup } from '#src/components/photo-group.tsx';
+import type { PictureData } from '#src/components/picture.tsx';
+import { Prose } from '#src/components/prose.tsx';
+import { Slip } from '#src/components/slip.tsx';
+import type { TallyRow } from '#src/components/tally-margin.tsx';
+import { ProseView } from './prose-view.tsx';
+
+type BodyNode = RowView['body'][number];
+
+export function pictureData({ key, width, height, alt, placeholder, src, sources }: PictureView): PictureData {
+  return { id: key, width, height, alt, placeholder, src, sources };
+}
+
+function bodyView(node: BodyNode, first: boolean): ReactNode {
+  if (node.type === 'photos') return <PhotoGroup key={node.id} first={first} photos={node.photos.map((photo) => ({ picture: pictureData(photo), caption: photo.caption }))} />;
+  if (node.type === 'caution') return <Caution key={node.id} title={node.title} {...(node.source ? { source: { label: node.source } } : {})}>{node.words}</Caution>;
+  return null;
+}
+
+/** Runs of prose share one `Prose`; pictures and cautions stand between them. */
+function bodyViews(body: readonly BodyNode[], firstPhotos: string | null): ReactNode[] {
+  const views: ReactNode[] = [];
+  let run: ReactNode[] = [];
+  const close = () => {
+    if (run.length > 0) views.push(<Prose key={`prose-${views.length}`}>{run}</Prose>);
+    run = [];
+  };
+  for (const node of body) {
+    if (node.type === 'photos' || node.type === 'caution') {
+      close();
+      views.push(bodyView(node, node.id === firstPhotos));
+    } else run.push(<ProseView key={node.attrs.id} node={node} />);
+  }
+  close();
+  return views;
+}
+
+/** A projected entry as rows of the tally margin: words and pictures, with the slips beside them. */
+export function readerRows(rows: readonly RowView[], beside: ReactNode): TallyRow[] {
+  const firstPhotos = rows.flatMap((row) => row.body).find((node) => node.type === 'photos');
+  const firstId = firstPhotos?.type === 'photos' ? firstPhotos.id : null;
+  return rows.map((row, index) => ({
+    key: row.body[0] ? keyOf(row.body[0]) : row.slips[0]?.id ?? String(index),
+    prose: bodyViews(row.body, firstId),
+    slips: [...(index === 0 && beside ? [beside] : []), ...row.slips.map(({ id, slip }) => <Slip key={id} {...slip} />)],
+  }));
+}
+
+function keyOf(node: BodyNode): string {
+  return node.type === 'photos' || node.type === 'caution' ? node.id : node.attrs.id;
+}

@@ -1,0 +1,75 @@
+import { fieldId, controlClass } from '#src/components/field.tsx';
+import { readMinutes } from '#domain/duration.ts';
+import { formatMinutes } from '#domain/format.ts';
+import { timeKinds, timeKindWords, type TimeKind } from '#contracts/words.ts';
+import { useBench } from '../bench.ts';
+import { FigureInput, LineFaults, LineInput, optionsOf, QuietSelect, tall } from '../line-fields.tsx';
+import { TakeOutLine } from '../take-out-line.tsx';
+import type { useLines } from '../use-lines.ts';
+import type { TimeData, TimeLineData } from './time.ts';
+
+const somebodyElse = ' else';
+const kinds = optionsOf(timeKindWords);
+function kindOf(value: string): TimeKind {
+  return timeKinds.find((one) => one === value) ?? 'each';
+}
+
+interface TimeLineDeskProps {
+  block: string;
+  line: TimeLineData;
+  lines: ReturnType<typeof useLines<TimeLineData, TimeData>>;
+}
+
+/** Who: somebody of the build, or just a name. */
+function WhoSelect({ block, line, lines }: TimeLineDeskProps) {
+  const { people } = useBench();
+  const named = line.handle === null && line.name !== '';
+  const choose = (value: string) => {
+    const person = people.find((one) => one.handle === value);
+    lines.change(line.id, person ? { handle: person.handle, name: person.name } : { handle: null, name: value === somebodyElse && named ? line.name : '' });
+    if (value === somebodyElse) requestAnimationFrame(() => lines.goTo(line.id, 'name'));
+  };
+  return (
+    <select
+      id={fieldId(`${block}.${line.id}.person`)} aria-label="Who" value={line.handle ?? (named ? somebodyElse : '')} onChange={(event) => choose(event.target.value)}
+      className={`${controlClass} ${tall} select-control pr-8`}
+    >
+      <option value="">Who</option>
+      {people.map((person) => <option key={person.handle} value={person.handle}>{person.name}</option>)}
+      <option value={somebodyElse}>Somebody else</option>
+    </select>
+  );
+}
+
+/** One person's time, or waiting for something to cure. */
+export function TimeLineDesk(props: TimeLineDeskProps) {
+  const { block, line, lines } = props;
+  const path = (field: string) => `${block}.${line.id}.${field}`;
+  const minutes = readMinutes(line.time);
+  const waiting = line.kind === 'waiting';
+  const of = waiting ? 'waiting' : line.name.trim() || 'this line';
+  const shown = minutes.ok && formatMinutes(minutes.value) !== line.time.trim() ? formatMinutes(minutes.value) : null;
+  const change = (part: Partial<TimeLineData>) => lines.change(line.id, part);
+  return (
+    <li className="m-0! border-b border-rule py-2.5">
+      <div className="grid grid-cols-[minmax(0,1fr)_8rem] gap-x-3.5 gap-y-1.5 wide:grid-cols-[minmax(0,12rem)_minmax(0,1fr)_8rem]">
+        <div>
+          {waiting ? <p className="py-2 font-semibold">Waiting</p> : <WhoSelect {...props} />}
+          {!waiting && line.handle === null && (
+            <div className="mt-1.5"><LineInput name={path('name')} label="Name" placeholder="Or just a name" value={line.name} onValue={(name) => change({ name })} onEnter={() => lines.goTo(line.id, 'time')} /></div>
+          )}
+        </div>
+        <div className="max-wide:order-3 max-wide:col-span-2">
+          <LineInput name={path('what')} label={`What ${of} was on`} placeholder={waiting ? 'What for: epoxy curing' : 'On what'} value={line.what} onValue={(what) => change({ what })} onEnter={() => lines.goOn(line.id)} />
+        </div>
+        <FigureInput name={path('time')} label={`How long, ${of}`} placeholder="7 h 30" inputMode="text" value={line.time} onValue={(time) => change({ time })} onEnter={() => lines.goOn(line.id)} />
+      </div>
+      <div className="mt-1 flex flex-wrap items-center gap-x-3.5">
+        <QuietSelect name={path('kind')} label={`What the time of ${of} counts for`} value={line.kind} options={kinds} onValue={(kind) => change({ kind: kindOf(kind) })} />
+        {shown && <span className="text-small text-ink-soft">{shown}</span>}
+        <TakeOutLine of={of} onTakeOut={() => lines.takeOut(line.id, line.name.trim() || 'A line')} />
+      </div>
+      <LineFaults names={[path('name'), path('time')]} />
+    </li>
+  );
+}

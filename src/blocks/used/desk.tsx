@@ -1,0 +1,58 @@
+import { useState } from 'react';
+import { exactFrom } from '#domain/quantity.ts';
+import { formatMoney } from '#domain/format.ts';
+import { typedAmount } from '../amount-line.ts';
+import { useBench } from '../bench.ts';
+import { BlockFrame, BlockSum, textButton } from '../block-frame.tsx';
+import { deskBlock, type BlockDeskProps } from '../desk-block.ts';
+import { newId, useLines } from '../use-lines.ts';
+import { UsedLineDesk } from './line-desk.tsx';
+import { blankUsedLine, used, type UsedData, type UsedLine } from './used.ts';
+
+function UsedDesk(props: BlockDeskProps<UsedData>) {
+  const { id, data } = props;
+  const bench = useBench();
+  const lines = useLines<UsedLine, UsedData>(props, blankUsedLine, 'material');
+  const [asking, setAsking] = useState(false);
+  const currency = bench.context.currency;
+  const sumOf = (fate: UsedLine['fate']) => data.lines.filter((line) => line.fate === fate).reduce((sum, line) => sum + (bench.lines.get(`${id}:${line.id}`)?.value ?? 0), 0);
+  const [usedSum, wastedSum] = [sumOf('used'), sumOf('wasted')];
+  const short = data.lines.some((line) => exactFrom(bench.lines.get(`${id}:${line.id}`)?.short ?? '0/1').gt(0));
+
+  const sameAsLastTime = async () => {
+    setAsking(true);
+    try {
+      const last = await bench.lastTime();
+      if (last.used.length === 0) bench.say('Nothing was written up as used before this day.');
+      else {
+        lines.add(last.used.map((line) => ({ ...blankUsedLine(newId()), ...line })));
+        bench.say(`Filled in from “${last.title ?? 'the day before'}”: ${last.used.length} lines.`);
+      }
+    } catch (cause) {
+      bench.say(cause instanceof Error ? cause.message : 'The last time could not be fetched.');
+    } finally {
+      setAsking(false);
+    }
+  };
+
+  return (
+    <BlockFrame
+      kind="used" word="Used" note={<>off {bench.buildTitle}’s shelf</>}
+      end={<button type="button" onClick={() => void sameAsLastTime()} aria-disabled={asking} className={textButton}>Same as last time</button>}
+    >
+      <ol className="list-none! p-0!">
+        {data.lines.map((line) => <UsedLineDesk key={line.id} block={id} line={line} lines={lines} />)}
+      </ol>
+      <button type="button" onClick={() => lines.add()} className={`${textButton} mt-2.5 text-base`}>Add a line</button>
+      <BlockSum label="Used" value={formatMoney(usedSum, currency)} />
+      {wastedSum > 0 && <p className="mt-1.5 flex justify-between gap-4 text-small text-ink-soft"><span>Wasted beside it</span><span>{formatMoney(wastedSum, currency)}</span></p>}
+      {short && <p className="mt-1.5 text-small text-ink-soft">Some of it is not bought yet: its cost comes in with the next receipt.</p>}
+    </BlockFrame>
+  );
+}
+
+export const usedDesk = deskBlock<UsedData>({
+  word: 'Used', kind: () => 'used', version: used.version, Desk: UsedDesk,
+  blank: () => ({ lines: [blankUsedLine(newId())] }),
+  words: (data) => data.lines.map((line) => [line.name, typedAmount(line), line.fate === 'wasted' ? 'wasted' : ''].filter(Boolean).join(', ')).join('; '),
+});

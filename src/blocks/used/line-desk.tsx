@@ -1,0 +1,75 @@
+import { useState } from 'react';
+import { exactFrom } from '#domain/quantity.ts';
+import { formatMoney } from '#domain/format.ts';
+import { countsWords } from '#contracts/words.ts';
+import { AmountInput, useAmountWords, useShownBack } from '../amount-input.tsx';
+import { useBench } from '../bench.ts';
+import type { MaterialFacts } from '../block.ts';
+import { LineFaults, optionsOf, QuietSelect } from '../line-fields.tsx';
+import { MaterialPicker } from '../material-picker.tsx';
+import { NewMaterial } from '../new-material.tsx';
+import { TakeOutLine } from '../take-out-line.tsx';
+import { unitWordOf } from '../unit-choice.ts';
+import type { useLines } from '../use-lines.ts';
+import type { UsedData, UsedLine } from './used.ts';
+
+const fates = [{ value: 'used', label: 'Used' }, { value: 'wasted', label: 'Wasted' }];
+const places = [{ value: 'shelf', label: 'Off the build’s shelf' }, { value: 'shed', label: 'From the shed' }];
+
+/** What is left after a line, or by how much it falls short. */
+function useLeft(block: string, line: UsedLine): { words: string; short: boolean } {
+  const bench = useBench();
+  const inWords = useAmountWords(line);
+  const reckoning = bench.lines.get(`${block}:${line.id}`);
+  if (!reckoning || reckoning.left === null) return { words: '', short: false };
+  const short = exactFrom(reckoning.short).gt(0);
+  return short ? { words: `${inWords(reckoning.short)} not bought yet`, short } : { words: `${inWords(reckoning.left)} left`, short };
+}
+
+interface UsedLineDeskProps {
+  block: string;
+  line: UsedLine;
+  lines: ReturnType<typeof useLines<UsedLine, UsedData>>;
+}
+
+/** One line: the material, how much, what is left after it, what it cost; below it what mostly stays as it is. */
+export function UsedLineDesk({ block, line, lines }: UsedLineDeskProps) {
+  const bench = useBench();
+  const [newName, setNewName] = useState<string | null>(null);
+  const shownBack = useShownBack(line);
+  const left = useLeft(block, line);
+  const path = (field: string) => `${block}.${line.id}.${field}`;
+  const value = bench.lines.get(`${block}:${line.id}`)?.value;
+  const change = (part: Partial<UsedLine>) => lines.change(line.id, part);
+  const pick = (material: MaterialFacts) => {
+    const same = line.material === material.id;
+    change({ material: material.id, name: material.name, ...(same && line.unit ? {} : { unit: unitWordOf(material) }) });
+    setNewName(null);
+    lines.goTo(line.id, 'amount');
+  };
+  const of = line.name.trim() || 'this line';
+  return (
+    <li className="m-0! border-b border-rule py-2.5">
+      <div className="grid grid-cols-[minmax(0,1fr)_auto] items-center gap-x-3.5 gap-y-1.5 [grid-template-areas:'name_money'_'amount_left'] wide:grid-cols-[minmax(0,1fr)_auto_minmax(5.5rem,auto)_5.5rem] wide:[grid-template-areas:'name_amount_left_money']">
+        <div className="[grid-area:name]">
+          <MaterialPicker
+            name={path('material')} value={line.name} picked={line.material !== null} onPick={pick} onNew={setNewName}
+            onType={(name) => change({ name, material: null })}
+          />
+        </div>
+        <div className="[grid-area:amount]"><AmountInput block={block} line={line} onLine={change} onEnter={() => lines.goOn(line.id)} /></div>
+        <p className={`text-small [grid-area:left] max-wide:text-right ${left.short ? 'font-semibold text-lead' : 'text-ink-soft'}`}>{left.words}</p>
+        <p className="text-right [grid-area:money]">{value === undefined ? '' : formatMoney(value, bench.context.currency)}</p>
+      </div>
+      {newName !== null && <NewMaterial key={newName} at={path('material')} name={newName} onAdded={pick} onLeave={() => setNewName(null)} />}
+      <div className="mt-1 flex flex-wrap items-center gap-x-3.5 gap-y-1">
+        <QuietSelect name={path('fate')} label={`Used or wasted: ${of}`} value={line.fate} options={fates} strong={line.fate === 'wasted'} onValue={(fate) => change({ fate: fate === 'wasted' ? 'wasted' : 'used' })} />
+        <QuietSelect name={path('counts')} label={`What ${of} counts for`} value={line.counts} options={optionsOf(countsWords)} onValue={(counts) => change({ counts: counts === 'whole' || counts === 'opened' ? counts : 'each' })} />
+        <QuietSelect name={path('from')} label={`Where ${of} came from`} value={line.from} options={places} onValue={(from) => change({ from: from === 'shed' ? 'shed' : 'shelf' })} />
+        {shownBack && <span className="text-small text-ink-soft">{shownBack}</span>}
+        <TakeOutLine of={of} onTakeOut={() => lines.takeOut(line.id, line.name.trim() || 'A line')} />
+      </div>
+      <LineFaults names={[path('material'), path('amount')]} />
+    </li>
+  );
+}

@@ -1,0 +1,138 @@
+import Fraction from 'fraction.js';
+import type { DeskView } from '#contracts/entries.ts';
+import type { MaterialLedger } from '#domain/ledger/price.ts';
+import { whatOneTakes } from '#domain/one-takes.ts';
+import { exactFrom, exactText } from '#domain/quantity.ts';
+import { deriveEntry, readEntry, type EntryDerivation, type EntryDocument, type MaterialFacts } from '#src/blocks/pure.ts';
+import type { EntryContext } from '#src/blocks/derive-entry.ts';
+import type { LineReckoning } from '#src/blocks/bench.ts';
+import { lineKey, shelfKey, shelfReplay, type ShelfName } from './shelf-replay.ts';
+import { stageReckoning, type StageReckoning } from './stage-reckoning.ts';
+
+/** The day's figures, minor units of the build's currency. */
+export interface DayFigures {
+  readonly used: number;
+  readonly wasted: number;
+  /** Hire, carriage, tools, and what went straight into use. */
+  readonly costs: number;
+  /** used + wasted + costs */
+  readonly day: number;
+  /** To the door, without what is not ours. */
+  readonly bought: number;
+  /** Some of it is not bought yet, so its money is not settled. */
+  readonly unsettled: boolean;
+  readonly minutes: number;
+  readonly waiting: number;
+  readonly people: number;
+}
+
+export interface OneTakesFigures {
+  readonly kind: string;
+  readonly unit: string;
+  readonly money: number;
+  readonly minutes: number;
+}
+
+export interface ShelfAfter {
+  readonly material: number;
+  readonly shelf: ShelfName;
+  /** Exact `n/d`. */
+  readonly left: string;
+  readonly short: string;
+}
+
+export interface DeskReckoning {
+  /** The document with every typed amount read. */
+  readonly document: EntryDocument;
+  readonly derived: EntryDerivation;
+  readonly lines: ReadonlyMap<string, LineReckoning>;
+  readonly figures: DayFigures;
+  readonly one: OneTakesFigures | null;
+  readonly stage: StageReckoning | null;
+  /** What this entry touches, as it would stand. */
+  readonly shelf: readonly ShelfAfter[];
+}
+
+export interface DeskLedger {
+  readonly reckon: (document: EntryDocument, materials: ReadonlyMap<number, MaterialFacts>) => DeskReckoning;
+  readonly replayed: () => number;
+}
+
+const noughtText = '0/1';
+
+function lineReckonings(derived: EntryDerivation, ledgers: ReadonlyMap<string, MaterialLedger>): Map<string, LineReckoning> {
+  const priced = new Map([...ledgers.values()].flatMap(({ movements }) => movements.map((movement) => [movement.key, movement] as const)));
+  const lines = new Map<string, LineReckoning>();
+  for (const use of derived.uses) {
+    const movement = priced.get(lineKey(use.block, use.line));
+    if (movement) lines.set(lineKey(use.block, use.line), { value: movement.value, short: exactText(movement.short), left: exactText(movement.left) });
+  }
+  for (const receipt of derived.receipts) {
+    for (const line of receipt.lines) {
+      const movement = priced.get(lineKey(receipt.block, line.line));
+      lines.set(lineKey(receipt.block, line.line), { value: line.door, short: noughtText, left: movement ? exactText(movement.left) : null });
+    }
+  }
+  return lines;
+}
+
+function sumOf(values: readonly number[]): number {
+  return values.reduce((sum, value) => sum + value, 0);
+}
+
+/** What went straight into use from a receipt is a cost of the day. */
+function costsOf(derived: EntryDerivation): number {
+  const straight = derived.receipts.flatMap(({ lines }) => lines.filter(({ goes }) => goes === 'straight').map(({ door }) => door));
+  return sumOf(derived.costs.map(({ money }) => money)) + sumOf(straight);
+}
+
+function figuresOf(derived: EntryDerivation, lines: ReadonlyMap<string, LineReckoning>): DayFigures {
+  const valueOf = (kind: 'used' | 'wasted') => sumOf(derived.uses.filter((use) => use.kind === kind).map((use) => lines.get(lineKey(use.block, use.line))?.value ?? 0));
+  const [used, wasted, costs] = [valueOf('used'), valueOf('wasted'), costsOf(derived)];
+  const handsOn = derived.times.filter(({ kind }) => kind !== 'waiting');
+  return {
+    used, wasted, costs, day: used + wasted + costs,
+    bought: sumOf(derived.receipts.map((receipt) => receipt.notSorted + sumOf(receipt.lines.filter(({ goes }) => goes !== 'not-mine').map(({ door }) => door)))),
+    unsettled: derived.uses.some((use) => exactFrom(lines.get(lineKey(use.block, use.line))?.short ?? noughtText).gt(0)),
+    minutes: sumOf(handsOn.map(({ minutes }) => minutes)),
+    waiting: sumOf(derived.times.filter(({ kind }) => kind === 'waiting').map(({ minutes }) => minutes)),
+    people: new Set(handsOn.map(({ handle, name }) => handle ?? name.toLowerCase())).size,
+  };
+}
+
+function oneOf(derived: EntryDerivation, lines: ReadonlyMap<string, LineReckoning>): OneTakesFigures | null {
+  if (!derived.work) return null;
+  const uses = derived.uses.map((use) => ({
+    material: String(use.material), kind: use.kind, counts: use.counts, amount: exactFrom(use.amount), value: lines.get(lineKey(use.block, use.line))?.value ?? 0,
+  }));
+  const one = whatOneTakes({ work: new Fraction(exactFrom(derived.work.amount)), uses, times: derived.times });
+  return one && { kind: derived.work.kind, unit: derived.work.unit, money: one.money, minutes: one.minutes };
+}
+
+function shelfAfter(ledgers: ReadonlyMap<string, MaterialLedger>): ShelfAfter[] {
+  return [...ledgers].map(([key, ledger]) => ({
+    material: Number(ledger.material), shelf: key.startsWith('shed:') ? 'shed' as const : 'shelf' as const, left: exactText(ledger.left), short: exactText(ledger.notBoughtYet),
+  }));
+}
+
+/**
+ * Figures while somebody types: the same domain code as the server's, over the history the desk was given.
+ * One is made per desk view; it keeps what it has priced, so that a keystroke replays only the material it touches.
+ */
+export function deskLedger(view: DeskView): DeskLedger {
+  const replay = shelfReplay(view);
+  return {
+    reckon: (typed, materials) => {
+      const context: EntryContext = { measures: view.build.measures, currency: view.build.currency, materials };
+      const document = readEntry(typed, [view.entry.document], context);
+      const derived = deriveEntry(document, context);
+      const ledgers = replay.price(derived);
+      const lines = lineReckonings(derived, ledgers);
+      const figures = figuresOf(derived, lines);
+      return { document, derived, lines, figures, one: oneOf(derived, lines), stage: stageReckoning(view, document, derived, figures, lines), shelf: shelfAfter(ledgers) };
+    },
+    replayed: replay.replayed,
+  };
+}
+
+export { lineKey, shelfKey };
