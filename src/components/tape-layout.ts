@@ -79,7 +79,7 @@ function oneStrip(slots: readonly Slot[], first: number, last: number): Strip {
   const pieces = cutIntoPieces(first, last, longGaps(slots, last));
   const folds = pieces.filter((piece) => piece.folded).length;
   const days = pieces.reduce((sum, piece) => sum + (piece.folded ? 0 : piece.last - piece.first + 1), 0);
-  return drawToFit(slots, pieces, (frameWidth - folds * foldWidth) / days);
+  return drawToFit(slots, pieces, Math.max(1, (frameWidth - folds * foldWidth) / days));
 }
 
 /** Every year at one scale from its first Monday, so that the months of one stand under those of the other. */
