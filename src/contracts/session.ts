@@ -9,7 +9,11 @@ export type ViewerView = z.output<typeof viewerView>;
 /** Who is looking, and what the site offers them. */
 export const readSession = endpoint({
   method: 'GET', path: '/api/session', access: 'anyone', params: nothing, query: nothing, body: noBody,
-  reply: z.object({ viewer: viewerView.nullable(), demo: z.boolean() }),
+  reply: z.object({
+    viewer: viewerView.nullable(), demo: z.boolean(),
+    /** Whether GitHub can be signed in with here. */
+    github: z.boolean(),
+  }),
 });
 export type SessionView = z.output<typeof readSession.reply>;
 
@@ -27,6 +31,18 @@ export const signUp = endpoint({
   method: 'POST', path: '/api/accounts', access: 'anyone', params: nothing, query: nothing,
   body: z.object({ name: personName, handle: handleText, email: emailText, password: passwordText }),
   reply: z.object({ viewer: viewerView }),
+});
+
+/** A GitHub account nobody here has, on its way to becoming an account of ours. */
+export const readJoining = endpoint({
+  method: 'GET', path: '/api/accounts/joining', access: 'anyone', params: nothing, query: nothing, body: noBody,
+  reply: z.object({ joining: z.object({ name: z.string(), handle: z.string(), email: z.string() }).nullable() }),
+});
+export type JoiningView = z.output<typeof readJoining.reply>;
+/** Finishes a sign-up begun at GitHub; the address is the one GitHub has confirmed. */
+export const signUpWithGithub = endpoint({
+  method: 'POST', path: '/api/accounts/github', access: 'anyone', params: nothing, query: nothing,
+  body: z.object({ name: personName, handle: handleText }), reply: z.object({ viewer: viewerView }),
 });
 
 export const readAccount = endpoint({
@@ -48,4 +64,9 @@ export const changePassword = endpoint({
 });
 export const partGithub = endpoint({
   method: 'DELETE', path: '/api/account/github', access: 'member', params: nothing, query: nothing, body: noBody, reply: ok,
+});
+/** Signs this person out everywhere but here. */
+export const endOtherSessions = endpoint({
+  method: 'DELETE', path: '/api/account/sessions', access: 'member', params: nothing, query: nothing, body: noBody,
+  reply: z.object({ ended: z.number().int() }),
 });
