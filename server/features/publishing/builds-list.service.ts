@@ -3,6 +3,7 @@ import { buildKinds, type BuildKind } from '#contracts/words.ts';
 import { Build, Entry } from '#server/entities/index.ts';
 import { usedOfBuilds } from '#server/features/shelf/figures.service.ts';
 import type { Em } from '#server/http/context.ts';
+import { groupedBy } from './grouping.ts';
 import { madeInWords } from './build-page.service.ts';
 import { coversOfBuilds } from './covers.service.ts';
 import { pageOf } from './paging.ts';
@@ -21,7 +22,7 @@ export async function countByKind(em: Em): Promise<{ kind: BuildKind; count: num
 export async function buildCards(em: Em, builds: readonly Build[]): Promise<BuildCard[]> {
   const ids = builds.map((build) => build.id);
   const entries = await em.find(Entry, { build: { $in: ids }, published: { $ne: null } }, { fields: ['build', 'day', 'dayTo'], orderBy: { day: 'desc' } });
-  const byBuild = Map.groupBy(entries, (entry) => entry.build.id);
+  const byBuild = groupedBy(entries, (entry) => entry.build.id);
   const covers = await coversOfBuilds(em, ids);
   const used = await usedOfBuilds(em, builds.filter((build) => build.costsShown).map((build) => build.id));
   return builds.map((build) => {

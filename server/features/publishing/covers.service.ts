@@ -2,6 +2,7 @@ import type { PictureView } from '#contracts/pictures.ts';
 import { Build, PublishedPicture } from '#server/entities/index.ts';
 import { pictureView } from '#server/features/media/pictures.service.ts';
 import type { Em } from '#server/http/context.ts';
+import { groupedBy } from './grouping.ts';
 
 export interface EntryPictures {
   readonly cover: PictureView | null;
@@ -11,7 +12,7 @@ export interface EntryPictures {
 /** The cover (the one marked, else the first) and the number of pictures of each published entry. */
 export async function picturesOfEntries(em: Em, entryIds: readonly number[]): Promise<Map<number, EntryPictures>> {
   const rows = await em.find(PublishedPicture, { entry: { $in: [...entryIds] } }, { populate: ['picture'], orderBy: { position: 'asc' } });
-  const byEntry = Map.groupBy(rows, (row) => row.entry.id);
+  const byEntry = groupedBy(rows, (row) => row.entry.id);
   return new Map([...byEntry].map(([id, shown]) => {
     const cover = shown.find((row) => row.cover) ?? shown[0];
     return [id, { cover: cover ? pictureView(cover.picture, { alt: cover.alt, caption: '' }) : null, count: shown.length }];

@@ -14,7 +14,7 @@ export async function entryCards(em: Em, entries: readonly Entry[], showsCosts: 
   const figures = await figuresOfEntries(em, ids);
   const pictures = await picturesOfEntries(em, ids);
   return entries.map((entry) => {
-    const build = entry.build.unwrap?.() ?? entry.build;
+    const build = entry.build;
     const sums = figures.get(entry.id);
     const shown = pictures.get(entry.id);
     const published = entry.published != null;

@@ -74,14 +74,25 @@ async function neighboursOf(em: Em, build: Build, entry: Entry): Promise<Neighbo
 
 const noFigures: EntryFigures = { used: 0, wasted: 0, costs: 0, bought: 0, minutes: 0, waiting: 0, unsettled: false };
 
-/** A reader's page of a source: the projection and what stands around it, never the stored document. */
-export async function entryPageOf(em: Em, source: EntrySource, preview: boolean): Promise<EntryPage> {
-  const { build, entry, document, costsShown, writes } = source;
-  const facts = await materialFacts(em, build.owner.id);
-  const derived = deriveEntry(document, { measures: build.measures, currency: build.currency, materials: facts });
+/** A source projected: the rows readers get, and what was learnt on the way. */
+export async function projectedEntry(em: Em, source: EntrySource) {
+  const { build, document } = source;
+  const derived = deriveEntry(document, { measures: build.measures, currency: build.currency, materials: await materialFacts(em, build.owner.id) });
   const plural = await pluralsOf(em, derived);
   const pictures = await pictureViews(em, build.id, derived.pictures.map((picture) => picture.key));
   const context = await projectionContext(em, source, derived, plural);
+  return { derived, plural, pictures, names: context.names, rows: projectEntry(document, context, pictures).rows };
+}
+
+function withNames(derived: EntryDerivation, names: ReadonlyMap<string, string>, author: { handle: string; name: string }): string[] {
+  const others = derived.times.filter((time) => time.kind !== 'waiting' && time.handle !== author.handle);
+  return [...new Set(others.map((time) => (time.handle && names.get(time.handle)) || time.name))].filter((name) => name !== '' && name !== author.name);
+}
+
+/** A reader's page of a source: the projection and what stands around it, never the stored document. */
+export async function entryPageOf(em: Em, source: EntrySource, preview: boolean): Promise<EntryPage> {
+  const { build, entry, document, costsShown, writes } = source;
+  const { derived, plural, pictures, names, rows } = await projectedEntry(em, source);
   const sums = (await figuresOfEntries(em, [entry.id])).get(entry.id) ?? noFigures;
   const stage = document.stage === null ? null : await em.findOne(Stage, { id: document.stage });
   const cover = derived.pictures.find((picture) => picture.cover) ?? derived.pictures[0];
@@ -89,11 +100,10 @@ export async function entryPageOf(em: Em, source: EntrySource, preview: boolean)
   return {
     build: { slug: build.slug, title: build.title, currency: build.currency },
     owner: { handle: build.owner.handle, name: build.owner.name }, author: { handle: entry.author.handle, name: entry.author.name },
-    withNames: [...new Set(derived.times.filter((time) => time.kind !== 'waiting' && time.handle !== entry.author.handle).map((time) => (time.handle && context.names.get(time.handle)) || time.name))].filter((name) => name !== entry.author.name),
+    withNames: withNames(derived, names, entry.author),
     number: entry.number, slug: entry.slug ?? '', title: document.title, lead: document.lead, day: document.day, dayTo: document.dayTo, stage: stage?.title ?? null,
     publishedAt: entry.firstPublishedAt?.toISOString() ?? null, editedAt: entry.editedAt?.toISOString() ?? null,
-    rows: projectEntry(document, context, pictures).rows,
-    tally: await tallyOf(em, source, derived, sums, plural), tape: await tapeOf(em, build, costsShown),
+    rows, tally: await tallyOf(em, source, derived, sums, plural), tape: await tapeOf(em, build, costsShown),
     ...(await neighboursOf(em, build, entry)),
     cover: coverView && cover ? { ...coverView, alt: cover.alt } : null,
     may: { write: writes }, preview,

@@ -23,7 +23,7 @@ export async function freshEntries(em: Em, limit: number, offset = 0): Promise<E
 /** The slip of the opening day: its Used block, with what one took as the last word. */
 async function openingSlip(em: Em, entry: Entry): Promise<SlipView | null> {
   if (!entry.published) return null;
-  const page = await entryPageOf(em, { build: entry.build.unwrap?.() ?? entry.build, entry, document: entry.published, costsShown: entry.build.costsShown, writes: false }, false);
+  const page = await entryPageOf(em, { build: entry.build, entry, document: entry.published, costsShown: entry.build.costsShown, writes: false }, false);
   const slip = page.rows.flatMap((row) => row.slips).find((one) => one.type === 'used')?.slip;
   if (!slip) return null;
   const one = [page.tally.money?.one != null ? formatMoney(page.tally.money.one, page.tally.currency) : '', page.tally.oneMinutes != null ? formatMinutes(page.tally.oneMinutes) : ''].filter(Boolean).join(', ');

@@ -1,0 +1,85 @@
+import { createElement } from 'react';
+import { renderToStaticMarkup } from 'react-dom/server';
+import { FeedEntry } from '#src/blocks/views.ts';
+import { Entry, type Build } from '#server/entities/index.ts';
+import { requireVisibleBuild } from '#server/features/builds/build-access.service.ts';
+import type { Em } from '#server/http/context.ts';
+import { entryHref } from './entry-cards.service.ts';
+import { projectedEntry } from './entry-page.service.ts';
+import { freshEntries } from './home.service.ts';
+
+const itemsAFeed = 20;
+
+export interface FeedItem {
+  /** Permanent through edits and renames. */
+  readonly guid: string;
+  readonly title: string;
+  readonly url: string;
+  readonly lead: string;
+  /** The whole entry: plain HTML with absolute addresses. */
+  readonly html: string;
+  readonly author: string;
+  readonly published: Date;
+  readonly modified: Date;
+  readonly picture: string | null;
+  readonly tags: readonly string[];
+}
+export interface Feed {
+  readonly title: string;
+  readonly description: string;
+  readonly homeUrl: string;
+  readonly path: string;
+  readonly items: readonly FeedItem[];
+  readonly modified: Date | null;
+}
+
+/** Control characters that XML 1.0 has no place for (its section 2.2), and half surrogates. */
+export function wellFormed(text: string): string {
+  return text.toWellFormed().replace(/[\u0000-\u0008\u000B\u000C\u000E-\u001F\uFFFE\uFFFF]/g, '');
+}
+
+async function feedItem(em: Em, entry: Entry, publicUrl: string): Promise<FeedItem | null> {
+  const build = entry.build;
+  if (!entry.published || !entry.firstPublishedAt) return null;
+  // a feed has no reader it knows: costs kept to the crew are absent from it whoever asks
+  const { rows, pictures, derived } = await projectedEntry(em, { build, entry, document: entry.published, costsShown: build.costsShown, writes: false });
+  const cover = derived.pictures.find((picture) => picture.cover) ?? derived.pictures[0];
+  const src = cover ? pictures.get(cover.key)?.src : undefined;
+  return {
+    guid: `urn:uuid:${entry.guid}`, title: wellFormed(entry.title), url: `${publicUrl}${entryHref(build, entry)}`, lead: wellFormed(entry.published.lead),
+    html: wellFormed(renderToStaticMarkup(createElement(FeedEntry, { page: { lead: entry.published.lead, rows }, publicUrl }))),
+    author: wellFormed(entry.author.name), published: entry.firstPublishedAt, modified: entry.editedAt ?? entry.firstPublishedAt,
+    picture: src ? `${publicUrl}${src}` : null, tags: entry.stage ? [wellFormed(entry.stage.title)] : [],
+  };
+}
+
+async function feedOf(em: Em, entries: readonly Entry[], publicUrl: string, about: Omit<Feed, 'items' | 'modified'>): Promise<Feed> {
+  const items: FeedItem[] = [];
+  for (const entry of entries) {
+    const item = await feedItem(em, entry, publicUrl);
+    if (item) items.push(item);
+  }
+  const modified = items.reduce<Date | null>((latest, item) => (latest && latest > item.modified ? latest : item.modified), null);
+  return { ...about, items, modified };
+}
+
+/** Everything fresh, by first publication. */
+export async function siteFeed(em: Em, publicUrl: string): Promise<Feed> {
+  return feedOf(em, await freshEntries(em, itemsAFeed), publicUrl, {
+    title: 'Tallywright, everything fresh', description: 'Write up the work. Know what it cost.', homeUrl: `${publicUrl}/`, path: '/feed',
+  });
+}
+
+/** One build's days, by first publication. An unlisted build's feed stands at its own address like its pages; a private one has none. */
+export async function buildFeed(em: Em, slug: string, publicUrl: string): Promise<Feed> {
+  const { build } = await requireVisibleBuild(em, null, slug);
+  return feedOf(em, await publishedOf(em, build), publicUrl, {
+    title: wellFormed(build.title), description: wellFormed(build.lead) || `${wellFormed(build.title)}, day by day.`, homeUrl: `${publicUrl}/builds/${build.slug}`, path: `/builds/${build.slug}/feed`,
+  });
+}
+
+async function publishedOf(em: Em, build: Build): Promise<Entry[]> {
+  return em.find(Entry, { build: build.id, published: { $ne: null } }, {
+    populate: ['build.owner', 'author', 'stage'], orderBy: { firstPublishedAt: 'desc', id: 'desc' }, limit: itemsAFeed,
+  });
+}
