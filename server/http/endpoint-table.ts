@@ -63,6 +63,7 @@ export async function invoke(table: EndpointTable, method: Method, path: string,
   if (!mounted) throw new Error(`No endpoint ${method} ${path}`);
   const { endpoint, run } = mounted;
   requireAccess(endpoint, context);
+  if (context.refusal && endpoint.method !== 'GET') throw context.refusal;
   const reply = await run(context, {
     params: parsed(endpoint.params, input.params, 'not-found'),
     query: parsed(endpoint.query, input.query, 'bad-input'),

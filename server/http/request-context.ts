@@ -2,13 +2,15 @@ import type {} from 'multer';
 import type { Request } from 'express';
 import { Person } from '#server/entities/index.ts';
 import type { Caller, Context, Parts, SessionHandle, Viewer } from './context.ts';
+import { refusalOf } from './held-back.ts';
 import { storedId } from './session-store.ts';
+import { sessionCookie } from './sessions.ts';
 
 function settled(run: (done: (error: unknown) => void) => void): Promise<void> {
   return new Promise((resolve, reject) => run((error) => (error ? reject(error instanceof Error ? error : new Error(String(error))) : resolve())));
 }
 
-function sessionHandle(req: Request): SessionHandle {
+function sessionHandle(req: Request, parts: Parts): SessionHandle {
   return {
     get stored() {
       return req.session?.personId === undefined ? null : storedId(req.sessionID);
@@ -20,6 +22,16 @@ function sessionHandle(req: Request): SessionHandle {
     },
     async signOut() {
       await settled((done) => req.session.destroy(done));
+      const { name, options: { maxAge: _, ...options } } = sessionCookie(parts.config);
+      req.res?.clearCookie(name, options);
+    },
+    get joining() {
+      return req.session?.joining ?? null;
+    },
+    async beginJoining(joining) {
+      await settled((done) => req.session.regenerate(done));
+      req.session.joining = joining;
+      await settled((done) => req.session.save(done));
     },
   };
 }
@@ -35,5 +47,5 @@ export async function contextOf(req: Request, parts: Parts): Promise<Context> {
   const person = personId === undefined ? null : await em.findOne(Person, { id: personId });
   const viewer: Viewer = person ? callerOf(person, parts.now()) : null;
   const file = req.file;
-  return { em, viewer, session: sessionHandle(req), parts, upload: file ? { path: file.path, name: file.originalname, bytes: file.size } : null };
+  return { em, viewer, session: sessionHandle(req, parts), parts, refusal: refusalOf(req), upload: file ? { path: file.path, name: file.originalname, bytes: file.size } : null };
 }

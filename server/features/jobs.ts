@@ -1,0 +1,8 @@
+import type { Parts } from '#server/http/context.ts';
+import type { JobHandlers } from '#server/jobs/handler.ts';
+import { sessionJobs } from './accounts/sessions.jobs.ts';
+
+/** Everything the queue can be asked to do. */
+export function jobHandlers(parts: Parts): JobHandlers {
+  return { ...sessionJobs(parts) };
+}
