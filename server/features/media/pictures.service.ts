@@ -7,7 +7,7 @@ import { mayWrite, requireWritableBuild } from '#server/features/builds/build-ac
 import type { Caller, Em, Parts, Viewer } from '#server/http/context.ts';
 import { pictureMaker } from './picture-maker.ts';
 import { RefusedPicture, type MadePicture } from './picture-messages.ts';
-import { makingFolder, newPictureKey, picturesFolder, placeOf, readyQuarantine, removePicture, takeOver } from './picture-store.ts';
+import { makingFolder, newPictureKey, picturesFolder, placeOf, readyQuarantine, takeOver } from './picture-store.ts';
 
 /** A file in quarantine, with the name its sender gave it. */
 export interface Upload {
@@ -144,8 +144,7 @@ export async function mayServePicture(em: Em, viewer: Viewer, key: string): Prom
   return (await mayWrite(em, viewer, build)) ? 'crew' : 'nobody';
 }
 
-/** Forgets pictures: their rows, then their files. What a stop leaves between the two is cleared later. */
-export async function forgetPictures(em: Em, dataDir: string, keys: readonly string[]): Promise<void> {
-  await em.nativeDelete(Picture, { key: { $in: [...keys] } });
-  for (const key of keys) await removePicture(dataDir, key);
+/** Forgets the rows of pictures; their files go after the transaction, or with the next clearing. */
+export async function forgetPictures(em: Em, keys: readonly string[]): Promise<void> {
+  if (keys.length > 0) await em.nativeDelete(Picture, { key: { $in: [...keys] } });
 }
