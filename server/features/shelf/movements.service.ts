@@ -3,7 +3,7 @@ import { exactText } from '#domain/quantity.ts';
 import { Material, Movement, type Build, type Entry, type ReceiptLine, type Shelf, type Stage } from '#server/entities/index.ts';
 import type { Em } from '#server/http/context.ts';
 import { fallsShort } from './falls-short.ts';
-import { ledgerMovement, type StoredMovement } from './ledger-movement.ts';
+import { ledgerMovement, type StoredMovement } from './ledger-movement.service.ts';
 
 /** A movement to be laid down, before it is priced. */
 export interface NewMovement extends StoredMovement {
@@ -77,7 +77,9 @@ function layDown(em: Em, entry: Entry, stored: readonly Movement[], rows: readon
     const row = before.get(fields.key);
     before.delete(fields.key);
     const values = { ...fields, material: em.getReference(Material, material) };
-    return row ? em.assign(row, values) : em.create(Movement, { ...values, entry, ...unpriced });
+    const now = row ? em.assign(row, values) : em.create(Movement, { ...values, entry, ...unpriced });
+    em.persist(now);
+    return now;
   });
   for (const row of before.values()) em.remove(row);
   return laid;

@@ -1,0 +1,71 @@
+import type { MaterialHistory, ShelfRow } from '#contracts/entries.ts';
+import { priceShelf } from '#domain/ledger/price.ts';
+import { exactText } from '#domain/quantity.ts';
+import type { EntryDocument } from '#src/blocks/pure.ts';
+import type { Build, Entry, Shelf } from '#server/entities/index.ts';
+import { ledgerMovement } from '#server/features/shelf/ledger-movement.service.ts';
+import { findShed, shelfOfBuild } from '#server/features/shelf/shelves.service.ts';
+import type { Caller, Em } from '#server/http/context.ts';
+import { draftMovements, draftsAround, storedMovements, type LaidMovement } from './laid-over.ts';
+
+// So many rows of history go to the desk beside those of the entry's own materials: the next material picked is priced at once.
+const rowsBeside = 2000;
+
+/** The build's shelf and its owner's shed as crew see them: the stored ledger without one entry, with all other working copies laid over. */
+export interface DeskShelves {
+  readonly shelf: Shelf;
+  readonly shed: Shelf | null;
+  readonly onShelf: readonly LaidMovement[];
+  readonly inShed: readonly LaidMovement[];
+}
+
+export async function deskShelves(em: Em, caller: Caller, build: Build, entry: Entry): Promise<DeskShelves> {
+  const drafts = await draftsAround(em, caller, build, entry);
+  const replaced = new Set([entry.id, ...drafts.map((draft) => draft.entry)]);
+  const shelf = await shelfOfBuild(em, build);
+  const shed = await findShed(em, build.owner, build.currency);
+  return {
+    shelf, shed,
+    onShelf: [...await storedMovements(em, shelf, replaced), ...draftMovements(drafts, 'shelf', build)],
+    inShed: [...(shed ? await storedMovements(em, shed, replaced) : []), ...draftMovements(drafts, 'shed', build)],
+  };
+}
+
+/** What is on hand of every material, this entry left out. */
+export function shelfRows(shelves: DeskShelves): ShelfRow[] {
+  const rows = (on: ShelfRow['shelf'], movements: readonly LaidMovement[], method: Shelf['method']) =>
+    [...priceShelf(movements.map((row) => ledgerMovement(row, row.material)), method).values()].map(({ material, left, notBoughtYet, figures }) => ({
+      material: Number(material), shelf: on, left: exactText(left), short: exactText(notBoughtYet), worth: figures.left,
+    }));
+  return [...rows('shelf', shelves.onShelf, shelves.shelf.method), ...rows('shed', shelves.inShed, shelves.shed?.method ?? 'fifo')];
+}
+
+function materialsIn(document: EntryDocument): Set<number> {
+  return new Set(document.content.flatMap((node) => (node.type === 'used' || node.type === 'bought' ? node.attrs.data.lines.flatMap(({ material }) => material ?? []) : [])));
+}
+
+function byMaterial(on: MaterialHistory['shelf'], movements: readonly LaidMovement[]): MaterialHistory[] {
+  const histories = new Map<number, MaterialHistory>();
+  for (const { material, ...row } of movements) {
+    const history = histories.get(material) ?? { material, shelf: on, rows: [] };
+    history.rows.push(row);
+    histories.set(material, history);
+  }
+  return [...histories.values()];
+}
+
+function lastDay({ rows }: MaterialHistory): string {
+  return rows.reduce((latest, { day }) => (day > latest ? day : latest), '');
+}
+
+/**
+ * What the desk replays: the whole history of every material in the documents, and of others, those last touched first, while there is room.
+ * A material that has a shelf row and no history here was left out, and comes with the next reading once it stands in the working copy.
+ */
+export function materialHistories(shelves: DeskShelves, documents: readonly EntryDocument[]): MaterialHistory[] {
+  const own = new Set(documents.flatMap((document) => [...materialsIn(document)]));
+  const all = [...byMaterial('shelf', shelves.onShelf), ...byMaterial('shed', shelves.inShed)];
+  const others = all.filter(({ material }) => !own.has(material)).toSorted((a, b) => lastDay(b).localeCompare(lastDay(a)));
+  let room = rowsBeside;
+  return [...all.filter(({ material }) => own.has(material)), ...others.filter(({ rows }) => (room -= rows.length) >= 0)];
+}
