@@ -24,6 +24,6 @@ export function featureRouters(parts: Parts): Router[] {
   return [accountsRouter(parts), picturesRouter(parts), feedsRouter(parts)];
 }
 
-export function featureLimits(parts: Parts): RequestHandler {
-  return accountLimits(parts);
+export function featureLimits(_parts: Parts): RequestHandler {
+  return accountLimits();
 }

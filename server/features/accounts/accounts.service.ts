@@ -74,7 +74,7 @@ export async function changeProfile(em: Em, caller: Caller, { name, about }: Acc
 export async function replacePassword(em: Em, caller: Caller, storedSession: string | null, { current, password }: PasswordChange): Promise<void> {
   const person = await em.findOneOrFail(Person, { id: caller.id });
   const known = person.passwordHash == null || (await isPassword(person.passwordHash, current));
-  if (!known) throw new AppError('wrong-sign-in', 'This is not your password of today.', { current: 'This is not your password of today.' });
+  if (!known) throw new AppError('wrong-sign-in', 'This is not your current password.', { current: 'This is not your current password.' });
   refuse({ password: passwordProblem(password, person) });
   const passwordHash = await hashPassword(password);
   await em.transactional(async (inner) => {
