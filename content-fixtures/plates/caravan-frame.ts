@@ -6,7 +6,7 @@ import { benchTop, boards, floor, heads, shedWall } from "./places.ts";
 import type { Plates } from "./plate.ts";
 import type { Sheet } from "./sheet.ts";
 import { ink } from "./sheet.ts";
-import { clamp, crumbs, rule, screwdriver } from "./tools.ts";
+import { clamp, crumbs, mallet, rule, screwdriver } from "./tools.ts";
 
 function scarf(s: Sheet): void {
   benchTop(s, "slate", 3);
@@ -47,7 +47,7 @@ function leakStain(s: Sheet): void {
   s.flat(rect(850, -80, 1000, 440, 40), s.of("glass"));
   s.flat(poly([1000, 0], [1180, 0], [900, 330], [858, 330], [858, 150]), "#ffffff", 0.22);
   heads(s, [[800, 120], [800, 260], [960, 407], [1140, 407], [1320, 407], [1500, 407]], 12, s.of("rust"));
-  for (const k of [0, 7]) s.line(curve([[640, 470 + k], [950, 600], [980, 800 - k], [790, 985], [560, 930], [500, 720], [560, 520], [700, 452 + k]]), "#f3f1e6", 7 - k * 0.5, 0.75);
+  for (const k of [0, 7]) s.line(curve([[600, 486 + k], [800, 462 - k], [950, 600], [980, 800 - k], [790, 985], [560, 930], [500, 720], [560, 520], [700, 452 + k]]), "#f3f1e6", 7 - k * 0.5, 0.75);
   s.flat(blob(742, 742, 46, 38, 4), "#1d120a", 0.8);
   s.shadow(poly([740, 738], [1010, 930], [990, 960]), 6, 0.3);
   s.cord("M744 742L800 690", s.of("steel"), 16, 10);
@@ -169,8 +169,9 @@ function floorRotten(s: Sheet): void {
     for (let k = 0; k < 6; k += 1) s.line(open([x - 10 + tilt * (1 - k / 6), y - 90 + k * 15], [x + 10 + tilt * (1 - k / 6), y - 83 + k * 15]), ink, 3, 0.5);
     s.solid(poly([x - 28 + tilt, y - 122], [x + 28 + tilt, y - 122], [x + 10 + tilt, y - 98], [x - 10 + tilt, y - 98]), s.of("darkRust"), { edge: 4, drop: 4 });
   }
-  rule(s, { x: 110, y: 930, turn: 2 }, 700);
-  crumbs(s, 1250, 930, [360, 70], 80, 4, "#5b4229", 11);
+  rule(s, { x: 90, y: 950, turn: 1 }, 560);
+  mallet(s, { x: 980, y: 900, turn: 12 });
+  crumbs(s, 800, 850, [420, 60], 80, 4, "#5b4229", 11);
 }
 
 function floorNew(s: Sheet): void {

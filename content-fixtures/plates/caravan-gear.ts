@@ -7,7 +7,7 @@ import { benchTop, heads } from "./places.ts";
 import type { Plates } from "./plate.ts";
 import type { Sheet } from "./sheet.ts";
 import { ink } from "./sheet.ts";
-import { brush, crumbs, openTin, rule } from "./tools.ts";
+import { brush, crumbs, openTin, rule, shavings } from "./tools.ts";
 
 /** A sprung skin pin seen a little from the side. */
 function skinPin(s: Sheet, x: number, y: number): void {
@@ -37,11 +37,7 @@ function roofSheet(s: Sheet): void {
     if (i % 3 === 1) skinPin(s, x, y);
   }
   drill(s, 900, 640);
-  const random = randomFrom(5);
-  for (let i = 0; i < 16; i += 1) {
-    const [x, y] = [260 + random() * 640, 640 + random() * 150];
-    s.line(curve([[x, y], [x + 9, y - 12], [x + 20, y - 2], [x + 12, y + 8], [x + 26, y + 14]]), "#f4f6f3", 4);
-  }
+  shavings(s, 560, 700, 320, 18, 5, ["#f4f6f3", "#dfe4e4"], 0.5, "#6c767a");
   rule(s, { x: 1010, y: 360, turn: 4 }, 480);
 }
 

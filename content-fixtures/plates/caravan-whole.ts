@@ -1,6 +1,6 @@
 /** The caravan from the side, as found and as finished, and the corner closed up. */
 import { randomFrom } from "./noise.ts";
-import { blob, circle, curve, ellipse, open, placed, poly, ragged, rect, ring } from "./paths.ts";
+import { blob, circle, curve, ellipse, open, poly, ragged, rect, ring } from "./paths.ts";
 import { floor, heads, shedWall } from "./places.ts";
 import type { Plates } from "./plate.ts";
 import type { Sheet } from "./sheet.ts";
@@ -167,7 +167,7 @@ function cornerFinished(s: Sheet): void {
   s.solid(circle(190, 1020, 50), "#b93a16", { edge: 9 });
   s.solid(rect(-20, 120, 420, 330, 50), s.of("rubber"), { drop: 10, edge: 5 });
   s.flat(rect(-20, 144, 396, 282, 36), s.of("glass"));
-  s.flat(placed(rect(0, 0, 90, 360), { x: 250, y: 130, turn: 28 }), "#ffffff", 0.24);
+  s.flat(poly([190, 144], [290, 144], [140, 426], [40, 426]), "#ffffff", 0.24);
   s.line(curve([[-10, 425], [340, 425], [375, 390], [375, 150]]), "#d3d645", 7, 0.8);
 }
 

@@ -26,13 +26,13 @@ const quarter = 0.5523;
 
 export function ellipse(cx: number, cy: number, rx: number, ry: number): string {
   const [kx, ky] = [rx * quarter, ry * quarter];
-  const curve = (a: Point, b: Point, c: Point): string => `C${pair(a)} ${pair(b)} ${pair(c)}`;
+  const cubic = (a: Point, b: Point, c: Point): string => `C${pair(a)} ${pair(b)} ${pair(c)}`;
   return [
     `M${pair([cx + rx, cy])}`,
-    curve([cx + rx, cy + ky], [cx + kx, cy + ry], [cx, cy + ry]),
-    curve([cx - kx, cy + ry], [cx - rx, cy + ky], [cx - rx, cy]),
-    curve([cx - rx, cy - ky], [cx - kx, cy - ry], [cx, cy - ry]),
-    curve([cx + kx, cy - ry], [cx + rx, cy - ky], [cx + rx, cy]),
+    cubic([cx + rx, cy + ky], [cx + kx, cy + ry], [cx, cy + ry]),
+    cubic([cx - kx, cy + ry], [cx - rx, cy + ky], [cx - rx, cy]),
+    cubic([cx - rx, cy - ky], [cx - kx, cy - ry], [cx, cy - ry]),
+    cubic([cx + kx, cy - ry], [cx + rx, cy - ky], [cx + rx, cy]),
     "Z",
   ].join("");
 }

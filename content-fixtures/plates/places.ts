@@ -1,6 +1,6 @@
 /** Where the work is done: bench tops, the shed wall, concrete, the yard. */
 import { randomFrom } from "./noise.ts";
-import { circle, curve, open, rect } from "./paths.ts";
+import { circle, open, rect } from "./paths.ts";
 import type { Material } from "./recipes.ts";
 import type { Sheet } from "./sheet.ts";
 import { ink } from "./sheet.ts";
@@ -43,7 +43,8 @@ export function benchTop(s: Sheet, material: Material = "beech", seed = 1): void
   }
   for (let i = 0; i < 2; i += 1) {
     const [x, y] = [random() * s.width, random() * s.height];
-    s.line(curve([[x + 34, y], [x, y + 34], [x - 34, y], [x - 4, y - 34], [x + 30, y - 14]]), ink, 4, 0.16);
+    s.line(circle(x, y, 44), ink, 4, 0.12);
+    s.line(circle(x + 5, y + 3, 43), ink, 2, 0.1);
   }
 }
 

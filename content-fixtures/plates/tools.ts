@@ -1,5 +1,4 @@
 /** The tools that come back from plate to plate, each drawn once about its own nought and put where it lies. */
-import { turned, upright } from "./blocks.ts";
 import { randomFrom } from "./noise.ts";
 import type { Place, Point } from "./paths.ts";
 import { circle, curve, ellipse, open, placed, poly, rect } from "./paths.ts";
@@ -37,17 +36,6 @@ export function clamp(s: Sheet, place: Place, reach: number): void {
   put(rect(-10, reach + 74, 20, 64), "steel", { drop: 8 });
   put(rect(-24, reach + 134, 48, 128, 20), "ash", { drop: 16 }, 3);
   for (const x of [-8, 8]) s.line(placed(open([x, reach + 150], [x, reach + 246]), place), ink, 2.4, 0.3);
-}
-
-/** A G-clamp from the side: its screw along x at nought, the frame above. */
-export function gClamp(s: Sheet, place: Place, gap: number): void {
-  const put = putter(s, place);
-  const frame = "M-46 -26L-20 -26L-20 -150Q-20 -196 26 -196L" + `${gap - 10} -196Q${gap + 46} -196 ${gap + 46} -150L${gap + 46} 34L${gap} 34L${gap} -16L${gap + 8} -16L${gap + 8} -140Q${gap + 8} -158 ${gap - 10} -158L26 -158Q18 -158 18 -150L18 26L-46 26Z`;
-  put(frame, "primer", { drop: 14 });
-  put(rect(-170, -11, 190, 22), "steel", { drop: 8 });
-  for (let x = -160; x < -50; x += 9) s.line(placed(open([x, -10], [x + 5, 10]), place), ink, 2, 0.5);
-  put(rect(12, -24, 20, 48, 4), "darkSteel");
-  put(rect(-176, -70, 14, 140, 7), "steel", { drop: 8 });
 }
 
 /** A screwdriver lying along x, its tip at nought, handle to the right. */
@@ -94,15 +82,6 @@ export function openTin(s: Sheet, x: number, y: number, r: number, inside: strin
   s.clipped(circle(x, y, r * 0.88), () => s.shade(`${circle(x, y, r * 1.2)}${circle(x + r * 0.16, y + r * 0.16, r * 0.86)}`, 0.34));
 }
 
-/** A tin or jar standing, seen from the side, with a plain band where a label would be. */
-export function standingTin(s: Sheet, x: number, foot: number, wide: number, high: number, fill: string, band: string): void {
-  const half = wide / 2;
-  upright(s, x, foot - high, [[0, half], [high, half]], fill, 20);
-  s.flat(rect(x - half, foot - high * 0.74, wide, high * 0.46), band, 0.82);
-  s.shade(rect(x + half * 0.36, foot - high * 0.74, half * 0.64, high * 0.46), 0.26, 90);
-  upright(s, x, foot - high - 10, [[0, half + 5], [16, half + 5]], s.of("steel"));
-}
-
 /** A bottle with a cork, seen from the side. */
 export function bottle(s: Sheet, x: number, foot: number, wide: number, high: number, liquid: string, level = 0.6): void {
   const h = wide / 2;
@@ -119,19 +98,19 @@ export function bottle(s: Sheet, x: number, foot: number, wide: number, high: nu
 }
 
 /** Curls off a plane or a gouge. */
-export function shavings(s: Sheet, x: number, y: number, spread: number, count: number, seed: number, tones: readonly string[]): void {
+export function shavings(s: Sheet, x: number, y: number, spread: number, count: number, seed: number, tones: readonly string[], size = 1, dark = "#6d4c2b"): void {
   const random = randomFrom(seed);
   for (let i = 0; i < count; i += 1) {
-    const [cx, cy, r] = [x + (random() - 0.5) * spread * 2, y + (random() - 0.5) * spread * 0.9, 16 + random() * 20];
+    const [cx, cy, r] = [x + (random() - 0.5) * spread * 2, y + (random() - 0.5) * spread * 0.9, (16 + random() * 20) * size];
     const turn = random() * 6.3;
     const points = Array.from({ length: 9 }, (_, k): Point => {
       const [a, reach] = [turn + k * 0.85, r * (1 - k * 0.085)];
-      return [cx + Math.cos(a) * reach + k * 3, cy + Math.sin(a) * reach * 0.7];
+      return [cx + Math.cos(a) * reach + k * 3 * size, cy + Math.sin(a) * reach * 0.7];
     });
     const path = curve(points);
-    s.add(`<path d="${path}" fill="none" stroke="${ink}" stroke-opacity=".3" stroke-width="11" transform="translate(6 6)"/>`);
-    s.line(path, "#6d4c2b", 11);
-    s.line(path, tones[i % tones.length] ?? "#e3c99f", 8);
+    s.add(`<path d="${path}" fill="none" stroke="${ink}" stroke-opacity=".3" stroke-width="${11 * size}" transform="translate(6 6)"/>`);
+    s.line(path, dark, 11 * size);
+    s.line(path, tones[i % tones.length] ?? "#e3c99f", 8 * size);
   }
 }
 
@@ -144,9 +123,4 @@ export function crumbs(s: Sheet, x: number, y: number, spread: Point, count: num
     s.flat(ellipse(cx + 3, cy + 3, a, b), ink, 0.3);
     s.flat(poly([cx - a, cy], [cx, cy - b], [cx + a, cy - b * 0.2], [cx + a * 0.3, cy + b]), colour);
   }
-}
-
-/** A cylinder of a bolt, head to the left, lying along x. */
-export function bolt(s: Sheet, x: number, y: number, length: number, r: number): void {
-  turned(s, x, y, [[0, r * 1.8], [r * 1.3, r * 1.8], [r * 1.3, r], [length, r]], s.of("darkSteel"), 8);
 }
