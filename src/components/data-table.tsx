@@ -1,5 +1,6 @@
 import type { ReactNode } from 'react';
 import { Link } from 'react-router-dom';
+import { SlidingRegion } from './sliding-region.tsx';
 import { cellClass, headClass, numberClass } from './table-cells.ts';
 
 export interface DataColumn {
@@ -31,30 +32,34 @@ export interface DataTableProps {
 }
 
 /** Anything countable. Explicit roles keep it a table to a screen reader when rows are stacked. */
-export function DataTable({ caption, captionHidden = false, columns, rows, foot, phone = columns.length > 3 ? 'stack' : 'keep' }: DataTableProps) {
+export function DataTable(props: DataTableProps) {
+  const phone = props.phone ?? (props.columns.length > 3 ? 'stack' : 'keep');
+  const table = <PlainTable {...props} phone={phone} />;
+  return phone === 'slide' ? <SlidingRegion label={props.caption}>{table}</SlidingRegion> : table;
+}
+
+function PlainTable({ caption, captionHidden = false, columns, rows, foot, phone }: DataTableProps) {
   return (
-    <div className={phone === 'slide' ? 'overflow-x-auto wide:overflow-visible' : ''}>
-      <table role="table" data-phone={phone} className="data-table num w-full border-collapse text-control">
-        <caption className={captionHidden ? 'sr-only' : 'px-3 py-2 text-left text-small text-ink-soft'}>{caption}</caption>
-        <thead role="rowgroup" className="wide:sticky wide:top-0 wide:z-10">
-          <tr role="row">{columns.map((column) => <Heading key={column.key} column={column} />)}</tr>
-        </thead>
-        <tbody role="rowgroup">
-          {rows.map((row) => (
-            <tr role="row" key={row.key} className="hover:bg-hover">
-              <Cells columns={columns} cells={row.cells} look={cellClass} head="font-normal" />
-            </tr>
-          ))}
-        </tbody>
-        {foot && (
-          <tfoot role="rowgroup">
-            <tr role="row" className="border-t-2 border-ink font-[680]">
-              <Cells columns={columns} cells={foot} look="px-2 py-[11px] wide:px-3 align-top" head="font-[680]" />
-            </tr>
-          </tfoot>
-        )}
-      </table>
-    </div>
+    <table role="table" data-phone={phone} className="data-table num w-full border-collapse text-control">
+      <caption className={captionHidden ? 'sr-only' : 'px-3 py-2 text-left text-small text-ink-soft'}>{caption}</caption>
+      <thead role="rowgroup" className="wide:sticky wide:top-0 wide:z-10">
+        <tr role="row">{columns.map((column) => <Heading key={column.key} column={column} />)}</tr>
+      </thead>
+      <tbody role="rowgroup">
+        {rows.map((row) => (
+          <tr role="row" key={row.key} className="hover:bg-hover">
+            <Cells columns={columns} cells={row.cells} look={cellClass} head="font-normal" />
+          </tr>
+        ))}
+      </tbody>
+      {foot && (
+        <tfoot role="rowgroup">
+          <tr role="row" className="border-t-2 border-ink font-[680]">
+            <Cells columns={columns} cells={foot} look="px-1.5 py-[11px] wide:px-3 align-top" head="font-[680]" />
+          </tr>
+        </tfoot>
+      )}
+    </table>
   );
 }
 

@@ -24,7 +24,7 @@ export function PlanTable({ caption, rows, foot }: PlanTableProps) {
   const forecast = foot.finishAt !== undefined || rows.some((row) => row.finishAt !== undefined);
   return (
     <div className="overflow-x-auto">
-      <table className="num w-full border-collapse text-control">
+      <table className="num w-full border-collapse text-small wide:text-control">
         <caption className="sr-only">{caption}</caption>
         <thead>
           <tr>
@@ -54,10 +54,10 @@ export function PlanTable({ caption, rows, foot }: PlanTableProps) {
         </tbody>
         <tfoot>
           <tr className="border-t-2 border-ink font-[680]">
-            <th scope="row" className="px-2 py-[11px] wide:px-3 text-left font-[680]">{foot.label}</th>
-            <td className={`px-2 py-[11px] wide:px-3 ${numberClass}`}>{foot.planned}</td>
-            <td className={`px-2 py-[11px] wide:px-3 ${numberClass}`}>{foot.used}</td>
-            {forecast && <td className={`px-2 py-[11px] wide:px-3 ${numberClass}`}>{foot.finishAt}</td>}
+            <th scope="row" className="px-1.5 py-[11px] wide:px-3 text-left font-[680]">{foot.label}</th>
+            <td className={`px-1.5 py-[11px] wide:px-3 ${numberClass}`}>{foot.planned}</td>
+            <td className={`px-1.5 py-[11px] wide:px-3 ${numberClass}`}>{foot.used}</td>
+            {forecast && <td className={`px-1.5 py-[11px] wide:px-3 ${numberClass}`}>{foot.finishAt}</td>}
           </tr>
         </tfoot>
       </table>

@@ -26,10 +26,14 @@ export interface Slot {
   current: boolean;
 }
 
+/** Every entry by itself, in order of days. */
+export function entrySlots(bars: readonly TapeBar[]): Slot[] {
+  return bars.map(slotOf).toSorted((a, b) => a.first - b.first || a.last - b.last);
+}
+
 /** Entries of one day share a bar: two in one place could not be told apart or pressed. */
 export function daySlots(bars: readonly TapeBar[]): Slot[] {
-  const slots = bars.map(slotOf).toSorted((a, b) => a.first - b.first || a.last - b.last);
-  return gather(slots, (slot, latest) => slot.first <= latest.last, (head) => head.when);
+  return gather(entrySlots(bars), (slot, latest) => slot.first <= latest.last, (head) => head.when);
 }
 
 export function weekSlots(slots: readonly Slot[]): Slot[] {

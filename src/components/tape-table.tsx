@@ -6,12 +6,13 @@ export interface TapeTableProps {
   title: string;
   /** Heads the figures: Used, Hands on. */
   amountWord: string;
-  slots: readonly Slot[];
+  /** Every entry by itself, also where the tape goes by weeks. */
+  entries: readonly Slot[];
   show: (amount: number) => string;
 }
 
 /** The tape's figures as a table, for whoever cannot see it or would rather read. */
-export function TapeTable({ title, amountWord, slots, show }: TapeTableProps) {
+export function TapeTable({ title, amountWord, entries, show }: TapeTableProps) {
   return (
     <details className="not-printed open:basis-full">
       <summary className="min-h-6 text-right text-scribe underline underline-offset-[0.18em]">as a table</summary>
@@ -26,7 +27,7 @@ export function TapeTable({ title, amountWord, slots, show }: TapeTableProps) {
             </tr>
           </thead>
           <tbody>
-            {slots.map((slot) => (
+            {entries.map((slot) => (
               <tr key={slot.key}>
                 <th scope="row" className={`${cellClass} text-left font-normal`}>{slot.when}</th>
                 <td className={cellClass}>

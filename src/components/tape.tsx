@@ -1,7 +1,7 @@
 import { useEffect, useRef } from 'react';
 import { SkipLink } from './skip-link.tsx';
 import { layoutTape, type Strip, type TapeUnit } from './tape-layout.ts';
-import type { TapeBar } from './tape-slots.ts';
+import { entrySlots, type TapeBar } from './tape-slots.ts';
 import { type TapeSize, TapeStrip } from './tape-strip.tsx';
 import { TapeTable } from './tape-table.tsx';
 
@@ -38,10 +38,9 @@ const manyBars = 8;
 export function Tape({ title, scale, from, to, bars, show, unit, toggleHref, size = 'short', id = 'tape' }: TapeProps) {
   const layout = layoutTape({ from, to, bars, unit });
   const words = scaleWords[scale];
-  const slots = layout.strips.flatMap((strip) => strip.bars);
   return (
     <div className="relative">
-      {slots.length > manyBars && <SkipLink to={`#${id}-after`}>Past the tape</SkipLink>}
+      {bars.length > manyBars && <SkipLink to={`#${id}-after`}>Past the tape</SkipLink>}
       {layout.strips.map((strip) => (
         <TapeLength key={strip.year ?? 'all'} strip={strip} title={title} size={size} show={show} />
       ))}
@@ -55,7 +54,7 @@ export function Tape({ title, scale, from, to, bars, show, unit, toggleHref, siz
             {words.other}
           </a>
         )}
-        <TapeTable title={title} amountWord={words.heading} slots={slots} show={show} />
+        <TapeTable title={title} amountWord={words.heading} entries={entrySlots(bars)} show={show} />
       </div>
     </div>
   );
