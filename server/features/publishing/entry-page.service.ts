@@ -3,12 +3,13 @@ import { deriveEntry, projectEntry, type EntryDerivation, type EntryDocument, ty
 import { AppError } from '#contracts/errors.ts';
 import { CrewMember, Entry, EntryAddress, Stage, WorkKind, type Build } from '#server/entities/index.ts';
 import { mayWrite, movedBuild, requireVisibleBuild, seesCosts } from '#server/features/builds/build-access.service.ts';
+import { workingFigures, type WorkingFigures } from '#server/features/entries/working-figures.service.ts';
 import { pictureViews } from '#server/features/media/pictures.service.ts';
 import { lineFigures, figuresOfEntries, usedOfBuilds, type EntryFigures } from '#server/features/shelf/figures.service.ts';
 import { materialFacts } from '#server/features/shelf/materials.service.ts';
 import type { Em, Viewer } from '#server/http/context.ts';
 import { entryHref } from './entry-cards.service.ts';
-import { entryTakes } from './takes.service.ts';
+import { entryTakes, takesOf } from './takes.service.ts';
 import { tapeOf } from './tape.service.ts';
 import { workWords } from './work-words.ts';
 
@@ -19,6 +20,8 @@ export interface EntrySource {
   readonly document: EntryDocument;
   readonly costsShown: boolean;
   readonly writes: boolean;
+  /** Figures of a working copy, which no stored row has. */
+  readonly working?: WorkingFigures;
 }
 
 async function namesAround(em: Em, build: Build): Promise<Map<string, string>> {
@@ -28,7 +31,7 @@ async function namesAround(em: Em, build: Build): Promise<Map<string, string>> {
 
 async function projectionContext(em: Em, source: EntrySource, derived: EntryDerivation, plural: ReadonlyMap<string, string>): Promise<ProjectionContext> {
   const { build, entry, document, costsShown } = source;
-  const figures = await lineFigures(em, entry.id);
+  const figures = source.working?.lines ?? await lineFigures(em, entry.id);
   return {
     measures: build.measures, currency: build.currency, day: document.day, dayTo: document.dayTo, stage: document.stage,
     materials: await materialFacts(em, build.owner.id), costsShown,
@@ -45,7 +48,7 @@ async function pluralsOf(em: Em, derived: EntryDerivation): Promise<Map<string, 
 
 async function tallyOf(em: Em, source: EntrySource, derived: EntryDerivation, sums: EntryFigures, plural: ReadonlyMap<string, string>): Promise<TallyView> {
   const { build, entry, costsShown } = source;
-  const takes = derived.work ? await entryTakes(em, entry.id, derived.work.amount) : null;
+  const takes = derived.work ? source.working ? takesOf(derived, derived.work.amount, source.working.lines) : await entryTakes(em, entry.id, derived.work.amount) : null;
   const buildUsed = (await usedOfBuilds(em, [build.id])).get(build.id) ?? 0;
   const people = new Set(derived.times.filter((time) => time.kind !== 'waiting').map((time) => time.handle ?? time.name)).size;
   return {
@@ -93,7 +96,7 @@ function withNames(derived: EntryDerivation, names: ReadonlyMap<string, string>,
 export async function entryPageOf(em: Em, source: EntrySource, preview: boolean): Promise<EntryPage> {
   const { build, entry, document, costsShown, writes } = source;
   const { derived, plural, pictures, names, rows } = await projectedEntry(em, source);
-  const sums = (await figuresOfEntries(em, [entry.id])).get(entry.id) ?? noFigures;
+  const sums = source.working?.sums ?? (await figuresOfEntries(em, [entry.id])).get(entry.id) ?? noFigures;
   const stage = document.stage === null ? null : await em.findOne(Stage, { id: document.stage });
   const cover = derived.pictures.find((picture) => picture.cover) ?? derived.pictures[0];
   const coverView = cover ? pictures.get(cover.key) : undefined;
@@ -125,9 +128,9 @@ export async function readEntryBySlug(em: Em, viewer: Viewer, buildSlug: string,
 /** What readers will see of the working copy; for those who may write it. */
 export async function previewWorking(em: Em, viewer: Viewer, buildSlug: string, number: number): Promise<EntryPage> {
   const { build } = await requireVisibleBuild(em, viewer, buildSlug);
-  if (!(await mayWrite(em, viewer, build))) throw new AppError('not-allowed', 'Only the restorer and the crew see a working copy.');
+  if (!viewer || !(await mayWrite(em, viewer, build))) throw new AppError('not-allowed', 'Only the restorer and the crew see a working copy.');
   const entry = await em.findOne(Entry, { build: build.id, number }, { populate: ['author'] });
   const document = entry?.working ?? entry?.published;
   if (!entry || !document) throw new AppError('not-found', 'There is nothing at this address.');
-  return entryPageOf(em, { build, entry, document, costsShown: build.costsShown, writes: true }, true);
+  return entryPageOf(em, { build, entry, document, costsShown: build.costsShown, writes: true, working: await workingFigures(em, viewer, build, entry, document) }, true);
 }
