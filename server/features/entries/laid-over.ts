@@ -21,10 +21,11 @@ export interface LaidMovement {
 }
 type StoredRow = LaidMovement & { readonly entry: number | null };
 
-/** What the stored ledger holds on a shelf, but for the entries named. */
-export async function storedMovements(em: Em, shelf: Shelf, without: ReadonlySet<number>): Promise<LaidMovement[]> {
+/** What the stored ledger holds on a shelf, but for the entries named. @param only some materials, or nothing for all */
+export async function storedMovements(em: Em, shelf: Shelf, without: ReadonlySet<number>, only: readonly number[] | null = null): Promise<LaidMovement[]> {
+  const some = only === null ? '' : ` and material_id in (${only.map(() => '?').join(', ')})`;
   const rows = await em.execute<StoredRow[]>(
-    'select key, kind, material_id as material, day, sequence, place, amount, cost, `of`, shortage, entry_id as entry from movement where shelf_id = ?', [shelf.id],
+    `select key, kind, material_id as material, day, sequence, place, amount, cost, "of", shortage, entry_id as entry from movement where shelf_id = ?${some}`, [shelf.id, ...(only ?? [])],
   );
   return rows.flatMap(({ entry, ...row }) => (entry !== null && without.has(entry) ? [] : [row]));
 }
