@@ -1,14 +1,14 @@
-import { priceMaterial } from '#domain/ledger/price.ts';
-import { exactFrom, exactText } from '#domain/quantity.ts';
+import { priceShelf } from '#domain/ledger/price.ts';
+import { exactText } from '#domain/quantity.ts';
 import { deriveEntry, type EntryDerivation, type EntryDocument } from '#src/blocks/pure.ts';
-import type { Build, Entry } from '#server/entities/index.ts';
+import type { Build, Entry, Shelf } from '#server/entities/index.ts';
 import type { EntryFigures, LineValue } from '#server/features/shelf/figures.service.ts';
 import { ledgerMovement } from '#server/features/shelf/ledger-movement.service.ts';
-import type { Caller, Em } from '#server/http/context.ts';
+import { findShed, shelfOfBuild } from '#server/features/shelf/shelves.service.ts';
+import type { Em } from '#server/http/context.ts';
 import { costsOf, movementsOf, type DerivedMovement } from './derived-rows.ts';
-import { deskShelves } from './desk-shelves.ts';
 import { entryContext } from './entry-context.ts';
-import type { LaidMovement } from './laid-over.ts';
+import { storedMovements } from './laid-over.ts';
 
 /** What a working copy would come to if it were signed off now: nothing of it is stored. */
 export interface WorkingFigures {
@@ -16,37 +16,38 @@ export interface WorkingFigures {
   readonly sums: EntryFigures;
 }
 
-function pricedLines(own: readonly DerivedMovement[], standing: readonly LaidMovement[], method: 'fifo' | 'average'): Map<string, LineValue> {
-  const lines = new Map<string, LineValue>();
-  for (const material of new Set(own.map((movement) => movement.material))) {
-    const laid = [...standing, ...own].filter((movement) => movement.material === material).map((movement) => ledgerMovement(movement, material));
-    const priced = new Map(priceMaterial(String(material), laid, method).movements.map((movement) => [movement.key, movement]));
-    for (const { key, kind, block, line } of own) {
-      const movement = priced.get(key);
-      if (movement && kind !== 'bought') lines.set(`${block}:${line}`, { value: movement.value, short: exactText(movement.short) });
-    }
-  }
-  return lines;
+/** Prices an entry's movements on one shelf over what is stored there without it, for the materials it touches. */
+async function pricedLines(em: Em, entry: Entry, shelf: Shelf | null, own: readonly DerivedMovement[]): Promise<[string, LineValue][]> {
+  const materials = [...new Set(own.map(({ material }) => material))];
+  const stored = shelf ? await storedMovements(em, shelf, new Set([entry.id]), materials) : [];
+  const ledgers = priceShelf([...stored, ...own].map((row) => ledgerMovement(row, row.material)), shelf?.method ?? 'fifo');
+  const priced = new Map([...ledgers.values()].flatMap(({ movements }) => movements.map((movement) => [movement.key, movement] as const)));
+  return own.flatMap(({ key, kind, block, line }) => {
+    const movement = priced.get(key);
+    return movement && kind !== 'bought' ? [[`${block}:${line}`, { value: movement.value, short: exactText(movement.short) }] satisfies [string, LineValue]] : [];
+  });
 }
 
+const sum = (values: readonly number[]) => values.reduce((total, value) => total + value, 0);
+
 function sumsOf(derived: EntryDerivation, lines: ReadonlyMap<string, LineValue>): EntryFigures {
-  const valueOf = (kind: 'used' | 'wasted') => derived.uses.reduce((sum, use) => sum + (use.kind === kind ? lines.get(`${use.block}:${use.line}`)?.value ?? 0 : 0), 0);
-  const minutesOf = (waiting: boolean) => derived.times.reduce((sum, time) => sum + ((time.kind === 'waiting') === waiting ? time.minutes : 0), 0);
+  const valueOf = (kind: 'used' | 'wasted') => sum(derived.uses.filter((use) => use.kind === kind).map(({ block, line }) => lines.get(`${block}:${line}`)?.value ?? 0));
+  const minutesOf = (waiting: boolean) => sum(derived.times.filter(({ kind }) => (kind === 'waiting') === waiting).map(({ minutes }) => minutes));
   return {
-    used: valueOf('used'), wasted: valueOf('wasted'), costs: costsOf(derived).reduce((sum, cost) => sum + cost.money, 0),
-    bought: derived.receipts.reduce((sum, receipt) => sum + receipt.notSorted + receipt.lines.reduce((door, line) => door + (line.goes === 'not-mine' ? 0 : line.door), 0), 0),
-    minutes: minutesOf(false), waiting: minutesOf(true), unsettled: [...lines.values()].some((line) => exactFrom(line.short).n > 0n),
+    used: valueOf('used'), wasted: valueOf('wasted'), costs: sum(costsOf(derived).map(({ money }) => money)),
+    bought: sum(derived.receipts.map((receipt) => receipt.notSorted + sum(receipt.lines.filter(({ goes }) => goes !== 'not-mine').map(({ door }) => door)))),
+    minutes: minutesOf(false), waiting: minutesOf(true), unsettled: [...lines.values()].some(({ short }) => short !== '0/1'),
   };
 }
 
-/** Prices a working copy over the stored ledger and the other working copies the caller may see. */
-export async function workingFigures(em: Em, caller: Caller, build: Build, entry: Entry, document: EntryDocument): Promise<WorkingFigures> {
+/** Prices a working copy over the stored ledger alone, in place of what its entry has there: what readers would see, whatever stands in other drafts. */
+export async function workingFigures(em: Em, build: Build, entry: Entry, document: EntryDocument): Promise<WorkingFigures> {
   const derived = deriveEntry(document, await entryContext(em, build));
-  const shelves = await deskShelves(em, caller, build, entry);
   const own = movementsOf(entry, derived);
+  const on = (name: DerivedMovement['on']) => own.filter((movement) => movement.on === name);
   const lines = new Map([
-    ...pricedLines(own.filter((movement) => movement.on === 'shelf'), shelves.onShelf, shelves.shelf.method),
-    ...pricedLines(own.filter((movement) => movement.on === 'shed'), shelves.inShed, shelves.shed?.method ?? 'fifo'),
+    ...await pricedLines(em, entry, await shelfOfBuild(em, build), on('shelf')),
+    ...await pricedLines(em, entry, await findShed(em, build.owner, build.currency), on('shed')),
   ]);
   return { lines, sums: sumsOf(derived, lines) };
 }

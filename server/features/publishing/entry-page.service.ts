@@ -132,5 +132,5 @@ export async function previewWorking(em: Em, viewer: Viewer, buildSlug: string, 
   const entry = await em.findOne(Entry, { build: build.id, number }, { populate: ['author'] });
   const document = entry?.working ?? entry?.published;
   if (!entry || !document) throw new AppError('not-found', 'There is nothing at this address.');
-  return entryPageOf(em, { build, entry, document, costsShown: build.costsShown, writes: true, working: await workingFigures(em, viewer, build, entry, document) }, true);
+  return entryPageOf(em, { build, entry, document, costsShown: build.costsShown, writes: true, working: await workingFigures(em, build, entry, document) }, true);
 }
