@@ -19,8 +19,8 @@ const marks: Readonly<Record<string, string>> = {
 /** Typed text in one plain form: small letters, single spaces, `½` as `1/2`, `×` as `x`, `″` as `"`. */
 export function plainText(text: string): string {
   const unmarked = [...text].map((sign) => {
-    const fraction = vulgar[sign];
-    return fraction === undefined ? (marks[sign] ?? sign) : ` ${fraction} `;
+    const inFigures = vulgar[sign];
+    return inFigures === undefined ? (marks[sign] ?? sign) : ` ${inFigures} `;
   });
   return unmarked.join('').toLowerCase().replace(/\s+/g, ' ').trim();
 }

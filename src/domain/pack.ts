@@ -67,7 +67,7 @@ export function wordsInPacks(
     .map((pack) => ({ pack, size: exactFrom(pack.amount) }))
     .map(({ pack, size }) => ({ pack, size, count: amount.div(size) }))
     .filter(({ size, count }) => !(dimension === 'count' && size.equals(1)) && comesOutNeat(count, dimension))
-    .sort((a, b) => rank(a.count) - rank(b.count) || b.size.compare(a.size));
+    .toSorted((a, b) => rank(a.count) - rank(b.count) || b.size.compare(a.size));
   const best = neat[0];
   return best ? packWords(best.count, best.pack, sizeWords(best.size)) : null;
 }

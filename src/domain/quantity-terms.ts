@@ -147,7 +147,7 @@ function oneTerm(text: string, context: TermContext): Reading<TermFound> {
   return unread(noUnit(typed, context));
 }
 
-function joined(before: TermFound, next: TermFound): Reading<TermFound> {
+function joinedTerms(before: TermFound, next: TermFound): Reading<TermFound> {
   if (before.term.dimension !== next.term.dimension) {
     return unread(`${before.term.words} and ${next.term.words} cannot be added: write one of them`);
   }
@@ -177,7 +177,7 @@ export function readTerms(text: string, context: TermContext): Reading<Terms> {
     if (!numberAtStart(more)) return unread(`Write the amount alone, like ${so.value.term.words}`);
     const next = oneTerm(more, context);
     if (!next.ok) return next;
-    so = joined(so.value, next.value);
+    so = joinedTerms(so.value, next.value);
   }
   return so.ok ? read(so.value.term) : so;
 }

@@ -68,7 +68,7 @@ export function splitByLargestRemainder(total: number, weights: readonly (number
   const size = BigInt(Math.abs(total));
   const rows = shares.map((share, row) => ({ row, floor: (size * share) / sum, rest: (size * share) % sum }));
   const over = Number(size - rows.reduce((a, { floor }) => a + floor, 0n));
-  const byRemainder = [...rows].sort((a, b) => (a.rest === b.rest ? a.row - b.row : a.rest > b.rest ? -1 : 1));
+  const byRemainder = rows.toSorted((a, b) => (a.rest === b.rest ? a.row - b.row : a.rest > b.rest ? -1 : 1));
   const raised = new Set(byRemainder.slice(0, over).map(({ row }) => row));
   const sign = total < 0 ? -1 : 1;
   return rows.map(({ row, floor }) => sign * Number(floor + (raised.has(row) ? 1n : 0n)) || 0);

@@ -37,6 +37,11 @@ test('delivery is shared equally where every line is nought', () => {
   expect(doors(receipt([0, 0, 0], { delivery: 100 }))).toEqual([34, 33, 33]);
 });
 
+test('a discount of everything leaves delivery and tax to be shared equally', () => {
+  expect(doors(receipt([3000, 1000], { discount: 4000, delivery: 100 }))).toEqual([50, 50]);
+  expect(doors(receipt([3000, 1000], { discount: 4000, tax: 101 }))).toEqual([51, 50]);
+});
+
 test('currencies of other exponents are converted between whole units of each', () => {
   // 1,000 yen at 0.005 pounds are 5.00; 1.234 dinars at 2.50 pounds are 3.085, to the even penny 3.08.
   expect(doors(receipt([1000], { currency: 'JPY', rate: new Fraction('0.005') }))).toEqual([500]);

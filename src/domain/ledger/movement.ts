@@ -26,6 +26,7 @@ export interface Movement {
 /** Which way a kind of movement goes; a count compares, and goes last in its day. */
 export type Direction = 'in' | 'out' | 'count';
 
+/** The direction of each kind. */
 export const directionOf: Readonly<Record<MovementKind, Direction>> = {
   bought: 'in',
   given: 'in',

@@ -9,12 +9,15 @@ export interface Parts {
   readonly back: (parts: bigint) => Fraction;
 }
 
+const nought = new Fraction(0);
+
 function greatestCommonDivisor(a: bigint, b: bigint): bigint {
   let [larger, smaller] = [a, b];
   while (smaller !== 0n) [larger, smaller] = [smaller, larger % smaller];
   return larger;
 }
 
+/** The smallest common part of some amounts, and the way into it and back, both exact. */
 export function commonParts(amounts: readonly Fraction[]): Parts {
   let part = 1n;
   for (const { d } of amounts) {
@@ -22,6 +25,6 @@ export function commonParts(amounts: readonly Fraction[]): Parts {
   }
   return {
     of: ({ s, n, d }) => s * n * (part / d),
-    back: (parts) => new Fraction(parts, part),
+    back: (parts) => (parts === 0n ? nought : new Fraction(parts, part)),
   };
 }

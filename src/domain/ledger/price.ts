@@ -65,7 +65,7 @@ function inOrder(movements: readonly Movement[]): Movement[] {
     if (keys.has(movement.key)) throw new RangeError(`Two movements have the key ${movement.key}`);
     keys.add(movement.key);
   }
-  return [...movements].sort(compareMovements);
+  return movements.toSorted(compareMovements);
 }
 
 function priced({ movement, value, short, left, found }: Entered, parts: Parts): PricedMovement {
@@ -97,15 +97,8 @@ function lastPaidIn(ordered: readonly Movement[]): MaterialLedger['lastPaid'] {
   return last ? { day: last.day, cost: last.cost ?? 0, amount: last.amount } : null;
 }
 
-/**
- * Prices one material of one shelf from nothing: each movement's value, what is left, what is
- * not bought yet, and the figures, for which `in = used + wasted + returned + sold + left` exactly.
- * Movements may come in any order; those of other materials are passed over.
- * @throws RangeError for what cannot be: an amount below nought, a cost that is no whole number
- * of minor units, one key twice.
- */
-export function priceMaterial(material: string, movements: readonly Movement[], method: PricingMethod): MaterialLedger {
-  const ordered = inOrder(movements.filter((movement) => movement.material === material));
+function priceOwn(material: string, movements: readonly Movement[], method: PricingMethod): MaterialLedger {
+  const ordered = inOrder(movements);
   const parts = commonParts(ordered.map(({ amount }) => amount));
   const stock = stockBy[method]();
   const { entered, refused, short } = replay(ordered, stock, parts.of);
@@ -121,6 +114,17 @@ export function priceMaterial(material: string, movements: readonly Movement[], 
   };
 }
 
+/**
+ * Prices one material of one shelf from nothing: each movement's value, what is left, what is
+ * not bought yet, and the figures, for which `in = used + wasted + returned + sold + left` exactly.
+ * Movements may come in any order; those of other materials are passed over.
+ * @throws RangeError for what cannot be: an amount below nought, a cost that is no whole number
+ * of minor units, one key twice.
+ */
+export function priceMaterial(material: string, movements: readonly Movement[], method: PricingMethod): MaterialLedger {
+  return priceOwn(material, movements.filter((movement) => movement.material === material), method);
+}
+
 /** Prices every material of a shelf from nothing, each by itself. @throws RangeError as `priceMaterial` does. */
 export function priceShelf(movements: readonly Movement[], method: PricingMethod): ReadonlyMap<string, MaterialLedger> {
   const byMaterial = new Map<string, Movement[]>();
@@ -129,5 +133,5 @@ export function priceShelf(movements: readonly Movement[], method: PricingMethod
     if (own) own.push(movement);
     else byMaterial.set(movement.material, [movement]);
   }
-  return new Map([...byMaterial].map(([material, own]) => [material, priceMaterial(material, own, method)]));
+  return new Map([...byMaterial].map(([material, own]) => [material, priceOwn(material, own, method)]));
 }

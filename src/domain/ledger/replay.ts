@@ -39,12 +39,12 @@ function entry(movement: Movement, counts: Entered['counts'], value: bigint): En
 
 // A new lot settles what is short before it is pooled, oldest use first; the value belongs to the use.
 function settle(shelf: Shelf, lot: Lot): void {
-  for (let use = shelf.waiting[shelf.nextWaiting]; use && leftIn(lot) > 0n; use = shelf.waiting[shelf.nextWaiting]) {
-    const amount = use.short < leftIn(lot) ? use.short : leftIn(lot);
-    use.value += drawFrom(lot, amount);
-    use.short -= amount;
+  for (let first = shelf.waiting[shelf.nextWaiting]; first && leftIn(lot) > 0n; first = shelf.waiting[shelf.nextWaiting]) {
+    const amount = first.short < leftIn(lot) ? first.short : leftIn(lot);
+    first.value += drawFrom(lot, amount);
+    first.short -= amount;
     shelf.short -= amount;
-    if (use.short === 0n) shelf.nextWaiting += 1;
+    if (first.short === 0n) shelf.nextWaiting += 1;
   }
 }
 

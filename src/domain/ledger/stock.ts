@@ -14,10 +14,12 @@ export interface Lot {
   given: bigint;
 }
 
+/** A lot nothing has been drawn from. @param cost minor units @param amount parts, above nought */
 export function newLot(origin: string, cost: bigint, amount: bigint): Lot {
   return { origin, cost, amount, drawn: 0n, given: 0n };
 }
 
+/** Parts of a lot not drawn yet. */
 export function leftIn(lot: Lot): bigint {
   return lot.amount - lot.drawn;
 }

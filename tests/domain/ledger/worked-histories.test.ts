@@ -1,7 +1,7 @@
 import Fraction from 'fraction.js';
 import { expect, test } from 'vitest';
 import { priceMaterial } from '#domain/ledger/price.ts';
-import { bought, boughtAt, counted, dayOf, history, priced, returned, rowOf, used, wasted } from './history.ts';
+import { bought, boughtAt, counted, dayOf, given, history, priced, returned, rowOf, used, wasted } from './history.ts';
 
 // The worked histories at the end of the ledger's page; the two about receipts are in receipt.test.ts.
 
@@ -100,6 +100,23 @@ test('inward goes before outward within a day, and a count last, whatever was ty
   const ledger = priced([counted(8), used(2), boughtAt(10, 100)], 'fifo');
   expect(ledger.movements.map(({ kind }) => kind)).toEqual(['bought', 'used', 'counted']);
   expect(ledger.notBoughtYet.equals(0)).toBe(true);
+});
+
+test('within a day and direction the source’s number goes before the place, and the place before the key', () => {
+  const happenings = [
+    boughtAt(1, 400, { key: 'b', sequence: 2, place: 1 }),
+    boughtAt(1, 300, { key: 'a', sequence: 2, place: 1 }),
+    boughtAt(1, 200, { key: 'd', sequence: 1, place: 9 }),
+    boughtAt(1, 100, { key: 'c', sequence: 1, place: 3 }),
+    boughtAt(1, 500, { key: '0', sequence: 10, place: 0 }),
+  ];
+  expect(priced(happenings, 'fifo').movements.map(({ key }) => key)).toEqual(['c', 'd', 'a', 'b', '0']);
+});
+
+test('what was given is of no cost, whatever worth is noted beside it', () => {
+  const ledger = priced([given(4, { cost: 900 }), used(1)], 'fifo');
+  expect(ledger.figures).toEqual({ in: 0, used: 0, wasted: 0, returned: 0, sold: 0, left: 0 });
+  expect(ledger.left.equals(3)).toBe(true);
 });
 
 test('the last price paid is that of the last line bought by day', () => {
