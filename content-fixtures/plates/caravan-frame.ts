@@ -147,7 +147,6 @@ function skinEdge(s: Sheet, mended: boolean): void {
 function floorRotten(s: Sheet): void {
   benchTop(s, "slate", 8);
   const top: Point[] = [[-20, 470], [1620, 400], [1620, 110], [-20, 110]];
-  s.shadow(poly([-20, 470], [1620, 400], [1620, 860], [-20, 690]), 40, 0.5);
   s.flat(poly(...top), s.of("lining", { part: 4 }));
   s.clipped(poly(...top), () => {
     for (const [k, tone] of [[1, 0.34], [0.76, 0.3], [0.5, 0.44]] as const) s.flat(curve([[300, 520], [560 - 60 * k, 430 - 150 * k], [820, 440 - 90 * k], [1040, 430 - 260 * k], [1400, 420 - 200 * k], [1700, 400 - 240 * k], [1700, 520]], true), "#2a1b10", tone);

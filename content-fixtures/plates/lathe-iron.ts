@@ -1,6 +1,6 @@
 /** Rust, cracks and cast iron: the lathe's wheel, tub, treadle and bed. */
 import { block } from "./blocks.ts";
-import { spokedWheel, treadleFrame } from "./lathe-parts.ts";
+import { spokedWheel } from "./lathe-parts.ts";
 import { randomFrom } from "./noise.ts";
 import type { Point } from "./paths.ts";
 import { blob, circle, curve, ellipse, open, placed, poly, ragged, rect } from "./paths.ts";
@@ -89,57 +89,59 @@ function handwheel(s: Sheet): void {
   crumbs(s, 1080, 930, [160, 60], 40, 9, "#643520", 7);
 }
 
-const crackEnd: Point = [1010, 806];
+/** Where the arm has cracked, from its top edge nearly to its foot. */
+const crackLine = ragged([850, 318], [960, 668], 12, 9, 8);
 
+/** One arm of the treadle close to, lying on the bench. */
 function treadle(s: Sheet, mended: boolean): void {
   benchTop(s, "beech", 14);
-  s.add('<g transform="translate(-640 -420) scale(1.52)">');
-  treadleOnBench(s, mended);
-  s.add("</g>");
-}
-
-function treadleOnBench(s: Sheet, mended: boolean): void {
-  s.solid(rect(20, 470, 1520, 60, 20), s.of("steel"), { drop: 30, edge: 8 });
-  s.solid(treadleFrame(), s.of(mended ? "castIron" : "darkRust"), { drop: 40, edge: 13 });
-  for (const y of [300, 770]) s.line(open([220, y], [1160, y]), ink, 4, 0.3);
-  for (let i = 0; i < 9; i += 1) s.solid(rect(664, 378 + i * 36, 72, 16, 8), s.of(mended ? "castIron" : "rust"), { edge: 4 });
-  heads(s, [[236, 306], [236, 764]], 24, s.of("darkSteel"), false);
-  s.flat(ellipse(960, 766, 190, 60), mended ? s.of("steel") : s.of("castIron"), 0.9);
+  const iron = s.of(mended ? "castIron" : "darkRust");
+  if (mended) s.solid(poly([700, 640], [1150, 630], [1150, 850], [700, 858]), s.of("darkSteel"), { drop: 30, edge: 9 });
+  s.solid(poly([-20, 330], [1620, 300], [1620, 760], [-20, 790]), iron, { drop: 46, edge: 14 });
+  s.solid(poly([-20, 330], [1620, 300], [1620, 366], [-20, 396]), iron, { drop: 14, edge: 8 });
+  s.solid(poly([-20, 724], [1620, 694], [1620, 760], [-20, 790]), iron, { drop: 14, edge: 8 });
+  for (let i = 0; i < 6; i += 1) s.solid(placed(rect(0, 0, 34, 240, 17), { x: 60 + i * 92, y: 446 - i * 1.6, turn: -1 }), iron, { drop: 10, edge: 8 });
+  heads(s, [[1490, 420], [1490, 640]], 44, s.of("darkSteel"), false);
+  s.flat(blob(908, 530, 238, 236, 6, 0.08, 18), s.of(mended ? "steel" : "castIron"), mended ? 0.75 : 1);
   if (mended) stitches(s);
   else crack(s);
-  if (!mended) {
-    s.solid(poly([1090, 890], [1300, 876], [1303, 904], [1093, 920]), s.of("darkSteel"), { drop: 14, edge: 5 });
-    s.solid(rect(1296, 860, 130, 58, 20), s.of("oak"), { drop: 16, edge: 7 });
-    crumbs(s, 930, 880, [160, 30], 60, 3, "#6b757b", 6);
-  }
 }
 
 function crack(s: Sheet): void {
-  const line = ragged([900, 720], crackEnd, 6, 12, 8);
-  s.line(open(...line), "#dfe4e4", 46, 1, "butt");
-  s.line(open(...line), "#808d95", 30, 1, "butt");
-  s.line(open(...line), ink, 10, 0.95, "butt");
-  s.solid(circle(crackEnd[0] + 4, crackEnd[1] - 6, 17), "#c4ccce", { edge: 4 });
-  s.flat(circle(crackEnd[0] + 4, crackEnd[1] - 6, 11), ink);
-  for (const [x, y] of [[850, 742], [1096, 790]] as const) s.line(open([x - 24, y - 10], [x + 24, y + 10]), "#f3f1e6", 7, 0.8);
+  const beside = (off: number): Point[] => crackLine.map(([x, y]): Point => [x + off, y + off * 0.3]);
+  s.flat(poly(...beside(-46), ...crackLine.toReversed()), "#c4ccce");
+  s.flat(poly(...beside(46), ...crackLine.toReversed()), "#4f5a63");
+  for (const off of [-46, 46]) s.line(open(...beside(off)), ink, 3, 0.5);
+  s.line(open(...crackLine), ink, 10, 0.95, "butt");
+  const [x, y] = crackLine.at(-1) ?? [0, 0];
+  s.solid(circle(x, y + 14, 38), "#c4ccce", { edge: 6 });
+  s.flat(circle(x, y + 14, 26), ink);
+  s.line(open([1040, 420], [1120, 400]), "#f3f1e6", 9, 0.85);
+  s.line(open([1080, 380], [1082, 442]), "#f3f1e6", 9, 0.85);
+  s.solid(poly([1010, 930], [1290, 890], [1296, 926], [1014, 968]), s.of("darkSteel"), { drop: 18, edge: 6 });
+  s.solid(placed(rect(0, -40, 210, 80, 26), { x: 1286, y: 908, turn: -8 }), s.of("oak", { turn: -8 }), { drop: 22, edge: 9 });
+  crumbs(s, 760, 900, [240, 50], 90, 3, "#6b757b", 8);
 }
 
+/** Pins run into one another down the crack, keys across it, all filed flush. */
 function stitches(s: Sheet): void {
-  const line = ragged([900, 720], crackEnd, 6, 12, 8);
-  for (const [x, y] of line) {
-    s.solid(circle(x, y, 17), s.of("steel"), { edge: 3 });
-    s.line(circle(x, y, 17), ink, 2.4, 0.6);
+  for (let i = 0; i < 26; i += 1) s.line(open([720 + i * 15, 690], [760 + i * 15, 400]), i % 2 === 0 ? "#eef2ef" : "#5f6b74", 2, 0.3);
+  for (const [i, [x, y]] of crackLine.entries()) {
+    s.flat(circle(x, y, 24), s.of(i % 2 === 0 ? "darkSteel" : "castIron", { part: i }));
+    s.line(circle(x, y, 24), ink, 3, 0.7);
   }
-  for (const i of [1, 3, 5]) {
-    const [x, y] = line[i] ?? [0, 0];
-    const key = [0, 1, 2, 3].map((k) => circle(-42 + k * 28, 0, 15)).map((path) => placed(path, { x, y, turn: -38 }));
-    for (const path of key) s.solid(path, s.of("darkSteel"), { edge: 3 });
+  for (const i of [2, 6, 10]) {
+    const [x, y] = crackLine[i] ?? [0, 0];
+    const lobes = [-2, -1, 0, 1, 2].map((k) => circle(x + k * 42, y, 27));
+    for (const lobe of lobes) s.line(lobe, ink, 7, 0.75);
+    for (const lobe of lobes) s.flat(lobe, s.of("steel", { part: i }));
+    s.flat(rect(x - 84, y - 12, 168, 24), s.of("steel", { part: i }));
   }
-  s.solid(rect(820, 640, 330, 64, 8), s.of("steel", { part: 4 }), { drop: 16, edge: 7 });
-  heads(s, [[856, 672], [950, 672], [1030, 672], [1114, 672]], 19, s.of("darkSteel"), false);
-  s.solid(placed(rect(-210, -15, 420, 30, 3), { x: 1110, y: 896, turn: -5 }), s.of("darkSteel", { turn: -5 }), { drop: 14, edge: 5 });
-  for (let i = 0; i < 40; i += 1) s.line(placed(open([-200 + i * 8, 12], [-192 + i * 8, -12]), { x: 1110, y: 896, turn: -5 }), ink, 2, 0.5);
-  s.solid(placed("M205 -24Q300 -44 380 -20Q400 0 380 20Q300 44 205 24Z", { x: 1110, y: 896, turn: -5 }), s.of("ash"), { drop: 20, edge: 8 });
+  heads(s, [[740, 820], [1110, 812]], 30, s.of("steel"), false);
+  const at = { x: 960, y: 960, turn: -4 };
+  s.solid(placed(rect(-330, -22, 520, 44, 3), at), s.of("darkSteel", { turn: -4 }), { drop: 16, edge: 6 });
+  for (let i = 0; i < 62; i += 1) s.line(placed(open([-320 + i * 8, 18], [-310 + i * 8, -18]), at), ink, 2.4, 0.5);
+  s.solid(placed("M186 -12L240 -34Q340 -52 430 -26Q456 0 430 26Q340 52 240 34L186 12Z", at), s.of("ash", { turn: -4 }), { drop: 24, edge: 9 });
 }
 
 function bed(s: Sheet): void {

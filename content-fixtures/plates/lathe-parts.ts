@@ -1,6 +1,5 @@
 /** Parts of the lathe that come up in more than one plate. */
-import type { Point } from "./paths.ts";
-import { circle, placed, poly, rect, ring } from "./paths.ts";
+import { circle, placed, rect, ring } from "./paths.ts";
 import type { Sheet } from "./sheet.ts";
 import { ink } from "./sheet.ts";
 
@@ -29,10 +28,3 @@ export function halfShell(s: Sheet, iron: string, metal: string): void {
     s.flat(circle(x, y, 13), ink, 0.85);
   }
 }
-
-/** The treadle: a cast frame in plan, two side arms, a foot plate and a pivot bar. */
-export const treadleFrame = (): string => {
-  const outer: Point[] = [[180, 250], [1180, 250], [1440, 330], [1440, 730], [1180, 820], [180, 820]];
-  const holes = [poly([300, 350], [640, 350], [640, 720], [300, 720]), poly([760, 350], [1150, 350], [1290, 400], [1290, 670], [1150, 720], [760, 720])];
-  return poly(...outer) + holes.join("");
-};

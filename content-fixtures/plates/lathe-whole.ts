@@ -2,7 +2,7 @@
 import { turned } from "./blocks.ts";
 import { grassTufts } from "./caravan-whole.ts";
 import { spokedWheel } from "./lathe-parts.ts";
-import { blob, circle, curve, ellipse, poly, rect, ring } from "./paths.ts";
+import { blob, curve, ellipse, poly, rect, ring } from "./paths.ts";
 import { brickWall } from "./places.ts";
 import type { Plates } from "./plate.ts";
 import type { Material } from "./recipes.ts";
@@ -28,11 +28,10 @@ function leg(s: Sheet, x: number, fill: string): void {
 
 function headstock(s: Sheet, f: Finish): void {
   const iron = s.of(f.legs, { part: 2 });
-  s.solid("M330 410L350 300Q352 276 376 276L424 276Q444 276 446 300L452 350L560 350L566 300Q568 276 590 276L640 276Q662 276 664 300L682 410Z", iron, { drop: 16, edge: 7 });
-  const steps = [[452, 48], [486, 62], [520, 76]] as const;
-  for (const [x, r] of steps) s.solid(rect(x, 306 - r, 34, r * 2), s.of(f.steel, { part: x % 4 }), { edge: 4 });
-  turned(s, 286, 306, [[0, 16], [160, 16]], s.of(f.steel));
-  turned(s, 560, 306, [[0, 20], [130, 20], [130, 30], [156, 30], [156, 16], [190, 4]], s.of(f.steel));
+  s.solid("M340 410L360 300Q362 276 386 276L434 276Q454 276 456 300L462 356L610 356L616 300Q618 276 640 276L690 276Q712 276 714 300L732 410Z", iron, { drop: 16, edge: 7 });
+  for (const [x, r] of [[468, 50], [514, 64], [560, 78]] as const) s.solid(rect(x, 306 - r, 46, r * 2), s.of(f.steel, { part: x % 4, turn: 90 }), { edge: 5 });
+  turned(s, 296, 306, [[0, 16], [160, 16]], s.of(f.steel));
+  turned(s, 612, 306, [[0, 20], [124, 20], [124, 30], [150, 30], [150, 16], [184, 4]], s.of(f.steel));
 }
 
 function tailstock(s: Sheet, f: Finish): void {
@@ -43,35 +42,53 @@ function tailstock(s: Sheet, f: Finish): void {
 }
 
 function treadle(s: Sheet, f: Finish, low: boolean): void {
-  const y = low ? 842 : 812;
-  s.solid(poly([480, y], [1180, y - (low ? 14 : -44)], [1180, y + 20 - (low ? 14 : -44)], [480, y + 24]), s.of(f.wood), { drop: 14, edge: 5 });
-  s.solid(poly([460, y - 10], [540, y - 12], [540, y + 30], [460, y + 30]), s.of(f.legs), { edge: 4 });
+  const y = low ? 850 : 822;
+  s.solid(poly([500, y], [1130, y - 6], [1130, y + 22], [500, y + 28]), s.of(f.wood), { drop: 14, edge: 5 });
+  for (const x of [430, 1130]) s.solid(poly([x, y - 14], [x + 80, y - 14], [x + 80, y + 34], [x, y + 34]), s.of(f.legs), { drop: 8, edge: 4 });
 }
 
-function lathe(s: Sheet, f: Finish, running: boolean): void {
-  s.flat(ellipse(820, 908, 620, 26), ink, 0.4);
-  leg(s, 470, s.of(f.legs));
-  leg(s, 1190, s.of(f.legs, { part: 1 }));
-  s.solid(rect(520, 640, 630, 30, 6), s.of(f.legs, { part: 4 }), { drop: 14, edge: 5 });
-  treadle(s, f, running);
-  spokedWheel(s, 640, 656, 196, s.of(f.wheel, { part: 1 }), 6, 26, running ? 22 : 4);
-  s.solid(ring(640, 656, 150, 138), s.of(f.wheel), { edge: 4 });
-  s.solid(circle(640, 656, 20), s.of(f.steel), { edge: 4 });
-  s.solid(running ? poly([654, 700], [690, 706], [776, 838], [750, 846]) : poly([700, 636], [724, 656], [760, 832], [736, 834]), s.of(f.wood, { turn: 60 }), { drop: 12, edge: 5 });
-  if (running) {
-    s.solid(poly([452, 640], [478, 640], [524, 306], [498, 306]), s.of("leather", { turn: 90 }), { edge: 4, drop: 8 });
-    s.solid(poly([812, 640], [836, 640], [556, 290], [530, 290]), s.of("leather", { turn: 60 }), { edge: 4, drop: 8 });
-  }
+/** The flywheel seen nearly edge on, in line with the pulley above it, on a crankshaft under the bed. */
+function drive(s: Sheet, f: Finish, atWork: boolean): void {
+  const [x, y] = [540, 660];
+  s.solid("M800 480L826 620L826 700L880 700L880 620L850 480Z", s.of(f.legs, { part: 4 }), { drop: 12, edge: 5 });
+  turned(s, 380, y, [[0, 15], [446, 15], [446, 26], [500, 26]], s.of(f.steel), 12);
+  s.add(`<g transform="translate(${x + 34} 0) scale(.36 1) translate(${-x - 34} 0)">`);
+  s.solid(ring(x + 34, y, 186, 156), s.of(f.legs === "japan" ? "darkSteel" : "darkRust"), { drop: 20, edge: 7 });
+  s.add("</g>");
+  s.add(`<g transform="translate(${x} 0) scale(.36 1) translate(${-x} 0)">`);
+  spokedWheel(s, x, y, 190, s.of(f.wheel, { part: 1 }), 6, 14, atWork ? 22 : 4);
+  s.add("</g>");
+  if (atWork) belt(s);
+  turned(s, 520, y, [[0, 22], [64, 22]], s.of(f.steel));
+  s.solid(rect(690, y - 20, 22, atWork ? 100 : 66, 6), s.of(f.steel), { drop: 8, edge: 4 });
+  s.solid(rect(760, y - 20, 22, atWork ? 100 : 66, 6), s.of(f.steel), { drop: 8, edge: 4 });
+  const pin = atWork ? y + 58 : y + 26;
+  turned(s, 706, pin, [[0, 13], [62, 13]], s.of(f.steel));
+  s.solid(poly([722, pin - 20], [752, pin - 20], [760, atWork ? 860 : 834], [716, atWork ? 860 : 834]), s.of(f.wood, { turn: 90 }), { drop: 10, edge: 5 });
+}
+
+/** Both runs of the belt, from the wheel up through the bed. */
+function belt(s: Sheet): void {
+  s.solid(poly([474, 640], [494, 640], [536, 330], [518, 330]), s.of("leather", { turn: 90 }), { edge: 4, drop: 6 });
+  s.solid(poly([606, 640], [588, 640], [550, 330], [564, 330]), s.of("leather", { turn: 90 }), { edge: 4, drop: 6 });
+}
+
+function lathe(s: Sheet, f: Finish, atWork: boolean): void {
+  s.flat(ellipse(820, 908, 640, 26), ink, 0.4);
+  s.solid(rect(420, 760, 800, 24, 6), s.of(f.legs, { part: 4 }), { drop: 14, edge: 5 });
+  leg(s, 390, s.of(f.legs));
+  leg(s, 1240, s.of(f.legs, { part: 1 }));
+  treadle(s, f, atWork);
+  drive(s, f, atWork);
   s.solid(rect(290, 410, 1060, 74, 6), s.of(f.legs, { part: 5 }), { drop: 22, edge: 8 });
   s.solid(rect(290, 404, 1060, 26, 3), s.of(f.bed), { drop: 6, edge: 5 });
   headstock(s, f);
   tailstock(s, f);
-  s.solid("M790 410L806 362L780 350L780 330L900 330L900 350L866 362L880 410Z", s.of(f.legs, { part: 6 }), { drop: 12, edge: 6 });
-  if (running) {
-    s.solid(poly([486, 404], [512, 404], [516, 312], [492, 312]), s.of("leather", { turn: 90 }), { edge: 4, drop: 4 });
-    turned(s, 752, 306, [[0, 24], [60, 24], [64, 31], [78, 31], [82, 24], [150, 22], [154, 30], [168, 30], [172, 20], [208, 18]], s.of("ash", { part: 2 }), 12);
-    s.solid(rect(770, 326, 140, 12, 3), s.of("steel"), { drop: 6, edge: 3 });
-  }
+  s.solid("M810 410L826 362L800 350L800 330L920 330L920 350L886 362L900 410Z", s.of(f.legs, { part: 6 }), { drop: 12, edge: 6 });
+  if (!atWork) return;
+  for (const x of [516, 548]) s.solid(poly([x - 11, 404], [x + 11, 404], [x + 8, 262], [x - 8, 262]), s.of("leather", { turn: 90 }), { edge: 4, drop: 4 });
+  turned(s, 794, 306, [[0, 24], [50, 24], [54, 31], [68, 31], [72, 24], [120, 22], [124, 30], [138, 30], [142, 20], [170, 18]], s.of("ash", { part: 2 }), 12);
+  s.solid(rect(790, 326, 140, 12, 3), s.of("steel"), { drop: 6, edge: 3 });
 }
 
 function ground(s: Sheet, rough: boolean): void {
@@ -88,13 +105,13 @@ function ground(s: Sheet, rough: boolean): void {
 function inTheYard(s: Sheet): void {
   ground(s, true);
   lathe(s, found, false);
-  for (const [x, y, wide, high, k] of [[1120, 420, 150, 12, 1], [420, 408, 70, 10, 2], [620, 482, 120, 14, 3]] as const) s.solid(blob(x, y, wide, high, k, 0.4), s.of("moss"), { edge: 3 });
+  for (const [x, y, wide, high, k] of [[1120, 420, 150, 12, 1], [420, 408, 70, 10, 2], [820, 482, 120, 14, 3]] as const) s.solid(blob(x, y, wide, high, k, 0.4), s.of("moss"), { edge: 3 });
   grassTufts(s, 480, 930, 860, 26, 3, 220);
   grassTufts(s, 200, 930, 1400, 46, 6, 120);
   s.solid(poly([1310, 900], [1330, 560], [1372, 556], [1376, 900]), s.of("rot", { turn: 90 }), { drop: 20, edge: 5 });
 }
 
-function atWork(s: Sheet): void {
+function underTreadle(s: Sheet): void {
   ground(s, false);
   lathe(s, mended, true);
   shavings(s, 800, 950, 170, 11, 4, ["#e3c99f", "#d9ba8a"], 0.6);
@@ -102,5 +119,5 @@ function atWork(s: Sheet): void {
 
 export const latheWhole: Plates = {
   "lathe-in-the-yard": { format: "wide", draw: inTheYard },
-  "lathe-running": { format: "wide", draw: atWork },
+  "lathe-running": { format: "wide", draw: underTreadle },
 };
