@@ -20,6 +20,7 @@ const environment = z.object({
   MAIL_URL: optional(z.url({ protocol: /^smtps?$/, error: 'MAIL_URL is an smtp:// or smtps:// address' })),
   GITHUB_CLIENT_ID: optional(z.string()),
   GITHUB_CLIENT_SECRET: optional(z.string()),
+  LOG_LEVEL: z.preprocess(blankIsAbsent, z.enum(['fatal', 'error', 'warn', 'info', 'debug', 'trace', 'silent'], 'LOG_LEVEL is fatal, error, warn, info, debug, trace or silent').default('warn')),
 }).superRefine((env, context) => {
   if (Boolean(env.GITHUB_CLIENT_ID) !== Boolean(env.GITHUB_CLIENT_SECRET)) {
     context.addIssue({ code: 'custom', path: ['GITHUB_CLIENT_ID'], message: 'GITHUB_CLIENT_ID and GITHUB_CLIENT_SECRET are set together or not at all' });
@@ -38,6 +39,7 @@ export interface Config {
   readonly demoPassword: string | null;
   readonly mailUrl: string | null;
   readonly github: { readonly clientId: string; readonly clientSecret: string } | null;
+  readonly logLevel: string;
   /** Demo people, demo content and every local fake: only while both HOST and PUBLIC_URL are on loopback. */
   readonly local: boolean;
 }
@@ -59,7 +61,7 @@ export function readConfig(env: NodeJS.ProcessEnv): Config {
     trustProxy: trustProxyOf(settings.TRUST_PROXY),
     sessionSecret: settings.SESSION_SECRET ?? keptSecret(dataDir),
     demoPassword: settings.DEMO_PASSWORD ?? null,
-    mailUrl: settings.MAIL_URL ?? null,
+    mailUrl: settings.MAIL_URL ?? null, logLevel: settings.LOG_LEVEL,
     github: settings.GITHUB_CLIENT_ID && settings.GITHUB_CLIENT_SECRET ? { clientId: settings.GITHUB_CLIENT_ID, clientSecret: settings.GITHUB_CLIENT_SECRET } : null,
     local: loopback.has(settings.HOST) && loopback.has(new URL(publicUrl).hostname),
   };

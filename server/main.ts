@@ -24,7 +24,7 @@ function configOrExit(): Config {
 
 const config = configOrExit();
 const dev = process.argv.includes('--dev');
-const log = pino({ level: process.env['LOG_LEVEL'] ?? 'warn', redact: ['req.headers.cookie', 'req.headers.authorization'] });
+const log = pino({ level: config.logLevel, redact: ['req.headers.cookie', 'req.headers.authorization'] });
 const orm = await openDatabase(join(config.dataDir, 'tallywright.sqlite'));
 const parts: Parts = { config, orm, log, now: () => new Date(), limits: true };
 let ready = false;

@@ -63,6 +63,11 @@ export function steppedUp(content: readonly unknown[]): unknown[] {
   });
 }
 
+/** A stored document with its blocks at the versions of today. */
+export function currentDocument(stored: EntryDocument): EntryDocument {
+  return { ...stored, content: steppedUp(stored.content) as TopNode[] };
+}
+
 /** Renews ids that occur twice: of two equal ones the later gets a new one (`renew` makes it). Lines likewise, within the entry. */
 export function withUniqueIds(document: EntryDocument, renew: () => string): EntryDocument {
   const taken = new Set<string>();

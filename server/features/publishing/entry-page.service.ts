@@ -1,5 +1,5 @@
 import type { EntryPage, TallyView } from '#contracts/entry-view.ts';
-import { deriveEntry, projectEntry, type EntryDerivation, type EntryDocument, type ProjectionContext } from '#src/blocks/pure.ts';
+import { currentDocument, deriveEntry, projectEntry, type EntryDerivation, type EntryDocument, type ProjectionContext } from '#src/blocks/pure.ts';
 import { AppError } from '#contracts/errors.ts';
 import { CrewMember, Entry, EntryAddress, Stage, WorkKind, type Build } from '#server/entities/index.ts';
 import { mayWrite, movedBuild, requireVisibleBuild, seesCosts } from '#server/features/builds/build-access.service.ts';
@@ -79,7 +79,8 @@ const noFigures: EntryFigures = { used: 0, wasted: 0, costs: 0, bought: 0, minut
 
 /** A source projected: the rows readers get, and what was learnt on the way. */
 export async function projectedEntry(em: Em, source: EntrySource) {
-  const { build, document } = source;
+  const { build } = source;
+  const document = currentDocument(source.document);
   const derived = deriveEntry(document, { measures: build.measures, currency: build.currency, materials: await materialFacts(em, build.owner.id) });
   const plural = await pluralsOf(em, derived);
   const pictures = await pictureViews(em, build.id, derived.pictures.map((picture) => picture.key));
