@@ -24,7 +24,8 @@ export function Kicker({ lead, items = [] }: KickerProps) {
 }
 
 function KickerLead({ label, to }: { label: string; to?: string }) {
-  const lettering = 'lettering-name text-ink';
+  // Above the title's link, which covers the whole of a row.
+  const lettering = 'lettering-name relative z-10 text-ink';
   return to ? (
     <Link to={to} className={lettering}>
       {label}
