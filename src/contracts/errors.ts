@@ -39,8 +39,15 @@ export interface ProblemDetails {
   newer?: unknown;
 }
 
+const brand = Symbol.for('tallywright.AppError');
+
 /** An outcome the caller can act on; everything else thrown is a bug. */
 export class AppError extends Error {
+  /** The server and the pages it renders are bundled apart, each with this class: an outcome is known by its brand in both. */
+  static [Symbol.hasInstance](value: unknown): boolean {
+    return typeof value === 'object' && value !== null && brand in value;
+  }
+  readonly [brand] = true;
   readonly code: ErrorCode;
   readonly fields: FieldProblems | undefined;
   readonly newer: unknown;
