@@ -21,6 +21,6 @@ export function matchingMaterials(materials: readonly MaterialFacts[], typed: st
   return materials
     .map((material) => ({ material, at: rank(material.name, asked) }))
     .filter((one): one is { material: MaterialFacts; at: number } => one.at !== null)
-    .sort((a, b) => a.at - b.at)
+    .toSorted((a, b) => a.at - b.at)
     .map(({ material }) => material);
 }

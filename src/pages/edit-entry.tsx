@@ -1,5 +1,5 @@
 import type { QueryClient } from '@tanstack/react-query';
-import { lazy, Suspense, useEffect, useState } from 'react';
+import { lazy, Suspense, useSyncExternalStore } from 'react';
 import { type LoaderFunction, useParams } from 'react-router-dom';
 import { Loading } from '#src/components/loading.tsx';
 import { PageFrame } from '#src/components/page-frame.tsx';
@@ -23,11 +23,12 @@ function DeskShape() {
   );
 }
 
+const never = () => () => undefined;
+
 export function Component() {
   const { build = '', number = '' } = useParams();
-  const [mounted, setMounted] = useState(false);
-  useEffect(() => setMounted(true), []);
-  if (!mounted) return <DeskShape />;
+  const inBrowser = useSyncExternalStore(never, () => true, () => false);
+  if (!inBrowser) return <DeskShape />;
   return (
     <Suspense fallback={<DeskShape />}>
       <Desk key={`${build}/${number}`} build={build} number={Number(number)} />

@@ -45,8 +45,10 @@ export function useEntryCalls({ build, number }: EntryAt) {
 export function useEntrySettled({ build, number }: EntryAt) {
   const client = useQueryClient();
   return async () => {
-    client.removeQueries({ queryKey: ['entries', build, number] });
-    await client.invalidateQueries({ predicate: ({ queryKey }) => queryKey[0] !== 'session' && queryKey[0] !== 'pictures', refetchType: 'none' });
+    const moved = ({ queryKey }: { queryKey: readonly unknown[] }) => queryKey[0] !== 'session' && queryKey[0] !== 'pictures';
+    client.removeQueries({ type: 'inactive', predicate: moved });
+    await client.invalidateQueries({ predicate: moved, refetchType: 'none' });
+    client.removeQueries({ queryKey: ['entries', build, number, 'preview'] });
   };
 }
 

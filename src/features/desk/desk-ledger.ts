@@ -19,8 +19,8 @@ export interface DayFigures {
   readonly day: number;
   /** To the door, without what is not ours. */
   readonly bought: number;
-  /** Some of it is not bought yet, so its money is not settled. */
-  readonly unsettled: boolean;
+  /** Lines not bought yet, or not all of it: their money is not settled. */
+  readonly linesShort: number;
   readonly minutes: number;
   readonly waiting: number;
   readonly people: number;
@@ -93,7 +93,7 @@ function figuresOf(derived: EntryDerivation, lines: ReadonlyMap<string, LineReck
   return {
     used, wasted, costs, day: used + wasted + costs,
     bought: sumOf(derived.receipts.map((receipt) => receipt.notSorted + sumOf(receipt.lines.filter(({ goes }) => goes !== 'not-mine').map(({ door }) => door)))),
-    unsettled: derived.uses.some((use) => exactFrom(lines.get(lineKey(use.block, use.line))?.short ?? noughtText).gt(0)),
+    linesShort: derived.uses.filter((use) => exactFrom(lines.get(lineKey(use.block, use.line))?.short ?? noughtText).gt(0)).length,
     minutes: sumOf(handsOn.map(({ minutes }) => minutes)),
     waiting: sumOf(derived.times.filter(({ kind }) => kind === 'waiting').map(({ minutes }) => minutes)),
     people: new Set(handsOn.map(({ handle, name }) => handle ?? name.toLowerCase())).size,

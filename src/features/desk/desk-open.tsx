@@ -1,0 +1,134 @@
+import { useCallback, useDeferredValue, useMemo, useState } from 'react';
+import { useNavigate } from 'react-router-dom';
+import type { DeskView } from '#contracts/entries.ts';
+import { ErrorSummary } from '#src/components/error-summary.tsx';
+import { PageColumns } from '#src/components/page-columns.tsx';
+import { PageFrame } from '#src/components/page-frame.tsx';
+import { BenchProvider } from '#src/blocks/bench.ts';
+import { useEntrySettled } from '#src/queries/entries.ts';
+import { putBack } from './block-commands.ts';
+import { deskLedger } from './desk-ledger.ts';
+import { DeskSide } from './desk-side.tsx';
+import type { DeskStart } from './desk-start.ts';
+import { EntryHead } from './entry-head.tsx';
+import type { KeptAt, KeptHere } from './kept-here.ts';
+import { NewerTextDialog } from './newer-text.tsx';
+import { Notices, type TookOutNotice } from './notices.tsx';
+import { OpeningNotice } from './opening-notice.tsx';
+import { goneWords, type GoneBlock } from './took-out.ts';
+import { putIn, Tray } from './tray.tsx';
+import { useBenchOf } from './use-bench.ts';
+import { useFaults } from './use-faults.ts';
+import { useMaterials } from './use-materials.ts';
+import { useSaver } from './use-saver.ts';
+import { useSignOff } from './use-sign-off.ts';
+import { useUploads } from './use-uploads.ts';
+import { filesOf, useWriting } from './use-writing.ts';
+import { spokenState } from './what-is-kept.ts';
+import { WordsEditor } from './words-editor.tsx';
+
+export interface DeskOpenProps {
+  view: DeskView;
+  start: DeskStart;
+  at: KeptAt;
+  kept: KeptHere;
+  /** The entry was taken back: the desk opens again on what stands now. */
+  onReopen: () => Promise<void>;
+}
+
+/** The desk with an entry on it. */
+export function DeskOpen({ view, start, at, kept, onReopen }: DeskOpenProps) {
+  const navigate = useNavigate();
+  const settled = useEntrySettled(at);
+  const { saver, state: save, calls } = useSaver(view, start, at, kept);
+  const [said, setSaid] = useState('');
+  const [notice, setNotice] = useState<TookOutNotice | null>(null);
+  const [later, setLater] = useState(false);
+  const tookOut = useCallback((words: string, restore: () => void) => setNotice({ words, putBack: restore }), []);
+
+  const onGone = (gone: GoneBlock[]) => tookOut(goneWords(gone), () => putBack(writing.editor, gone));
+  const onFiles = (files: File[]) => uploads.add(putIn(writing.editor, 'photos', true), files);
+  const writing = useWriting({ start, saver, onGone, onFiles });
+  const { document, current, edit, editor } = writing;
+  const { uploads, state: uploadsState, pictures } = useUploads(at.build, document, editor, start, kept);
+
+  const { materials, byId, addMaterial } = useMaterials(view);
+  const ledger = useMemo(() => deskLedger(view), [view]);
+  const settledText = useDeferredValue(document);
+  const reckoning = useMemo(() => ledger.reckon(settledText, byId), [ledger, settledText, byId]);
+  const signing = useSignOff({ at, kept, saver, calls, reckonNow: () => ledger.reckon(current.current, byId), photosGoingUp: () => uploads.state().going !== null });
+  const { touch, fault, shown } = useFaults(reckoning, signing.attempt > 0, signing.serverFaults);
+  const bench = useBenchOf({ view, document, reckoning, materials, byId, addMaterial, pictures, fault, touch, say: setSaid, tookOut });
+
+  const preview = async () => {
+    await saver.flush();
+    await navigate(`/builds/${at.build}/edit/${at.number}/preview`);
+  };
+  const takeBack = async () => {
+    const version = await saver.hold();
+    try {
+      await calls.takeBack(version);
+      await kept.forget();
+      await settled();
+      await onReopen();
+    } finally {
+      saver.release();
+    }
+  };
+  const throwAway = async () => {
+    await saver.hold();
+    try {
+      await calls.discard();
+      await kept.forget();
+      await settled();
+      await navigate(view.entry.href ?? `/builds/${at.build}`);
+    } catch (cause) {
+      saver.release();
+      throw cause;
+    }
+  };
+  const newer = save.phase.is === 'newer' ? save.phase.newer : null;
+  const choose = (version: number, text: typeof document) => {
+    setLater(false);
+    writing.goOnWith(version, text);
+  };
+  return (
+    <BenchProvider value={bench}>
+      <PageFrame>
+        <h1 className="sr-only">Write up: {document.title.trim() || 'a day'}</h1>
+        <PageColumns
+          sticky
+          aside={
+            <DeskSide
+              view={view} reckoning={reckoning} materials={materials} faults={shown} save={save} onTryAgain={saver.tryAgain}
+              signingOff={signing.pending} onSignOff={() => void signing.signOff()} onPreview={() => void preview()}
+              going={uploadsState.going} onStopAll={uploads.stopAll} onTakeBack={takeBack} onThrowAway={throwAway}
+            />
+          }
+        >
+          <div
+            onPaste={(event) => {
+              const files = filesOf(event.clipboardData);
+              const block = event.target instanceof Element ? event.target.closest('[data-block-view]')?.getAttribute('data-block-view') : undefined;
+              if (files.length === 0 || event.defaultPrevented) return;
+              event.preventDefault();
+              const inPhotos = block && document.content.some((node) => node.type === 'photos' && node.attrs.id === block);
+              if (inPhotos) uploads.add(block, files);
+              else onFiles(files);
+            }}
+          >
+            <ErrorSummary errors={signing.errors.map(({ name, message }) => (name ? { name, message } : { message }))} attempt={signing.attempt} />
+            <OpeningNotice takenUp={start.takenUp} newerWaits={newer !== null && later} onLook={() => setLater(false)} />
+            <EntryHead view={view} document={document} onHead={(part) => edit((now) => ({ ...now, ...part }))} />
+            <WordsEditor editor={editor} />
+            <Tray editor={editor} />
+          </div>
+        </PageColumns>
+        <Notices said={spokenState(save) || said} tookOut={notice} onClose={() => setNotice(null)} />
+        {newer && !later && (
+          <NewerTextDialog view={view} context={{ measures: view.build.measures, currency: view.build.currency, materials: byId }} mine={document} newer={newer} onChoose={choose} onLater={() => setLater(true)} />
+        )}
+      </PageFrame>
+    </BenchProvider>
+  );
+}

@@ -1,0 +1,80 @@
+import { openDB, type DBSchema, type IDBPDatabase } from 'idb';
+import { entryDocument, steppedUp, type EntryDocument } from '#src/blocks/pure.ts';
+
+/** Whose text, of which build and entry. */
+export interface KeptAt {
+  readonly handle: string;
+  readonly build: string;
+  readonly number: number;
+}
+
+export interface KeptText {
+  readonly document: EntryDocument;
+  /** The version of the server's text it stands on. */
+  readonly version: number;
+  readonly onServer: boolean;
+  readonly at: Date;
+}
+
+export interface KeptPicture {
+  readonly id: string;
+  readonly entry: string;
+  readonly block: string;
+  readonly name: string;
+  readonly file: Blob;
+  readonly order: number;
+}
+
+interface DeskStore extends DBSchema {
+  texts: { key: string; value: KeptText };
+  pictures: { key: string; value: KeptPicture; indexes: { entry: string } };
+}
+
+let opened: Promise<IDBPDatabase<DeskStore>> | null = null;
+
+function store(): Promise<IDBPDatabase<DeskStore>> {
+  opened ??= openDB<DeskStore>('tallywright-desk', 1, {
+    upgrade: (database) => {
+      database.createObjectStore('texts');
+      database.createObjectStore('pictures', { keyPath: 'id' }).createIndex('entry', 'entry');
+    },
+  });
+  return opened;
+}
+
+function keyOf({ handle, build, number }: KeptAt): string {
+  return `${handle}/${build}/${number}`;
+}
+
+/** What this browser keeps of a desk, by account: the text not yet on the server, and the pictures not yet gone up. */
+export function keptHere(at: KeptAt) {
+  const entry = keyOf(at);
+  return {
+    read: async (): Promise<KeptText | null> => {
+      const kept = await (await store()).get('texts', entry);
+      if (!kept) return null;
+      // kept by an older version of the site, perhaps
+      const parsed = entryDocument.safeParse({ ...kept.document, content: steppedUp(kept.document.content) });
+      return parsed.success ? { ...kept, document: parsed.data } : null;
+    },
+    keep: async (text: Omit<KeptText, 'at'>): Promise<void> => {
+      await (await store()).put('texts', { ...text, at: new Date() }, entry);
+    },
+    forget: async (): Promise<void> => {
+      const database = await store();
+      await database.delete('texts', entry);
+      for (const key of await database.getAllKeysFromIndex('pictures', 'entry', entry)) await database.delete('pictures', key);
+    },
+    pictures: async (): Promise<KeptPicture[]> => {
+      const kept = await (await store()).getAllFromIndex('pictures', 'entry', entry);
+      return kept.toSorted((a, b) => a.order - b.order);
+    },
+    keepPicture: async (picture: Omit<KeptPicture, 'entry'>): Promise<void> => {
+      await (await store()).put('pictures', { ...picture, entry });
+    },
+    forgetPicture: async (id: string): Promise<void> => {
+      await (await store()).delete('pictures', id);
+    },
+  };
+}
+export type KeptHere = ReturnType<typeof keptHere>;

@@ -1,0 +1,73 @@
+import { useState } from 'react';
+import { useNavigate } from 'react-router-dom';
+import { AppError } from '#contracts/errors.ts';
+import type { FormError } from '#src/components/error-summary.tsx';
+import { useEntrySettled, type useEntryCalls } from '#src/queries/entries.ts';
+import type { DeskReckoning } from './desk-ledger.ts';
+import { deskFaults } from './faults.ts';
+import type { KeptAt, KeptHere } from './kept-here.ts';
+import type { NewerText, Saver } from './saver.ts';
+
+export interface SignOffParts {
+  at: KeptAt;
+  kept: KeptHere;
+  saver: Saver;
+  calls: ReturnType<typeof useEntryCalls>;
+  /** The text as it is now, read and reckoned. */
+  reckonNow: () => DeskReckoning;
+  photosGoingUp: () => boolean;
+}
+
+const stillGoing = 'Photos are still going up. Wait for them, or stop them.';
+
+/** Publishing the day: faults first, each leading to its field; then one call, and on to the page. */
+export function useSignOff({ at, kept, saver, calls, reckonNow, photosGoingUp }: SignOffParts) {
+  const navigate = useNavigate();
+  const settled = useEntrySettled(at);
+  const [pending, setPending] = useState(false);
+  const [attempt, setAttempt] = useState(0);
+  const [errors, setErrors] = useState<FormError[]>([]);
+  const [serverFaults, setServerFaults] = useState<Readonly<Record<string, string>>>({});
+
+  const refuse = (found: FormError[]) => {
+    setErrors(found);
+    setAttempt((count) => count + 1);
+  };
+  const refused = (cause: AppError, reckoning: DeskReckoning) => {
+    saver.release();
+    if (cause.code === 'newer-exists') saver.meetNewer(cause.newer as NewerText);
+    else if (cause.fields) {
+      setServerFaults(cause.fields);
+      refuse(deskFaults(cause.fields, reckoning.document).map(({ path, words }) => ({ name: path, message: words })));
+    } else if (cause.code === 'unreachable') refuse([{ message: 'The server could not be reached. The day is kept in this browser: sign it off again when you are connected.' }]);
+    else if (cause.code === 'sign-in-needed') refuse([{ message: 'You are signed out. The day is kept in this browser: sign in, then sign it off.' }]);
+    else refuse([{ message: cause.message }]);
+  };
+
+  const signOff = async () => {
+    if (pending) return;
+    const reckoning = reckonNow();
+    const found = deskFaults(reckoning.derived.faults, reckoning.document).map(({ path, words }) => ({ name: path, message: words }));
+    if (photosGoingUp()) found.push({ name: '', message: stillGoing });
+    setServerFaults({});
+    if (found.length > 0) {
+      refuse(found);
+      return;
+    }
+    setErrors([]);
+    setPending(true);
+    try {
+      const version = await saver.hold();
+      const { href } = await calls.signOff({ version, document: reckoning.document });
+      await kept.forget();
+      await settled();
+      await navigate(href);
+    } catch (cause) {
+      if (!(cause instanceof AppError)) throw cause;
+      refused(cause, reckoning);
+    } finally {
+      setPending(false);
+    }
+  };
+  return { signOff, pending, attempt, errors, serverFaults };
+}
