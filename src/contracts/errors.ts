@@ -44,7 +44,7 @@ const brand = Symbol.for('tallywright.AppError');
 /** An outcome the caller can act on; everything else thrown is a bug. */
 export class AppError extends Error {
   /** The server and the pages it renders are bundled apart, each with this class: an outcome is known by its brand in both. */
-  static [Symbol.hasInstance](value: unknown): boolean {
+  static override [Symbol.hasInstance](value: unknown): boolean {
     return typeof value === 'object' && value !== null && brand in value;
   }
   readonly [brand] = true;
