@@ -16,13 +16,13 @@ export interface View {
 export interface Visitor {
   readonly page: Page;
   /** Says that a console message or failed request is part of what is tested. */
-  expectComplaint(pattern: RegExp): void;
+  readonly expectComplaint: (pattern: RegExp) => void;
 }
 
 interface Opened {
   readonly context: BrowserContext;
   readonly page: Page;
-  faults(): string[];
+  readonly faults: () => string[];
 }
 
 const WIDE = 1280; // pixels
