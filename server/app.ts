@@ -15,8 +15,8 @@ import { registerFeatures, featureRouters, featureLimits } from './features/inde
 
 export interface AppOptions {
   readonly parts: Parts;
-  /** `api`: no pages, for tests of services; `dev`: pages by Vite on the given server. */
-  readonly pages: 'built' | 'dev' | 'api';
+  /** `api`: no pages, for tests of services; `dev`: pages by Vite on the given server; or a shell of the caller's own. */
+  readonly pages: 'built' | 'dev' | 'api' | PageShell;
   readonly http?: Server;
   /** Whether the demo is in and the site may be sent readers. */
   readonly ready?: () => boolean;
@@ -70,7 +70,7 @@ export async function createApp({ parts, pages, http, ready }: AppOptions): Prom
   app.use(pinoHttp({ logger: parts.log, autoLogging: false, quietReqLogger: true }));
   app.use(security(parts, pages === 'dev'));
 
-  let shell: PageShell | null = null;
+  let shell: PageShell | null = typeof pages === 'object' ? pages : null;
   if (pages === 'built') shell = await builtShell(app);
   if (pages === 'dev' && http) shell = await viteShell(app, http);
 

@@ -7,17 +7,18 @@ import pino from 'pino';
 import { inject } from 'vitest';
 import { signUp } from '#contracts/session.ts';
 import type { Role } from '#contracts/words.ts';
-import { createApp, type AppOptions } from '#server/app.ts';
+import { createApp } from '#server/app.ts';
 import { readConfig } from '#server/config.ts';
 import { openDatabase, type Orm } from '#server/database.ts';
 import { Person } from '#server/entities/index.ts';
 import type { Parts } from '#server/http/context.ts';
 import type { EndpointTable } from '#server/http/endpoint-table.ts';
+import { sourceShell } from './source-shell.ts';
 import { TestClient } from './test-client.ts';
 
 export interface TestServerOptions {
-  /** `api` (the default) has no pages; `built` serves those of the last build. */
-  readonly pages?: Exclude<AppOptions['pages'], 'dev'>;
+  /** `api` (the default) has no pages; `source` renders them from the tree as it is; `built` serves those of the last build. */
+  readonly pages?: 'api' | 'source' | 'built';
   /** Whether requests are counted and held back; off unless that is what is tested. */
   readonly limits?: boolean;
   /** The clock the site goes by. */
@@ -67,7 +68,7 @@ export async function startTestServer(options: TestServerOptions = {}): Promise<
   const url = `http://127.0.0.1:${address.port}`;
   const config = readConfig({ HOST: '127.0.0.1', PORT: String(address.port), PUBLIC_URL: url, DATA_DIR: dataDir, ...options.env });
   const parts: Parts = { config, orm, log: pino({ level: QUIET }), now: options.now ?? (() => new Date()), limits: options.limits ?? false };
-  const site = await createApp({ parts, pages: options.pages ?? 'api', http });
+  const site = await createApp({ parts, pages: options.pages === 'source' ? sourceShell : (options.pages ?? 'api'), http });
   http.on('request', site.app);
   const people = new Map<string, Promise<TestClient>>();
   return {

@@ -1,3 +1,4 @@
+import slugify from '@sindresorhus/slugify';
 import { Person } from '#server/entities/index.ts';
 import type { Em } from '#server/http/context.ts';
 
@@ -28,6 +29,5 @@ export async function handleProblem(em: Em, handle: string): Promise<string | un
 
 /** A handle made of somebody's name elsewhere, for them to change. */
 export function handleFrom(text: string): string {
-  const plain = text.normalize('NFKD').toLowerCase().replaceAll(/[^a-z0-9]+/g, '-').replaceAll(/^[^a-z]+|-+$/g, '');
-  return plain.slice(0, longestHandle).replace(/-$/, '');
+  return slugify(text, { decamelize: false }).replace(/^[^a-z]+/, '').slice(0, longestHandle).replace(/-$/, '');
 }
