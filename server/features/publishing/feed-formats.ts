@@ -1,6 +1,10 @@
 import RSS from 'rss';
 import type { Feed } from './feed.service.ts';
 
+const generator = '<generator>Tallywright</generator>';
+// the package dates a feed by the clock, which would make every answer a new version of it
+const buildDate = new RegExp(`${generator}<lastBuildDate>[^<]*</lastBuildDate>`);
+
 /** RSS 2.0 with full content (content:encoded), a self link (atom:link) and permanent guids. */
 export function rssOf(feed: Feed, publicUrl: string): string {
   const rss = new RSS({
@@ -14,7 +18,7 @@ export function rssOf(feed: Feed, publicUrl: string): string {
       custom_elements: [{ 'content:encoded': { _cdata: item.html } }],
     });
   }
-  return rss.xml();
+  return rss.xml().replace(buildDate, () => `${generator}<lastBuildDate>${(feed.modified ?? new Date(0)).toUTCString()}</lastBuildDate>`);
 }
 
 /** JSON Feed 1.1. */
