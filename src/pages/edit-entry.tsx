@@ -1,6 +1,7 @@
 import type { QueryClient } from '@tanstack/react-query';
 import { lazy, Suspense, useSyncExternalStore } from 'react';
 import { type LoaderFunction, useParams } from 'react-router-dom';
+import { Head } from '#src/lib/head.tsx';
 import { Loading } from '#src/components/loading.tsx';
 import { PageFrame } from '#src/components/page-frame.tsx';
 import { deskQuery } from '#src/queries/entries.ts';
@@ -28,10 +29,14 @@ const never = () => () => undefined;
 export function Component() {
   const { build = '', number = '' } = useParams();
   const inBrowser = useSyncExternalStore(never, () => true, () => false);
-  if (!inBrowser) return <DeskShape />;
   return (
-    <Suspense fallback={<DeskShape />}>
-      <Desk key={`${build}/${number}`} build={build} number={Number(number)} />
-    </Suspense>
+    <>
+      <Head title="Write up a day" />
+      {inBrowser ? (
+        <Suspense fallback={<DeskShape />}>
+          <Desk key={`${build}/${number}`} build={build} number={Number(number)} />
+        </Suspense>
+      ) : <DeskShape />}
+    </>
   );
 }

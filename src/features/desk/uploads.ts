@@ -30,12 +30,14 @@ export interface UploadsState {
   readonly going: { readonly count: number; readonly sent: number; readonly size: number; readonly secondsLeft: number | null } | null;
 }
 
-export const mostBytes = 40_000_000;
+const mebibyte = 1024 * 1024;
+/** The server's own limit: what is larger is not even sent. */
+export const mostBytes = 40 * mebibyte;
 const atOnce = 2;
 
 /** Why a file is not even sent, in words for beside it. */
 export function refusalOf(file: { name: string; size: number; type: string }): string | null {
-  if (file.size > mostBytes) return `“${file.name}” is ${Math.round(file.size / 1_000_000)} MB. A photo may be 40 MB at the most: save a smaller copy and pick that.`;
+  if (file.size > mostBytes) return `“${file.name}” is ${Math.round(file.size / mebibyte)} MB; 40 MB is the most. Save a smaller copy and pick that.`;
   if (file.size === 0) return `“${file.name}” is empty. Pick the photo again.`;
   if (file.type !== '' && !file.type.startsWith('image/')) return `“${file.name}” is not a photo. JPEG, PNG, WebP and HEIC can go up.`;
   return null;

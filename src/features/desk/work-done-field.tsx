@@ -43,7 +43,7 @@ export function WorkDoneField({ work, kinds, onWork }: WorkDoneFieldProps) {
           list="work-kinds" autoComplete="off" value={now.kind} maxLength={60} placeholder="steamed rib" onChange={(event) => change({ kind: event.target.value })} onBlur={() => bench.touch('work.kind')}
           className={`${control} w-40`}
         />
-        <datalist id="work-kinds">{kinds.map(({ one }) => <option key={one} value={one} />)}</datalist>
+        <datalist id="work-kinds">{kinds.map(({ one }) => <option key={one} value={one}>{one}</option>)}</datalist>
       </div>
       <FieldNotes id={ids.amount} error={faults.amount} />
       <FieldNotes id={ids.kind} error={faults.kind} />
