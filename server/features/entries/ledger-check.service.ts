@@ -74,16 +74,17 @@ async function entryDifferences(em: Em, build: Build): Promise<{ count: number; 
 /**
  * Checks the whole ledger from nothing: the rows of every entry are what its published document says, every movement's value
  * is what a replay gives, and the sum holds for every build and shed.
+ * @param only.owner one restorer's builds and sheds, or nothing for all
  */
-export async function verifyLedger(em: Em): Promise<LedgerReport & { readonly entries: number }> {
-  const builds = await em.find(Build, {}, { populate: ['owner'], orderBy: { id: 'asc' } });
+export async function verifyLedger(em: Em, only: { owner?: number } = {}): Promise<LedgerReport & { readonly entries: number }> {
+  const builds = await em.find(Build, only, { populate: ['owner'], orderBy: { id: 'asc' } });
   const differences: string[] = [];
   let entries = 0;
   for (const build of builds) {
-    const found = await entryDifferences(em.fork(), build);
+    const found = await entryDifferences(em.fork({ keepTransactionContext: true }), build);
     entries += found.count;
     differences.push(...found.differences);
   }
-  const shelves = await verifyShelves(em.fork());
+  const shelves = await verifyShelves(em.fork({ keepTransactionContext: true }), only);
   return { ...shelves, entries, differences: [...differences, ...shelves.differences] };
 }

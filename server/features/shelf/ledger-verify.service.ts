@@ -44,10 +44,11 @@ async function shelfDifferences(em: Em, shelf: Shelf, rows: readonly Movement[])
 }
 
 /** Replays every shelf from nothing and reports every figure that differs, with the sum check of every build and shed. */
-export async function verifyShelves(em: Em): Promise<LedgerReport> {
+export async function verifyShelves(em: Em, only: { owner?: number } = {}): Promise<LedgerReport> {
   const differences: string[] = [];
-  const shelves = await em.find(Shelf, {}, { orderBy: { id: 'asc' } });
-  const missing = await em.find(Build, { id: { $nin: shelves.flatMap(({ build }) => build?.id ?? []) } });
+  const mine = only.owner === undefined ? {} : { $or: [{ person: only.owner }, { build: { owner: only.owner } }] };
+  const shelves = await em.find(Shelf, mine, { orderBy: { id: 'asc' } });
+  const missing = await em.find(Build, { ...only, id: { $nin: shelves.flatMap(({ build }) => build?.id ?? []) } });
   differences.push(...missing.map(({ id }) => `build ${id} has no shelf`));
   let movements = 0;
   for (const shelf of shelves) {
