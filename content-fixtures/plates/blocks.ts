@@ -38,16 +38,6 @@ export function block(s: Sheet, face: readonly Point[], depth: Point, fill: stri
   s.solid(poly(...face), fill, { edge });
 }
 
-/** Cut plywood: veneers lying along and across by turns, between two long edges. */
-export function plyEdge(s: Sheet, left: Point, right: Point, thick: number, plies: number): void {
-  const step = thick / plies;
-  for (let i = 0; i < plies; i += 1) {
-    const quad = poly([left[0], left[1] + i * step], [right[0], right[1] + i * step], [right[0], right[1] + (i + 1) * step], [left[0], left[1] + (i + 1) * step]);
-    s.flat(quad, s.of(i % 2 === 0 ? "ash" : "oak", { part: i, size: 0.6 }));
-    if (i % 2 === 1) s.flat(quad, ink, 0.16);
-  }
-}
-
 /** How far out from the axis a turned part is, along it. */
 export type Profile = readonly Point[];
 

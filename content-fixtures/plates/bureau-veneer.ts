@@ -97,8 +97,8 @@ function dish(s: Sheet): void {
 function cauls(s: Sheet): void {
   fallFront(s, true);
   s.solid(poly([190, 400], [1410, 380], [1420, 660], [180, 670]), "#d9d3c2", { drop: 4, edge: 3 });
-  for (const [x, y, k] of [[330, 404, 1], [640, 668, 2], [960, 394, 3], [1250, 664, 4], [470, 672, 5]] as const) s.solid(blob(x, y, 19, 12, k, 0.3), s.of("glue"), { edge: 4, drop: 3 });
   block(s, [[170, 430], [1430, 430], [1430, 640], [170, 640]], [26, -30], s.of("pine", { part: 6 }), { drop: 24 });
+  for (const [x, y, k] of [[220, 660, 1], [520, 664, 2], [760, 658, 3], [850, 664, 6], [1150, 662, 4], [1390, 660, 5]] as const) s.solid(blob(x, y, 22, 13, k, 0.3), s.of("glue"), { edge: 4, drop: 3 });
   for (const [x, part] of [[330, 1], [640, 2], [960, 3], [1270, 4]] as const) {
     block(s, [[x - 46, 120], [x + 46, 120], [x + 46, 900], [x - 46, 900]], [16, -18], s.of("beech", { turn: 90, part }), { drop: 26 });
     clamp(s, { x: x + 4, y: 128 }, 740);

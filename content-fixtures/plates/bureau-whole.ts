@@ -1,7 +1,7 @@
 /** The bureau in its corner, as it came and as it left, and the inside fitted out. */
 import { block } from "./blocks.ts";
 import { drawerFront, escutcheon, handle } from "./bureau-parts.ts";
-import { blob, circle, curve, ellipse, open, poly, ragged, rect } from "./paths.ts";
+import { circle, curve, ellipse, open, poly, ragged, rect } from "./paths.ts";
 import { boards } from "./places.ts";
 import type { Plates } from "./plate.ts";
 import type { Material } from "./recipes.ts";
@@ -49,6 +49,7 @@ function standing(s: Sheet, f: Finish, worn: boolean): void {
   s.line(poly([500, 192], [1102, 192], [1124, 390], [476, 390]), "#d9b983", 4, worn ? 0.5 : 0.95);
   escutcheon(s, { x: 800, y: 216, size: 0.42 }, s.of(f.brass), 3);
   s.solid(poly([440, 112], [1196, 112], [1160, 154], [440, 154]), s.of(f.carcase, { part: 7 }), { drop: 8, edge: 6 });
+  s.flat(poly([1180, 112], [1238, 87], [1238, 132], [1160, 156]), s.of("walnutDark", { part: 6 }));
   s.solid(poly([440, 112], [1180, 112], [1236, 88], [500, 88]), s.of(worn ? "dullFigured" : "polished", { part: 1 }), { edge: 5 });
 }
 
@@ -58,12 +59,11 @@ function arrived(s: Sheet): void {
   const split = ragged([458, 318], [1040, 284], 16, 9, 6);
   s.line(open(...split), "#140c06", 11, 0.95);
   s.line(open(...split.map(([x, y]): [number, number] => [x, y + 7])), "#c9a77c", 3, 0.8);
-  s.flat(poly(...ragged([450, 296], [540, 330], 5, 12, 2), [448, 350]), "#a98a60");
+  s.clipped(poly([474, 170], [1126, 170], [1152, 412], [448, 412]), () => s.solid(poly([440, 286], ...ragged([456, 290], [548, 318], 5, 10, 2), ...ragged([540, 330], [440, 362], 4, 10, 4)), s.of("oak"), { edge: 4 }));
   s.add(`<g transform="translate(690 100) scale(1 .3)">`);
   s.line(circle(0, 0, 34), "#d8cdb8", 7, 0.8);
   s.line(circle(60, 12, 30), "#d8cdb8", 5, 0.5);
   s.add("</g>");
-  s.flat(blob(560, 840, 120, 40, 5, 0.3), "#94806a", 0.4);
 }
 
 function finished(s: Sheet): void {

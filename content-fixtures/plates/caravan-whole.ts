@@ -137,8 +137,8 @@ function finished(s: Sheet): void {
   lid(s, 240, false);
   s.solid(rect(1120, 836, 180, 50, 6), s.of("pine"), { drop: 18, edge: 6 });
   s.line(open([1120, 850], [1300, 850]), ink, 3, 0.4);
-  s.solid(poly([560, ground], [576, 850], [664, 850], [680, ground]), s.of("primer"), { drop: 14, edge: 5 });
-  s.line(curve([[576, 850], [620, 800], [664, 850]]), ink, 5);
+  s.solid(poly([572, ground], [556, 838], [676, 838], [660, ground]), s.of("primer"), { drop: 14, edge: 5 });
+  s.line(curve([[558, 838], [616, 790], [674, 838]]), "#5f6b74", 5);
 }
 
 function cornerFinished(s: Sheet): void {

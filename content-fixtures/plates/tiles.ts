@@ -67,7 +67,7 @@ const kept = join(tmpdir(), "workshop-plate-tiles");
 
 /** Painting takes a second a tile, so each is kept under a name made of its recipe. */
 async function paintTile(material: Material): Promise<string> {
-  const seed = [...material].reduce((sum, letter) => sum * 31 + letter.charCodeAt(0), 7) >>> 0;
+  const seed = Array.from(material).reduce((sum, letter) => sum * 31 + letter.charCodeAt(0), 7) >>> 0;
   const recipe: Recipe = recipes[material];
   const file = join(kept, `${createHash("sha256").update(JSON.stringify([seed, tileSize, recipe])).digest("hex")}.jpg`);
   const known = await readFile(file).catch(() => undefined);
