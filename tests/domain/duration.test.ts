@@ -34,5 +34,5 @@ test.each([
   ['0 min', 'Time is more than nought: write 5 min, or leave the line out'],
   ['99999 h', 'That is more time than one line can hold'],
 ])('%j is answered beside its field', (text, problem) => {
-  expect(readMinutes(text)).toEqual({ ok: false, problem });
+  expect(readMinutes(text)).toEqual({ ok: false, problem: `${problem}.` });
 });

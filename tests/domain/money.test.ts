@@ -57,5 +57,5 @@ test.each([
   ['£', 'GBP', 'Write the amount as a figure, like 12.50'],
   ['99999999999999', 'GBP', 'That is more money than one line can hold'],
 ])('%s in %s is answered beside its field', (text, currency, problem) => {
-  expect(readMoney(text, currency)).toEqual({ ok: false, problem });
+  expect(readMoney(text, currency)).toEqual({ ok: false, problem: `${problem}.` });
 });

@@ -124,7 +124,7 @@ test('a bare gallon follows the build’s measures and says so; a named one says
   expect(readOf('2 pints', imperial).note).toMatch(/imp pt.*imperial units/);
   expect(readOf('1 US gal', imperial).note).toBeUndefined();
   expect(amountOf('1 US cup', imperial)).toBe(amountOf('1 cup', resin));
-  expect(problemOf('3 cups', imperial)).toBe('A cup is a US measure: write US cups, or ml');
+  expect(problemOf('3 cups', imperial)).toBe('A cup is a US measure: write US cups, or ml.');
 });
 
 test.each([
@@ -150,12 +150,12 @@ test.each([
   ['9999999999999 l', resin, 'That is more than one line can hold'],
   ['1 l '.repeat(30), resin, 'Write one amount, like 350 ml, 2 l'],
 ])('%j is answered beside its field', (text, context, problem) => {
-  expect(problemOf(text, context)).toBe(problem);
+  expect(problemOf(text, context)).toBe(`${problem}.`);
 });
 
 test('two packs of one name and two sizes are not guessed between', () => {
   const two: ReadingContext = { ...resin, packs: [{ name: 'tin', amount: '2500/1' }, { name: 'tin', amount: '750/1' }] };
-  expect(problemOf('1 tin', two)).toBe('There is a tin of 2.5 l and of 750 ml: write the amount instead');
+  expect(problemOf('1 tin', two)).toBe('There is a tin of 2.5 l and of 750 ml: write the amount instead.');
   expect(amountOf('2 tins of 750 ml', two)).toBe('1500/1');
 });
 

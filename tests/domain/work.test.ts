@@ -18,5 +18,5 @@ test.each([
   ['17 ribs', '“17 ribs” is not an amount: write 17, 3.2 or 4 1/2'],
   ['1/0', '“1/0” is not an amount: write 17, 3.2 or 4 1/2'],
 ])('%j is answered beside its field', (text, problem) => {
-  expect(readAmountOfWork(text)).toEqual({ ok: false, problem });
+  expect(readAmountOfWork(text)).toEqual({ ok: false, problem: `${problem}.` });
 });
