@@ -1,0 +1,48 @@
+import type { DemoBuild } from '../demo-build.ts';
+import { frameDays } from './frame-days.ts';
+import { outsideDays } from './outside-days.ts';
+
+export const caravan: DemoBuild = {
+  owner: 'restorer', crew: ['crew'], startedDaysAgo: 156, kind: 'caravan',
+  title: 'Sandpiper, a 1972 folding-roof caravan',
+  lead: 'A small touring caravan whose roof folds down for the road. It stood twelve winters with a leaking window, and the rear corner had gone to compost. New foot, new floor edge, new roof skin, and back to the sea before the summer is over.',
+  year: 1972, yearAbout: false, serialNumber: 'SP 4 0716', stands: 'waiting', standsNote: 'the gas fitter',
+  currency: 'GBP', measures: 'imperial', method: 'fifo', visibility: 'public', costsShown: true,
+  before: 'caravan-arrived.jpg', after: 'caravan-finished.jpg',
+  stages: [
+    { title: 'Survey', money: '75', time: '12 h', done: true },
+    { title: 'Frame and floor', money: '220', time: '50 h', work: { amount: '6', unit: 'piece', kind: 'frame joint' }, done: true },
+    { title: 'Running gear', money: '240', time: '16 h', done: true },
+    { title: 'Skin and roof', money: '460', time: '70 h' },
+    { title: 'Gas, water and stove', money: '190', time: '20 h' },
+  ],
+  materials: {
+    mask: { name: 'Dust mask, P3', dimension: 'count', unit: 'piece', packs: { box: '10' } },
+    ash: { name: 'Ash, planed 45 x 45 mm', dimension: 'length', unit: 'm', packs: { length: '2.4 m' } },
+    ply: { name: 'Birch plywood, 9 mm', dimension: 'area', unit: 'm2', packs: { sheet: '2.9768 m2' }, hazards: ['dust'] },
+    screw: { name: 'Stainless screw, 4 x 30 mm', dimension: 'count', unit: 'piece', packs: { box: '200' } },
+    glue: { name: 'Resin glue, powder', dimension: 'mass', unit: 'g', packs: { tub: '1.5 kg' } },
+    preservative: { name: 'Clear wood preservative', dimension: 'volume', unit: 'ml', packs: { tin: '2.5 l' }, hazards: ['solvent'] },
+    sealant: { name: 'Polyurethane sealant, grey', dimension: 'volume', unit: 'cartridge', packs: { cartridge: '310 ml' } },
+    mastic: { name: 'Non-setting mastic strip, 32 mm', dimension: 'length', unit: 'm', packs: { roll: '5 m' } },
+    sheet: { name: 'Aluminium sheet, 0.9 mm', dimension: 'area', unit: 'm2', packs: { sheet: '3.125 m2' } },
+    rivet: { name: 'Closed-end rivet, 4 x 10 mm', dimension: 'count', unit: 'piece', packs: { box: '500' } },
+    trim: { name: 'Aluminium corner trim', dimension: 'length', unit: 'm', packs: { length: '2.4 m' } },
+    rubber: { name: 'Window rubber with filler strip', dimension: 'length', unit: 'm' },
+    oxide: { name: 'Red oxide primer', dimension: 'volume', unit: 'ml', packs: { tin: '2.5 l' }, hazards: ['solvent'] },
+    chassisBlack: { name: 'Chassis black', dimension: 'volume', unit: 'ml', packs: { tin: '1 l' }, hazards: ['solvent'] },
+    cream: { name: 'Coach enamel, cream', dimension: 'volume', unit: 'ml', packs: { tin: '1 l' }, hazards: ['solvent'] },
+    green: { name: 'Coach enamel, sea green', dimension: 'volume', unit: 'ml', packs: { tin: '1 l' }, hazards: ['solvent'] },
+    thinners: { name: 'White spirit', dimension: 'volume', unit: 'ml', packs: { bottle: '2 l' }, hazards: ['solvent'] },
+    wetPaper: { name: 'Wet and dry paper, 320 grit', dimension: 'count', unit: 'piece', packs: { pack: '25' } },
+    bearings: { name: 'Hub bearing kit, two tapers and seal', dimension: 'count', unit: 'piece' },
+    seal: { name: 'Hub grease seal', dimension: 'count', unit: 'piece' },
+    grease: { name: 'Wheel bearing grease', dimension: 'mass', unit: 'g', packs: { tin: '500 g' } },
+    tyre: { name: 'Trailer tyre, 13 inch', dimension: 'count', unit: 'piece' },
+    cord: { name: 'Glass sealing cord, 10 mm', dimension: 'length', unit: 'm', packs: { roll: '2.5 m' } },
+    cleaner: { name: 'Alkaline degreaser', dimension: 'volume', unit: 'ml', packs: { bottle: '1 l' }, hazards: ['corrosive'] },
+    catch: { name: 'Roof catch, reproduction', dimension: 'count', unit: 'piece' },
+    curtain: { name: 'Curtain track, white', dimension: 'length', unit: 'm', packs: { length: '2 m' } },
+  },
+  entries: [...frameDays, ...outsideDays],
+};
