@@ -168,8 +168,8 @@ function floorRotten(s: Sheet): void {
     s.solid(poly([x - 28 + tilt, y - 122], [x + 28 + tilt, y - 122], [x + 10 + tilt, y - 98], [x - 10 + tilt, y - 98]), s.of("darkRust"), { edge: 4, drop: 4 });
   }
   rule(s, { x: 90, y: 950, turn: 1 }, 560);
-  mallet(s, { x: 980, y: 900, turn: 12 });
   crumbs(s, 800, 850, [420, 60], 80, 4, "#5b4229", 11);
+  mallet(s, { x: 980, y: 900, turn: 12 });
 }
 
 function floorNew(s: Sheet): void {
@@ -180,7 +180,13 @@ function floorNew(s: Sheet): void {
   s.line(open([-20, 252], [1620, 252]), ink, 6, 0.6);
   s.solid(rect(-20, 180, 1660, 92), s.of("ash", { part: 6 }), { drop: 22, edge: 6 });
   heads(s, [140, 520, 900, 1280].map((x) => [x, 226] as const), 14, s.of("brass"));
-  for (let i = 0; i < 5; i += 1) s.solid(rect(-20, 560 + i * 42, 1660, 42), s.of(i % 2 === 0 ? "ash" : "oak", { part: i + 1, size: 0.8 }), { edge: 3, dark: 0.2 });
+  s.line(open([-20, 558], [1620, 558]), "#fff6e0", 5, 0.5);
+  for (let i = 0; i < 5; i += 1) {
+    const ply = rect(-20, 562 + i * 42, 1660, 42);
+    s.flat(ply, s.of(i % 2 === 0 ? "ply" : "oak", { part: i + 1, size: 0.8 }));
+    if (i % 2 === 1) s.shade(ply, 0.16, 90);
+    s.line(open([-20, 562 + i * 42], [1620, 562 + i * 42]), ink, 4, 0.6, "butt");
+  }
   s.shade(rect(-20, 740, 1660, 30), 0.3);
   s.solid(rect(-20, 770, 1660, 84), s.of("primer"), { edge: 7 });
   s.flat(rect(-20, 854, 1660, 230), s.of("concrete"));
