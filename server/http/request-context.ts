@@ -22,7 +22,7 @@ function sessionHandle(req: Request, parts: Parts): SessionHandle {
     },
     async signOut() {
       await settled((done) => req.session.destroy(done));
-      const { name, options: { maxAge: _, ...options } } = sessionCookie(parts.config);
+      const { name, options } = sessionCookie(parts.config);
       req.res?.clearCookie(name, options);
     },
     get joining() {

@@ -53,10 +53,9 @@ export class DatabaseSessionStore extends Store {
     const { unusedMs, passingMs } = this.#lifetimes;
     const row = {
       sid: storedId(sid), data: JSON.stringify(data), person_id: data.personId ?? null,
-      expires_at: now + (data.personId === undefined ? passingMs : unusedMs), created_at: now,
+      expires_at: now + (data.personId === undefined ? passingMs : unusedMs),
     };
-    const { created_at: _, ...changed } = row;
-    settle(this.#knex('http_session').insert(row).onConflict('sid').merge(changed), done);
+    settle(this.#knex('http_session').insert({ ...row, created_at: now }).onConflict('sid').merge(row), done);
   }
   override touch(sid: string, data: SessionData, done?: () => void): void {
     if (data.personId === undefined) {

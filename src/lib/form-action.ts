@@ -43,10 +43,15 @@ export interface FormState {
   readonly pending: boolean;
 }
 
-/** The state of this page's form, with scripts or without. */
-export function useFormState(): FormState {
-  const result = useActionData() as FormResult | undefined;
+/**
+ * The state of this page's form, with scripts or without.
+ * @param form which one, where the page has several: what its field `form` holds
+ */
+export function useFormState(form?: string): FormState {
+  const reply = useActionData<FormResult>();
   const navigation = useNavigation();
+  const result = form === undefined || reply?.values['form'] === form ? reply : undefined;
+  const sent = form === undefined || navigation.formData?.get('form') === form;
   const named = Object.entries(result?.fields ?? {}).map(([name, message]) => ({ name, message }));
   return {
     error: (name) => result?.fields[name],
@@ -54,12 +59,17 @@ export function useFormState(): FormState {
     ticked: (name, before) => (result ? result.values[name] !== undefined : before),
     errors: result && named.length === 0 ? [{ message: result.message }] : named,
     attempt: result?.attempt,
-    pending: navigation.state !== 'idle' && navigation.formMethod === 'POST',
+    pending: sent && navigation.state !== 'idle' && navigation.formMethod === 'POST',
   };
 }
 
 /** A text of a form, trimmed; empty where it was not sent. */
 export function textOf(form: FormData, name: string): string {
+  return passwordOf(form, name).trim();
+}
+
+/** The same just as typed: spaces at the ends of a password are part of it. */
+export function passwordOf(form: FormData, name: string): string {
   const value = form.get(name);
-  return typeof value === 'string' ? value.trim() : '';
+  return typeof value === 'string' ? value : '';
 }

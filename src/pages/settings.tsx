@@ -9,7 +9,7 @@ import { SectionHeading } from '#src/components/section-heading.tsx';
 import { PasswordForm, ProfileForm } from '#src/features/account/account-forms.tsx';
 import { Notice } from '#src/features/account/notice.tsx';
 import { GithubPanel, SessionsPanel } from '#src/features/account/ways-in.tsx';
-import { formFault, textOf } from '#src/lib/form-fault.ts';
+import { formAction, passwordOf, textOf } from '#src/lib/form-action.ts';
 import { Head } from '#src/lib/head.tsx';
 import { call } from '#src/lib/transport.ts';
 import { accountChanged, accountQuery } from '#src/queries/account.ts';
@@ -33,7 +33,7 @@ export function makeLoader(client: QueryClient) {
 async function send(client: QueryClient, form: FormData): Promise<void> {
   switch (textOf(form, 'form')) {
     case 'password':
-      await call<typeof changePassword>(client, 'POST', '/api/account/password', { body: { current: textOf(form, 'current'), password: textOf(form, 'password') } });
+      await call<typeof changePassword>(client, 'POST', '/api/account/password', { body: { current: passwordOf(form, 'current'), password: passwordOf(form, 'password') } });
       break;
     case 'github':
       await call<typeof partGithub>(client, 'DELETE', '/api/account/github');
@@ -47,16 +47,11 @@ async function send(client: QueryClient, form: FormData): Promise<void> {
 }
 
 export function makeAction(client: QueryClient) {
-  return async ({ request }: ActionFunctionArgs) => {
-    const form = await request.formData();
-    try {
-      await send(client, form);
-    } catch (error) {
-      return formFault(error, form, ['current', 'password']);
-    }
+  return ({ request }: ActionFunctionArgs) => formAction(request, async (form) => {
+    await send(client, form);
     await accountChanged(client);
     return redirect(`/settings?done=${encodeURIComponent(textOf(form, 'form'))}`);
-  };
+  });
 }
 
 /** What the page was come back to with, from one of its forms or from GitHub. */

@@ -11,7 +11,7 @@ import { DemoAddresses } from '#src/features/account/demo-addresses.tsx';
 import { GithubButton } from '#src/features/account/github-button.tsx';
 import { Notice } from '#src/features/account/notice.tsx';
 import { SignInForm } from '#src/features/account/sign-in-form.tsx';
-import { formFault, textOf } from '#src/lib/form-fault.ts';
+import { formAction, passwordOf, textOf } from '#src/lib/form-action.ts';
 import { Head } from '#src/lib/head.tsx';
 import { call } from '#src/lib/transport.ts';
 import { viewerNow } from '#src/queries/account.ts';
@@ -24,16 +24,11 @@ export function makeLoader(client: QueryClient) {
 }
 
 export function makeAction(client: QueryClient) {
-  return async ({ request }: ActionFunctionArgs) => {
-    const form = await request.formData();
-    try {
-      await call<typeof signIn>(client, 'POST', '/api/session', { body: { email: textOf(form, 'email'), password: textOf(form, 'password') } });
-    } catch (error) {
-      return formFault(error, form, ['password']);
-    }
+  return ({ request }: ActionFunctionArgs) => formAction(request, async (form) => {
+    await call<typeof signIn>(client, 'POST', '/api/session', { body: { email: textOf(form, 'email'), password: passwordOf(form, 'password') } });
     // a whole new page: nothing read as somebody else, or as nobody, stays in memory
     return redirectDocument(nextOf(request));
-  };
+  });
 }
 
 export function Component() {

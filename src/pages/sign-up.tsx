@@ -7,7 +7,7 @@ import { PageHead } from '#src/components/page-head.tsx';
 import { Panel } from '#src/components/panel.tsx';
 import { GithubButton } from '#src/features/account/github-button.tsx';
 import { GithubSignUpForm, SignUpForm } from '#src/features/account/sign-up-form.tsx';
-import { formFault, textOf } from '#src/lib/form-fault.ts';
+import { formAction, passwordOf, textOf } from '#src/lib/form-action.ts';
 import { Head } from '#src/lib/head.tsx';
 import { call } from '#src/lib/transport.ts';
 import { joiningQuery, viewerNow } from '#src/queries/account.ts';
@@ -24,17 +24,12 @@ export function makeLoader(client: QueryClient) {
 }
 
 export function makeAction(client: QueryClient) {
-  return async ({ request }: ActionFunctionArgs) => {
-    const form = await request.formData();
+  return ({ request }: ActionFunctionArgs) => formAction(request, async (form) => {
     const who = { name: textOf(form, 'name'), handle: textOf(form, 'handle') };
-    try {
-      if (textOf(form, 'form') === 'github') await call<typeof signUpWithGithub>(client, 'POST', '/api/accounts/github', { body: who });
-      else await call<typeof signUp>(client, 'POST', '/api/accounts', { body: { ...who, email: textOf(form, 'email'), password: textOf(form, 'password') } });
-    } catch (error) {
-      return formFault(error, form, ['password']);
-    }
+    if (textOf(form, 'form') === 'github') await call<typeof signUpWithGithub>(client, 'POST', '/api/accounts/github', { body: who });
+    else await call<typeof signUp>(client, 'POST', '/api/accounts', { body: { ...who, email: textOf(form, 'email'), password: passwordOf(form, 'password') } });
     return redirectDocument(nextOf(request));
-  };
+  });
 }
 
 export function Component() {

@@ -84,7 +84,8 @@ describe('where one is signed in', () => {
     const here = await site.as({ handle: 'crake' });
     const there = await anotherBrowser('crake');
     const { sessions } = await here.ask(readAccount);
-    expect(sessions.map(({ current }) => current).toSorted()).toEqual([false, true]);
+    expect(sessions).toHaveLength(2);
+    expect(sessions.filter(({ current }) => current)).toHaveLength(1);
     expect((await there.ask(readAccount)).sessions.filter(({ current }) => current)).toHaveLength(1);
     expect(await here.ask(endOtherSessions)).toEqual({ ended: 1 });
     expect((await there.ask(readSession)).viewer).toBeNull();

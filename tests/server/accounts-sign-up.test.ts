@@ -7,7 +7,7 @@ import { startTestServer, type TestServer } from '#tests/support/test-server.ts'
 
 vi.mock('@node-rs/argon2', async (original) => {
   const real = await original<typeof import('@node-rs/argon2')>();
-  return { ...real, hash: vi.fn(real.hash), verify: vi.fn(real.verify) };
+  return { ...real, hash: vi.fn<typeof real.hash>(real.hash), verify: vi.fn<typeof real.verify>(real.verify) };
 });
 
 let site: TestServer;

@@ -53,7 +53,7 @@ test('work is done once, in the order it fell due, and written down as done', as
   await queue('note', { n: 1 }, new Date(clock.getTime() - 2));
   await start({ note: { run: ({ n }) => Promise.resolve(void done.push(n)) } }).idle();
   expect(done).toEqual([1, 2, 3]);
-  expect((await rows()).map(({ doneAt, claimedAt, attempts }) => [doneAt?.getTime(), claimedAt, attempts])).toEqual(Array(3).fill([clock.getTime(), null, 1]));
+  expect((await rows()).map(({ doneAt, claimedAt, attempts }) => [doneAt?.getTime(), claimedAt, attempts])).toEqual(done.map(() => [clock.getTime(), null, 1]));
   await start({ note: { run: ({ n }) => Promise.resolve(void done.push(n)) } }).idle();
   expect(done).toHaveLength(3);
 });
@@ -244,7 +244,8 @@ test('sessions that have run out are dropped, and no others', async () => {
   const people = await site.as({ handle: 'wren' });
   await people.get('/api/session');
   const em = site.orm.em.fork();
-  await em.insertMany(HttpSession, ['past', 'future'].map((sid, index) => ({ sid, data: '{}', expiresAt: new Date(clock.getTime() + (index === 0 ? -1 : 1)), createdAt: clock })));
+  for (const [sid, ms] of [['past', -1], ['future', 1]] as const) em.create(HttpSession, { sid, data: '{}', expiresAt: new Date(clock.getTime() + ms), createdAt: clock }, { persist: true });
+  await em.flush();
   const handlers = jobHandlers({ ...site.parts, now: () => clock });
   const prune = handlers['prune-sessions'];
   if (!prune) throw new Error('No job prunes sessions');

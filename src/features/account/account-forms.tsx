@@ -1,39 +1,39 @@
 import { Form } from 'react-router-dom';
 import type { AccountView } from '#contracts/session.ts';
+import { ErrorSummary } from '#src/components/error-summary.tsx';
 import { SubmitButton } from '#src/components/submit-button.tsx';
 import { TextArea } from '#src/components/text-area.tsx';
 import { TextField } from '#src/components/text-field.tsx';
-import { useFormState } from '#src/lib/form-fault.ts';
-import { FormErrors } from './form-errors.tsx';
+import { useFormState } from '#src/lib/form-action.ts';
 
 export function ProfileForm({ account }: { account: AccountView }) {
-  const { fault, pending } = useFormState('profile');
+  const form = useFormState('profile');
   return (
     <Form method="post" noValidate>
       <input type="hidden" name="form" value="profile" />
-      <FormErrors fault={fault} />
+      <ErrorSummary errors={form.errors} attempt={form.attempt} />
       <div className="grid gap-5">
-        <TextField name="name" label="Your name" hint="What readers see beside what you write." autoComplete="name" defaultValue={fault?.values['name'] ?? account.name} error={fault?.fields['name']} />
-        <TextArea name="about" label="About you" optional hint="What you restore, where you work, what you are good at." defaultValue={fault?.values['about'] ?? account.about} error={fault?.fields['about']} />
-        <div><SubmitButton pending={pending} pendingWord="Saving the profile">Save the profile</SubmitButton></div>
+        <TextField name="name" label="Your name" hint="What readers see beside what you write." autoComplete="name" defaultValue={form.value('name', account.name)} error={form.error('name')} />
+        <TextArea name="about" label="About you" optional hint="What you restore, where you work, what you are good at." defaultValue={form.value('about', account.about)} error={form.error('about')} />
+        <div><SubmitButton pending={form.pending} pendingWord="Saving the profile">Save the profile</SubmitButton></div>
       </div>
     </Form>
   );
 }
 
 export function PasswordForm({ account }: { account: AccountView }) {
-  const { fault, pending } = useFormState('password');
+  const form = useFormState('password');
   const word = account.password ? 'Change the password' : 'Set a password';
   return (
     <Form method="post" noValidate>
       <input type="hidden" name="form" value="password" />
       {/* tells a password keeper whose password this is */}
       <input type="text" name="username" autoComplete="username" defaultValue={account.email} hidden readOnly />
-      <FormErrors fault={fault} />
+      <ErrorSummary errors={form.errors} attempt={form.attempt} />
       <div className="grid gap-5">
-        {account.password && <TextField name="current" label="Current password" type="password" autoComplete="current-password" error={fault?.fields['current']} />}
-        <TextField name="password" label="New password" hint="Ten letters or more. Four or five plain words do well. You are signed out everywhere else." type="password" autoComplete="new-password" error={fault?.fields['password']} />
-        <div><SubmitButton pending={pending} pendingWord={account.password ? 'Changing the password' : 'Setting a password'}>{word}</SubmitButton></div>
+        {account.password && <TextField name="current" label="Current password" type="password" autoComplete="current-password" error={form.error('current')} />}
+        <TextField name="password" label="New password" hint="Ten letters or more. Four or five plain words do well. You are signed out everywhere else." type="password" autoComplete="new-password" error={form.error('password')} />
+        <div><SubmitButton pending={form.pending} pendingWord={account.password ? 'Changing the password' : 'Setting a password'}>{word}</SubmitButton></div>
       </div>
     </Form>
   );

@@ -1,18 +1,18 @@
 import { Form } from 'react-router-dom';
+import { ErrorSummary } from '#src/components/error-summary.tsx';
 import { SubmitButton } from '#src/components/submit-button.tsx';
 import { TextField } from '#src/components/text-field.tsx';
-import { useFormState } from '#src/lib/form-fault.ts';
-import { FormErrors } from './form-errors.tsx';
+import { useFormState } from '#src/lib/form-action.ts';
 
 export function SignInForm() {
-  const { fault, pending } = useFormState();
+  const form = useFormState();
   return (
     <Form method="post" noValidate>
-      <FormErrors fault={fault} />
+      <ErrorSummary errors={form.errors} attempt={form.attempt} />
       <div className="grid gap-5">
-        <TextField name="email" label="E-mail address" type="email" autoComplete="username" defaultValue={fault?.values['email']} error={fault?.fields['email']} />
-        <TextField name="password" label="Password" type="password" autoComplete="current-password" error={fault?.fields['password']} />
-        <div><SubmitButton pending={pending} pendingWord="Signing in">Sign in</SubmitButton></div>
+        <TextField name="email" label="E-mail address" type="email" autoComplete="username" defaultValue={form.value('email')} error={form.error('email')} />
+        <TextField name="password" label="Password" type="password" autoComplete="current-password" error={form.error('password')} />
+        <div><SubmitButton pending={form.pending} pendingWord="Signing in">Sign in</SubmitButton></div>
       </div>
     </Form>
   );

@@ -2,13 +2,13 @@ import { Form } from 'react-router-dom';
 import type { AccountView } from '#contracts/session.ts';
 import { formatDay } from '#domain/format.ts';
 import { DataTable } from '#src/components/data-table.tsx';
+import { ErrorSummary } from '#src/components/error-summary.tsx';
 import { SubmitButton } from '#src/components/submit-button.tsx';
-import { useFormState } from '#src/lib/form-fault.ts';
-import { FormErrors } from './form-errors.tsx';
+import { useFormState } from '#src/lib/form-action.ts';
 import { GithubButton } from './github-button.tsx';
 
 export function GithubPanel({ account }: { account: AccountView }) {
-  const { fault, pending } = useFormState('github');
+  const form = useFormState('github');
   if (!account.github) {
     return (
       <>
@@ -20,18 +20,18 @@ export function GithubPanel({ account }: { account: AccountView }) {
   return (
     <Form method="post">
       <input type="hidden" name="form" value="github" />
-      <FormErrors fault={fault} />
+      <ErrorSummary errors={form.errors} attempt={form.attempt} />
       <p className="mb-4 text-control">GitHub is joined: you can sign in with it.</p>
-      <SubmitButton kind="quiet" pending={pending} pendingWord="Parting GitHub">Part GitHub</SubmitButton>
+      <SubmitButton kind="quiet" pending={form.pending} pendingWord="Parting GitHub">Part GitHub</SubmitButton>
     </Form>
   );
 }
 
 export function SessionsPanel({ sessions }: { sessions: AccountView['sessions'] }) {
-  const { fault, pending } = useFormState('sessions');
+  const form = useFormState('sessions');
   return (
     <>
-      <FormErrors fault={fault} />
+      <ErrorSummary errors={form.errors} attempt={form.attempt} />
       <DataTable
         caption="Where you are signed in" captionHidden
         columns={[{ key: 'since', label: 'Signed in on' }, { key: 'where', label: 'Where' }]}
@@ -40,7 +40,7 @@ export function SessionsPanel({ sessions }: { sessions: AccountView['sessions'] 
       {sessions.length > 1 && (
         <Form method="post" className="mt-4">
           <input type="hidden" name="form" value="sessions" />
-          <SubmitButton kind="quiet" pending={pending} pendingWord="Signing out everywhere else">Sign out everywhere else</SubmitButton>
+          <SubmitButton kind="quiet" pending={form.pending} pendingWord="Signing out everywhere else">Sign out everywhere else</SubmitButton>
         </Form>
       )}
     </>
