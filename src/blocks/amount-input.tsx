@@ -31,11 +31,11 @@ export function AmountInput<L extends AmountLine>({ block, line, onLine, onEnter
       <input
         {...control} type="text" inputMode="decimal" autoComplete="off" aria-label={`Amount of ${of}`} value={line.amount}
         onChange={(event) => onLine({ amount: event.target.value })} onBlur={leave} onKeyDown={onKeyDown}
-        className={`${controlClass} ${tall} num flex-none ${named ? 'w-28' : 'w-18'}`}
+        className={`${controlClass} ${tall} num flex-none ${named ? 'w-28!' : 'w-18!'}`}
       />
       <select
         id={fieldId(`${block}.${line.id}.unit`)} aria-label={`Unit of ${of}`} value={line.unit} onChange={(event) => onLine({ unit: event.target.value })}
-        className={`${controlClass} ${tall} select-control w-auto max-w-32 pr-8 ${named ? 'opacity-50' : ''}`}
+        className={`${controlClass} ${tall} select-control w-auto! max-w-32 pr-8 ${named ? 'opacity-50' : ''}`}
       >
         {unitChoices(material, context.measures, line.unit).map((option) => <option key={option.value} value={option.value}>{option.label}</option>)}
       </select>

@@ -31,7 +31,7 @@ export interface BlockFrameProps {
 }
 
 export const textButton = 'min-h-6 text-scribe underline underline-offset-[0.18em] hover:decoration-2 max-wide:min-h-11';
-const handleButton = 'min-h-8 min-w-8 rounded-edge px-2 text-small font-semibold text-ink-soft hover:bg-hover hover:text-ink aria-disabled:opacity-40 max-wide:min-h-11 max-wide:min-w-11';
+const handleButton = 'min-h-8 min-w-8 rounded-edge px-2 text-small text-ink-soft hover:bg-hover hover:text-ink aria-disabled:opacity-40 max-wide:min-h-11 max-wide:min-w-11';
 
 function Handles() {
   const handle = useContext(HandleContext);

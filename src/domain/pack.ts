@@ -39,7 +39,9 @@ export function packWords(packs: Fraction, { name }: Pack, size: string): string
   if (share && whole === 0n) return `${share.alone} ${one(name)}`;
   if (!share && packs.lt(1)) return `${shownFigure(packs)} of ${one(name)}`;
   const figure = share ? `${whole} and ${share.after}` : shownFigure(packs);
-  return `${figure} ${packs.equals(1) ? name : pluralOf(name)} of ${size}`;
+  // a length, a sheet, a pair: one piece needs no size
+  const of = size === '1' ? '' : ` of ${size}`;
+  return `${figure} ${packs.equals(1) ? name : pluralOf(name)}${of}`;
 }
 
 function comesOutNeat(packs: Fraction, dimension: Dimension): boolean {

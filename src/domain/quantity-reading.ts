@@ -82,7 +82,8 @@ function inOwnDimension(terms: Terms, context: ReadingContext): InOwnDimension |
 
 function shownBack(terms: Terms, { amount, about }: InOwnDimension, context: ReadingContext): string {
   const own = wordsForQuantity(exactText(amount), context.dimension, { measures: 'imperial' });
-  if ((terms.plain && terms.dimension === context.dimension) || own === terms.words) return terms.words;
+  const saysItAll = own === terms.words || terms.words.endsWith(` of ${own}`) || terms.words.startsWith(`${own} `);
+  if ((terms.plain && terms.dimension === context.dimension) || saysItAll) return terms.words;
   return `${terms.words}, ${about ? 'about ' : ''}${own}`;
 }
 

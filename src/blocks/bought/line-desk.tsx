@@ -1,5 +1,6 @@
 import { useState } from 'react';
 import { formatMoney } from '#domain/format.ts';
+import { readMoney } from '#domain/money.ts';
 import { costCategories, costCategoryWords, lineGoesList, lineGoesWords } from '#contracts/words.ts';
 import { AmountInput, useAmountWords, useShownBack } from '../amount-input.tsx';
 import { useBench } from '../bench.ts';
@@ -82,7 +83,9 @@ export function BoughtLineDesk({ block, line, lines, currency, door, foreign }: 
   const of = line.name.trim() || 'this line';
   const stocked = line.goes === 'shelf' || line.goes === 'shed';
   const left = reckonings.get(`${block}:${line.id}`)?.left;
-  const after = [shownBack, stocked && left ? `then ${inWords(left)} there` : '', `${formatMoney(door, context.currency)} to the door${foreign ? `, in ${context.currency}` : ''}`].filter(Boolean);
+  const own = readMoney(line.money, currency);
+  const differs = foreign || !own.ok || own.value.minor !== door;
+  const after = [shownBack, stocked && left ? `then ${inWords(left)} there` : '', differs ? `${formatMoney(door, context.currency)} to the door` : ''].filter(Boolean);
   return (
     <li className="m-0! border-b border-rule py-2.5">
       <div className={`grid grid-cols-[minmax(0,1fr)_7rem] items-start gap-x-3.5 gap-y-1.5 ${stocked ? 'wide:grid-cols-[minmax(0,1fr)_auto_7rem]' : ''}`}>

@@ -52,7 +52,7 @@ function PhotosDesk({ id, data, onChange }: BlockDeskProps<PhotosData>) {
   );
   const count = data.photos.length;
   return (
-    <BlockFrame kind={null} word="Photos" note={count > 0 ? plural(count, '1 photo', `${count} photos`) : undefined}>
+    <BlockFrame kind={null} word="Photos" note={count > 0 ? plural(count, 'photo', 'photos') : undefined}>
       {(count > 0 || uploads.length > 0) && (
         <ol className="mt-2! mb-0! list-none! p-0!">
           {data.photos.map((photo, index) => (
@@ -81,5 +81,5 @@ function PhotosDesk({ id, data, onChange }: BlockDeskProps<PhotosData>) {
 
 export const photosDesk = deskBlock<PhotosData>({
   word: 'Photos', kind: () => null, version: photos.version, Desk: PhotosDesk, blank: () => ({ photos: [] }),
-  words: (data) => `${plural(data.photos.length, '1 photo', `${data.photos.length} photos`)}${data.photos.map((photo) => (photo.caption ? `; ${photo.caption}` : '')).join('')}`,
+  words: (data) => `${plural(data.photos.length, 'photo', 'photos')}${data.photos.map((photo) => (photo.caption ? `; ${photo.caption}` : '')).join('')}`,
 });

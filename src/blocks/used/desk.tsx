@@ -5,6 +5,7 @@ import { typedAmount } from '../amount-line.ts';
 import { useBench } from '../bench.ts';
 import { BlockFrame, BlockSum, textButton } from '../block-frame.tsx';
 import { deskBlock, type BlockDeskProps } from '../desk-block.ts';
+import { shortTitle } from '../short-title.ts';
 import { newId, useLines } from '../use-lines.ts';
 import { UsedLineDesk } from './line-desk.tsx';
 import { blankUsedLine, used, type UsedData, type UsedLine } from './used.ts';
@@ -37,7 +38,7 @@ function UsedDesk(props: BlockDeskProps<UsedData>) {
 
   return (
     <BlockFrame
-      kind="used" word="Used" note={<>off {bench.buildTitle}’s shelf</>}
+      kind="used" word="Used" note={`off ${shortTitle(bench.buildTitle)}’s shelf`}
       end={<button type="button" onClick={() => void sameAsLastTime()} aria-disabled={asking} className={textButton}>Same as last time</button>}
     >
       <ol className="list-none! p-0!">

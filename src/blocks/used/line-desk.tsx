@@ -59,7 +59,7 @@ export function UsedLineDesk({ block, line, lines }: UsedLineDeskProps) {
         </div>
         <div className="[grid-area:amount]"><AmountInput block={block} line={line} onLine={change} onEnter={() => lines.goOn(line.id)} /></div>
         <p className={`text-small [grid-area:left] max-wide:text-right ${left.short ? 'font-semibold text-lead' : 'text-ink-soft'}`}>{left.words}</p>
-        <p className="text-right [grid-area:money]">{value === undefined ? '' : formatMoney(value, bench.context.currency)}</p>
+        <p className="text-right [grid-area:money]">{value === undefined || (value === 0 && left.short) ? '' : formatMoney(value, bench.context.currency)}</p>
       </div>
       {newName !== null && <NewMaterial key={newName} at={path('material')} name={newName} onAdded={pick} onLeave={() => setNewName(null)} />}
       <div className="mt-1 flex flex-wrap items-center gap-x-3.5 gap-y-1">

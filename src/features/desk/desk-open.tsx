@@ -1,4 +1,4 @@
-import { useCallback, useDeferredValue, useMemo, useState } from 'react';
+import { useCallback, useMemo, useState } from 'react';
 import { useNavigate } from 'react-router-dom';
 import type { DeskView } from '#contracts/entries.ts';
 import { ErrorSummary } from '#src/components/error-summary.tsx';
@@ -54,8 +54,7 @@ export function DeskOpen({ view, start, at, kept, onReopen }: DeskOpenProps) {
 
   const { materials, byId, addMaterial } = useMaterials(view);
   const ledger = useMemo(() => deskLedger(view), [view]);
-  const settledText = useDeferredValue(document);
-  const reckoning = useMemo(() => ledger.reckon(settledText, byId), [ledger, settledText, byId]);
+  const reckoning = useMemo(() => ledger.reckon(document, byId), [ledger, document, byId]);
   const signing = useSignOff({ at, kept, saver, calls, reckonNow: () => ledger.reckon(current.current, byId), photosGoingUp: () => uploads.state().going !== null });
   const { touch, fault, shown } = useFaults(reckoning, signing.attempt > 0, signing.serverFaults);
   const bench = useBenchOf({ view, document, reckoning, materials, byId, addMaterial, pictures, fault, touch, say: setSaid, tookOut });

@@ -25,7 +25,7 @@ export function EntryHead({ view, document, onHead }: EntryHeadProps) {
         <DayField document={document} onHead={onHead} />
         <Field name="stage" label="Stage" error={bench.fault('stage')}>
           {(control) => (
-            <select {...control} value={document.stage ?? ''} onChange={(event) => onHead({ stage: event.target.value === '' ? null : Number(event.target.value) })} className={`${compact} select-control w-auto min-w-32 pr-8`}>
+            <select {...control} value={document.stage ?? ''} onChange={(event) => onHead({ stage: event.target.value === '' ? null : Number(event.target.value) })} className={`${compact} select-control w-auto! min-w-32 max-w-48 pr-8`}>
               <option value="">No stage</option>
               {view.stages.map((stage) => <option key={stage.id} value={stage.id}>{stage.title}</option>)}
             </select>
@@ -53,11 +53,11 @@ function DayField({ document, onHead }: Omit<EntryHeadProps, 'view'>) {
     <div>
       <div className="flex items-start gap-1.5">
         <Field name="day" label={shown ? 'From' : 'Day of work'} error={bench.fault('day')}>
-          {(control) => <input {...control} type="date" required value={document.day} onChange={(event) => event.target.value !== '' && onHead({ day: event.target.value })} className={`${compact} w-auto`} />}
+          {(control) => <input {...control} type="date" required value={document.day} onChange={(event) => event.target.value !== '' && onHead({ day: event.target.value })} className={`${compact} w-auto!`} />}
         </Field>
         {shown && (
           <Field name="dayTo" label="To" error={bench.fault('dayTo')}>
-            {(control) => <input {...control} type="date" min={document.day} value={document.dayTo ?? ''} onChange={(event) => onHead({ dayTo: event.target.value || null })} onBlur={() => bench.touch('dayTo')} className={`${compact} w-auto`} />}
+            {(control) => <input {...control} type="date" min={document.day} value={document.dayTo ?? ''} onChange={(event) => onHead({ dayTo: event.target.value || null })} onBlur={() => bench.touch('dayTo')} className={`${compact} w-auto!`} />}
           </Field>
         )}
       </div>

@@ -2,6 +2,7 @@ import type { DeskView } from '#contracts/entries.ts';
 import { Slip, type SlipLine } from '#src/components/slip.tsx';
 import { exactFrom } from '#domain/quantity.ts';
 import { wordsForQuantity } from '#domain/quantity-words.ts';
+import { shortTitle } from '#src/blocks/short-title.ts';
 import type { MaterialFacts } from '#src/blocks/pure.ts';
 import type { DeskReckoning, ShelfAfter } from './desk-ledger.ts';
 
@@ -35,5 +36,5 @@ export function OnTheShelf({ view, reckoning, materials }: { view: DeskView; rec
     return material ? [lineOf(row, material, view)] : [];
   });
   if (lines.length === 0) return null;
-  return <Slip kind="bought" word="On the shelf" note={view.build.title} lines={lines} />;
+  return <Slip kind="bought" word="On the shelf" note={shortTitle(view.build.title)} lines={lines} />;
 }

@@ -40,7 +40,7 @@ const tableTools: { label: string; act: (editor: Editor) => void }[] = [
   { label: 'Take the column out', act: (editor) => editor.chain().focus().deleteColumn().run() },
 ];
 
-const toolClass = 'min-h-8 min-w-8 rounded-edge px-2 text-small text-ink-soft hover:bg-hover hover:text-ink aria-pressed:bg-scribe-wash aria-pressed:font-semibold aria-pressed:text-scribe-text max-wide:min-h-11 max-wide:min-w-11';
+const toolClass = 'flex-none min-h-8 min-w-8 rounded-edge px-2 text-small text-ink-soft hover:bg-hover hover:text-ink aria-pressed:bg-scribe-wash aria-pressed:font-semibold aria-pressed:text-scribe-text max-wide:min-h-11 max-wide:min-w-11';
 
 /** A few tools for prose. One stop of the Tab key; arrows go along it, as the ARIA pattern "toolbar" asks. */
 export function ProseToolbar({ editor }: { editor: Editor }) {
@@ -61,7 +61,7 @@ export function ProseToolbar({ editor }: { editor: Editor }) {
   const extra = inTable ? tableTools : [];
   return (
     <div className="desk-toolbar sticky top-0 z-10 -mx-2 mb-3 border-b border-rule bg-sheet px-1 py-1">
-      <div ref={bar} role="toolbar" aria-label="Words" aria-controls="field-content" tabIndex={-1} onKeyDown={along} className="flex flex-wrap items-center gap-x-0.5">
+      <div ref={bar} role="toolbar" aria-label="Words" aria-controls="field-content" tabIndex={-1} onKeyDown={along} className="flex items-center gap-x-0.5 overflow-x-auto wide:flex-wrap">
         {tools.map((tool, index) => (
           <button key={tool.label} type="button" aria-label={tool.label} aria-pressed={tool.active} tabIndex={index === at ? 0 : -1} onFocus={() => setAt(index)} onMouseDown={(event) => event.preventDefault()} onClick={tool.act} className={toolClass}>
             {tool.face}

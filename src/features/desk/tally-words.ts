@@ -33,7 +33,7 @@ export function tallyWords(reckoning: DeskReckoning, currency: string): TallyWor
   const name = one && oneOfWork(one.unit, one.kind);
   const takes = one && name ? [{ label: `One ${name} takes`, value: [money(one.money), one.minutes > 0 ? formatMinutes(one.minutes) : ''].filter(Boolean).join(', ') }] : [];
   const bought = figures.bought > 0 ? [{ label: 'Bought, to the door', value: money(figures.bought) }] : [];
-  const short = figures.linesShort > 0 ? [{ label: 'Not bought yet', value: plural(figures.linesShort, 'on 1 line', `on ${figures.linesShort} lines`) }] : [];
+  const short = figures.linesShort > 0 ? [{ label: 'Not bought yet', value: plural(figures.linesShort, 'line', 'lines') }] : [];
   return {
     figure: money(figures.day),
     words: `this day: ${parts.join(', ')}`,

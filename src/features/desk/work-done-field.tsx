@@ -30,18 +30,18 @@ export function WorkDoneField({ work, kinds, onWork }: WorkDoneFieldProps) {
         <input
           id={ids.amount} aria-label="How much work" aria-invalid={faults.amount ? true : undefined} aria-describedby={faults.amount ? `${ids.amount}-error` : undefined}
           inputMode="decimal" autoComplete="off" value={now.amount} maxLength={20} placeholder="17" onChange={(event) => change({ amount: event.target.value })} onBlur={() => bench.touch('work.amount')}
-          className={`${control} num w-16`}
+          className={`${control} num w-16!`}
         />
         <select
           id={fieldId('work.unit')} aria-label="Unit of the work" value={now.unit} onChange={(event) => change({ unit: workUnits.find((unit) => unit === event.target.value) ?? 'piece' })}
-          className={`${control} select-control w-auto pr-8`}
+          className={`${control} select-control w-auto! pr-8`}
         >
           {workUnits.map((unit) => <option key={unit} value={unit}>{workUnitWords[unit].menu}</option>)}
         </select>
         <input
           id={ids.kind} aria-label="Kind of work, one of it" aria-invalid={faults.kind ? true : undefined} aria-describedby={faults.kind ? `${ids.kind}-error` : undefined}
           list="work-kinds" autoComplete="off" value={now.kind} maxLength={60} placeholder="steamed rib" onChange={(event) => change({ kind: event.target.value })} onBlur={() => bench.touch('work.kind')}
-          className={`${control} w-40`}
+          className={`${control} w-40!`}
         />
         <datalist id="work-kinds">{kinds.map(({ one }) => <option key={one} value={one}>{one}</option>)}</datalist>
       </div>
