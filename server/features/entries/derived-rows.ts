@@ -49,7 +49,7 @@ function lotsOf({ id, sequence }: Source, derived: EntryDerivation): DerivedMove
 
 /** An entry's movements on the build's shelf and on the shed, in the place each has in the document. */
 export function movementsOf(source: Source, derived: EntryDerivation): DerivedMovement[] {
-  return [...lotsOf(source, derived), ...usesOf(source, derived)].sort((a, b) => a.place - b.place);
+  return [...lotsOf(source, derived), ...usesOf(source, derived)].toSorted((a, b) => a.place - b.place);
 }
 
 export interface DerivedCostRow {

@@ -1,5 +1,4 @@
-import type { EntryDerivation } from '#src/blocks/pure.ts';
-import { deriveEntry } from '#src/blocks/pure.ts';
+import type { deriveEntry, EntryDerivation } from '#src/blocks/pure.ts';
 import type { Build } from '#server/entities/index.ts';
 import { materialFacts } from '#server/features/shelf/materials.service.ts';
 import type { Em } from '#server/http/context.ts';

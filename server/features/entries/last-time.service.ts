@@ -10,7 +10,7 @@ const entriesLookedAt = 40;
 
 function lastOf<T extends 'used' | 'time'>(document: EntryDocument, type: T): BlockData<T>['lines'] {
   const node = document.content.findLast((one) => one.type === type && one.attrs.data.lines.length > 0);
-  return node?.type === type ? node.attrs.data.lines as BlockData<T>['lines'] : [];
+  return node?.type === type ? node.attrs.data.lines : [];
 }
 
 function usedLines(document: EntryDocument): LastTime['used'] {
