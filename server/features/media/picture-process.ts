@@ -29,6 +29,7 @@ async function answerTo(order: PictureOrder): Promise<PictureAnswer> {
 process.on('message', (order: PictureOrder) => {
   void answerTo(order).then((answer) => process.send?.(answer));
 });
-process.on('disconnect', () => process.exit(0));
+// The site is gone. An ordinary exit would wait for the picture under way.
+process.on('disconnect', () => process.kill(process.pid, 'SIGKILL'));
 // An interrupt from the keyboard reaches the whole group; the site decides when this ends.
 process.on('SIGINT', () => undefined);

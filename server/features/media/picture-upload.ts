@@ -51,7 +51,8 @@ function intoQuarantine(parts: Parts): RequestHandler {
   return (req, res, next) => {
     // whatever becomes of the request, nothing of it stays in quarantine
     res.on('close', () => {
-      if (req.file) void rm(req.file.path, { force: true });
+      // of a file that was broken off multer keeps the name and no path, and has removed it
+      if (req.file?.path) rm(req.file.path, { force: true }).catch((error: unknown) => req.log.error({ err: error }, 'an upload stays in quarantine'));
     });
     single(req, res, (error: unknown) => next(error === undefined ? undefined : translated(error)));
   };

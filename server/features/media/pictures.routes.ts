@@ -40,10 +40,12 @@ function sendPictureFile(parts: Parts): RequestHandler {
     const { em, viewer } = await contextOf(req, parts);
     const forWhom = await mayServePicture(em, viewer, key);
     if (forWhom === 'nobody') throw nothingHere();
-    res.set(headersFor(file, forWhom));
-    res.sendFile(`${placeOf(key)}/${file}`, { root, dotfiles: 'deny', cacheControl: false }, (error?: Error & { status?: number }) => {
+    // the headers go out with the file only: an answer that there is none must not be kept for a year
+    const sending = { root, dotfiles: 'deny', cacheControl: false, headers: headersFor(file, forWhom) } as const;
+    res.sendFile(`${placeOf(key)}/${file}`, sending, (error?: Error & { status?: number }) => {
       if (!error || res.headersSent) return;
-      next(error.status === 404 ? nothingHere() : error);
+      if (error.status === 416) res.status(416).end();
+      else next(error.status === 404 ? nothingHere() : error);
     });
   };
 }

@@ -2,7 +2,7 @@ import { copyFile, rm } from 'node:fs/promises';
 import { basename, join } from 'node:path';
 import { AppError } from '#contracts/errors.ts';
 import type { DeskPicture, PictureView } from '#contracts/pictures.ts';
-import { Build, Entry, Person, Picture, PublishedPicture } from '#server/entities/index.ts';
+import { Person, Picture, PublishedPicture, type Build, type Entry } from '#server/entities/index.ts';
 import { mayWrite, requireWritableBuild } from '#server/features/builds/build-access.service.ts';
 import type { Caller, Em, Parts, Viewer } from '#server/http/context.ts';
 import { pictureMaker } from './picture-maker.ts';
