@@ -1,6 +1,6 @@
 import { z } from 'zod';
 import Fraction from 'fraction.js';
-import { isCurrency } from '#domain/currency.ts';
+import { exponentOf, isCurrency } from '#domain/currency.ts';
 import { formatDay, formatMoney } from '#domain/format.ts';
 import { readMoney } from '#domain/money.ts';
 import { exactText } from '#domain/quantity.ts';
@@ -12,7 +12,7 @@ import { amountFaults, amountLineShape, materialOf, readLine, typedAmount } from
 import { pureBlock, type BlockContext, type BlockDerivation, type BlockFault, type ProjectionContext } from '../block.ts';
 
 const money = z.string().max(40);
-const plainDay = z.string().regex(/^\d{4}-\d{2}-\d{2}$/);
+const plainDay = z.iso.date('Give a day, such as 2026-11-14.');
 export const boughtLine = z.object({
   ...amountLineShape,
   /** What the line came to on the paper, in the receipt's currency. */
@@ -70,6 +70,14 @@ function rateOf(data: BoughtData, currency: string, into: string, faults: BlockF
   return new Fraction(data.rate.trim());
 }
 
+// A receipt goes up to this many minor units of the build's currency, so that thousands of them still add up exactly.
+const mostConverted = 1e14;
+
+/** Whether the whole receipt, converted, is still a sum of money; a slip of the finger in a rate is not. */
+function fitsConverted(due: number, rate: Fraction, currency: string, into: string): boolean {
+  return rate.mul(due).mul(new Fraction(10).pow(exponentOf(into) - exponentOf(currency))).lte(mostConverted);
+}
+
 interface BoughtReading { currency: string; rate: Fraction; discount: number; delivery: number; tax: number; paperTotal: number | null; own: number[]; door: DoorCosts; faults: BlockFault[] }
 
 /** A receipt's figures from what was typed, with every fault. The desk and the ledger both read it here. */
@@ -85,7 +93,13 @@ export function readBought(data: BoughtData, context: BlockContext): BoughtReadi
   const lineSum = own.reduce((sum, value) => sum + value, 0);
   if (discount > lineSum && data.lines.length > 0) faults.push({ path: 'discount', problem: 'The discount is more than the lines come to.' });
   const rate = rateOf(data, currency, context.currency, faults);
-  const door = costsToTheDoor({ currency, into: context.currency, rate, lines: data.lines.map((line, index) => ({ key: line.id, value: own[index] ?? 0 })), discount: Math.min(discount, lineSum), delivery, tax, paperTotal });
+  const fits = currency === context.currency || fitsConverted(Math.max(lineSum + delivery + tax, paperTotal ?? 0), rate, currency, context.currency);
+  if (!fits) faults.push({ path: 'rate', problem: `That comes to more ${context.currency} than a receipt can hold: look at the rate again.` });
+  const priced = (minor: number) => (fits ? minor : 0);
+  const door = costsToTheDoor({
+    currency, into: context.currency, rate, lines: data.lines.map((line, index) => ({ key: line.id, value: priced(own[index] ?? 0) })),
+    discount: priced(Math.min(discount, lineSum)), delivery: priced(delivery), tax: priced(tax), paperTotal: paperTotal === null ? null : priced(paperTotal),
+  });
   return { currency, rate, discount: Math.min(discount, lineSum), delivery, tax, paperTotal, own, door, faults };
 }
 
@@ -150,7 +164,7 @@ function boughtSlip(_id: string, data: BoughtData, context: ProjectionContext): 
 
 export const bought = pureBlock({
   type: 'bought', version: 1, schema: boughtData, stepsUp: {},
-  read: (data: BoughtData, kept, context) => ({ ...data, lines: data.lines.map((line) => stocked(line) ? readLine(line, kept?.lines.find((old) => old.id === line.id), context) : line) }),
+  read: (data: BoughtData, kept, context) => ({ ...data, lines: data.lines.map((line) => stocked(line) ? readLine(line, kept?.lines.find((old) => old.id === line.id), context) : { ...line, exact: null, read: '' }) }),
   derive: deriveBought,
   slip: boughtSlip,
 });
