@@ -45,6 +45,9 @@ const longestText = 60;
 // A million cubic metres of anything is a slip of the finger, and the figures stay of a size.
 const most = new Fraction(10n ** 12n);
 
+// An exact amount is kept as text of so many letters; 1/99999999999999999999 of a tin is a slip too.
+const longestExact = 80;
+
 const keptBy: Readonly<Record<Dimension, string>> = {
   volume: 'volume',
   mass: 'weight',
@@ -96,6 +99,7 @@ function readPlain(typed: string, context: ReadingContext): Reading<QuantityRead
   if (!own) return unread(otherDimension(terms, context));
   if (own.amount.n === 0n && !context.allowNought) return unread('An amount is more than nought: leave the line out if there was none');
   if (own.amount.gt(most)) return unread('That is more than one line can hold');
+  if (exactText(own.amount).length > longestExact) return unread('That is finer than one line can hold: write a rounder figure');
   const note = terms.note ?? (own.about ? 'By a ratio of this material that is marked about' : undefined);
   const value = { quantity: quantity(dimension, own.amount), shownBack: shownBack(terms, own, context) };
   return read(note === undefined ? value : { ...value, note });
