@@ -1,5 +1,6 @@
 import type { KeyboardEvent } from 'react';
 import { controlClass, fieldId } from '#src/components/field.tsx';
+import { pluralOf } from '#domain/pack.ts';
 import { wordsForQuantity } from '#domain/quantity-words.ts';
 import { materialOf, readAmount, typedAmount, type AmountLine } from './amount-line.ts';
 import { useBench } from './bench.ts';
@@ -27,15 +28,15 @@ export function AmountInput<L extends AmountLine>({ block, line, onLine, onEnter
     onEnter();
   };
   return (
-    <div role="group" aria-label={`Amount of ${of}`} className="flex gap-1">
+    <div role="group" aria-label={`Amount of ${of}`} className="flex gap-1 wide:w-48">
       <input
         {...control} type="text" inputMode="decimal" autoComplete="off" aria-label={`Amount of ${of}`} value={line.amount}
         onChange={(event) => onLine({ amount: event.target.value })} onBlur={leave} onKeyDown={onKeyDown}
-        className={`${controlClass} ${tall} num flex-none ${named ? 'w-28!' : 'w-18!'}`}
+        className={`${controlClass} ${tall} num ${named ? 'w-28!' : 'w-18!'} wide:w-auto! wide:min-w-0 wide:flex-1`}
       />
       <select
         id={fieldId(`${block}.${line.id}.unit`)} aria-label={`Unit of ${of}`} value={line.unit} onChange={(event) => onLine({ unit: event.target.value })}
-        className={`${controlClass} ${tall} select-control w-auto! max-w-32 pr-8 ${named ? 'opacity-50' : ''}`}
+        className={`${controlClass} ${tall} select-control w-auto! max-w-32 flex-none pr-8 pl-2.5! wide:w-28! ${named ? 'opacity-50' : ''}`}
       >
         {unitChoices(material, context.measures, line.unit).map((option) => <option key={option.value} value={option.value}>{option.label}</option>)}
       </select>
@@ -49,7 +50,8 @@ export function useShownBack(line: AmountLine): string | null {
   if (line.amount.trim() === '' || !materialOf(line, context)) return null;
   const reading = readAmount(line, context);
   if (!reading.ok) return null;
-  const same = reading.value.shownBack === typedAmount(line) || reading.value.shownBack === line.amount.trim();
+  const amount = line.amount.trim();
+  const same = [typedAmount(line), amount, `${amount} ${pluralOf(line.unit)}`].includes(reading.value.shownBack);
   return [same ? '' : reading.value.shownBack, reading.value.note ?? ''].filter(Boolean).join('; ') || null;
 }
 

@@ -6,7 +6,8 @@ import { PhotoGroup } from '#src/components/photo-group.tsx';
 import type { PictureData } from '#src/components/picture.tsx';
 import { Prose } from '#src/components/prose.tsx';
 import { Slip } from '#src/components/slip.tsx';
-import type { TallyRow } from '#src/components/tally-margin.tsx';
+import type { TallyPart, TallyRun } from '#src/components/tally-margin.tsx';
+import { runsOf } from './margin-runs.ts';
 import { ProseView } from './prose-view.tsx';
 
 type BodyNode = RowView['body'][number];
@@ -39,15 +40,27 @@ function bodyViews(body: readonly BodyNode[], firstPhotos: string | null): React
   return views;
 }
 
-/** A projected entry as rows of the tally margin: words and pictures, with the slips beside them. */
-export function readerRows(rows: readonly RowView[], beside: ReactNode): TallyRow[] {
+/** The day's tally, guessed in pixels. */
+const tallyHeight = 300;
+
+/** A projected entry as runs of the tally margin: words and pictures, with the slips beside them. */
+export function readerRuns(rows: readonly RowView[], tally: ReactNode): TallyRun[] {
   const firstPhotos = rows.flatMap((row) => row.body).find((node) => node.type === 'photos');
   const firstId = firstPhotos?.type === 'photos' ? firstPhotos.id : null;
-  return rows.map((row, index) => ({
+  const parts = rows.map((row, index) => ({
     key: row.body[0] ? keyOf(row.body[0]) : row.slips[0]?.id ?? String(index),
     prose: bodyViews(row.body, firstId),
-    slips: [...(index === 0 && beside ? [beside] : []), ...row.slips.map(({ id, slip }) => <Slip key={id} {...slip} />)],
+    slips: [...(index === 0 ? [tally] : []), ...row.slips.map(({ id, slip }) => <Slip key={id} {...slip} />)],
   }));
+  const runs: { key: string; parts: TallyPart[] }[] = [];
+  runsOf(rows, tallyHeight).forEach((run, index) => {
+    const part = parts[index];
+    if (!part) return;
+    const open = runs[run];
+    if (open) open.parts.push(part);
+    else runs.push({ key: part.key, parts: [part] });
+  });
+  return runs.length > 0 ? runs : [{ key: 'tally', parts: [{ key: 'tally', prose: null, slips: [tally] }] }];
 }
 
 function keyOf(node: BodyNode): string {

@@ -46,29 +46,27 @@ function What({ block, line, lines }: Pick<BoughtLineDeskProps, 'block' | 'line'
   );
 }
 
+const arrivals = [{ value: 'with', label: 'Came with it' }, { value: 'day', label: 'Came another day' }, { value: 'order', label: 'On order' }];
+
 /** Where it went, when it came. */
 function Where({ block, line, lines }: Pick<BoughtLineDeskProps, 'block' | 'line' | 'lines'>) {
   const { context } = useBench();
   const path = (field: string) => `${block}.${line.id}.${field}`;
   const of = line.name.trim() || 'this line';
   const stocked = line.goes === 'shelf' || line.goes === 'shed';
+  const came = (value: string) => lines.change(line.id, { onOrder: value === 'order', arrivedOn: value === 'day' ? line.arrivedOn ?? context.day : null });
   return (
     <>
       <QuietSelect name={path('goes')} label={`Where ${of} goes`} value={line.goes} options={optionsOf(lineGoesWords)} onValue={(value) => lines.change(line.id, { goes: lineGoesList.find((one) => one === value) ?? 'shelf' })} />
       {line.goes === 'straight' && (
         <QuietSelect name={path('category')} label={`What kind of cost ${of} is`} value={line.category} options={optionsOf(costCategoryWords)} onValue={(value) => lines.change(line.id, { category: costCategories.find((one) => one === value) ?? 'other' })} />
       )}
-      {stocked && (
-        <label className={`flex items-center gap-1.5 text-small text-ink-soft ${tall}`}>
-          <input type="checkbox" checked={line.onOrder} onChange={(event) => lines.change(line.id, { onOrder: event.target.checked })} className="size-[18px] accent-scribe" />
-          On order
-        </label>
-      )}
-      {stocked && !line.onOrder && (
-        <label className={`flex items-center gap-1.5 text-small text-ink-soft ${tall}`}>
-          Came
-          <input type="date" value={line.arrivedOn ?? context.day} onChange={(event) => lines.change(line.id, { arrivedOn: event.target.value || null })} className="min-h-7 border-b border-dashed border-rule-strong bg-transparent text-small" />
-        </label>
+      {stocked && <QuietSelect name={path('came')} label={`When ${of} came`} value={line.onOrder ? 'order' : line.arrivedOn === null ? 'with' : 'day'} options={arrivals} onValue={came} />}
+      {stocked && !line.onOrder && line.arrivedOn !== null && (
+        <input
+          type="date" aria-label={`Day ${of} came`} value={line.arrivedOn} onChange={(event) => { if (event.target.value !== '') lines.change(line.id, { arrivedOn: event.target.value }); }}
+          className={`min-h-7 border-b border-dashed border-rule-strong bg-transparent text-small ${tall}`}
+        />
       )}
     </>
   );

@@ -10,7 +10,7 @@ interface ReceiptFieldsProps {
   set: (part: Partial<BoughtData>) => void;
 }
 
-const currencies = Object.keys(currencyExponents).map((code) => ({ value: code, label: code }));
+const currencies = Object.keys(currencyExponents).toSorted().map((code) => ({ value: code, label: code }));
 function basisOf(value: string): Basis {
   return bases.find((one) => one === value) ?? 'paper';
 }

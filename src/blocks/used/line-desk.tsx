@@ -14,7 +14,7 @@ import type { useLines } from '../use-lines.ts';
 import type { UsedData, UsedLine } from './used.ts';
 
 const fates = [{ value: 'used', label: 'Used' }, { value: 'wasted', label: 'Wasted' }];
-const places = [{ value: 'shelf', label: 'Off the build’s shelf' }, { value: 'shed', label: 'From the shed' }];
+const places = [{ value: 'shelf', label: 'Off the shelf' }, { value: 'shed', label: 'From the shed' }];
 
 /** What is left after a line, or by how much it falls short. */
 function useLeft(block: string, line: UsedLine): { words: string; short: boolean } {
@@ -23,7 +23,7 @@ function useLeft(block: string, line: UsedLine): { words: string; short: boolean
   const reckoning = bench.lines.get(`${block}:${line.id}`);
   if (!reckoning || reckoning.left === null) return { words: '', short: false };
   const short = exactFrom(reckoning.short).gt(0);
-  return short ? { words: `${inWords(reckoning.short)} not bought yet`, short } : { words: `${inWords(reckoning.left)} left`, short };
+  return short ? { words: `${inWords(reckoning.short)} short`, short } : { words: `${inWords(reckoning.left)} left`, short };
 }
 
 interface UsedLineDeskProps {
@@ -50,7 +50,7 @@ export function UsedLineDesk({ block, line, lines }: UsedLineDeskProps) {
   const of = line.name.trim() || 'this line';
   return (
     <li className="m-0! border-b border-rule py-2.5">
-      <div className="grid grid-cols-[minmax(0,1fr)_auto] items-center gap-x-3.5 gap-y-1.5 [grid-template-areas:'name_money'_'amount_left'] wide:grid-cols-[minmax(0,1fr)_auto_minmax(5.5rem,auto)_5.5rem] wide:[grid-template-areas:'name_amount_left_money']">
+      <div className="grid grid-cols-[minmax(0,1fr)_auto] items-center gap-x-3.5 gap-y-1.5 [grid-template-areas:'name_money'_'amount_left'] wide:grid-cols-[minmax(0,1fr)_auto_7rem_5rem] wide:[grid-template-areas:'name_amount_left_money']">
         <div className="[grid-area:name]">
           <MaterialPicker
             name={path('material')} value={line.name} picked={line.material !== null} onPick={pick} onNew={setNewName}

@@ -26,7 +26,8 @@ function lineOf(row: ShelfAfter, material: MaterialFacts, view: DeskView): SlipL
   const where = row.shelf === 'shed' ? 'in the shed' : '';
   if (short) return { label: material.name, value: `short ${words(row.short, material.unit)}`, small: ['not bought yet', where].filter(Boolean).join(', ') };
   const [value, packed] = [words(row.left, material.unit), words(row.left)];
-  const small = [packed !== value && material.packs.length > 0 ? packed : '', where].filter(Boolean).join(', ');
+  // a bare figure says no more than the value does
+  const small = [packed !== value && /\p{L}/u.test(packed) ? packed : '', where].filter(Boolean).join(', ');
   return { label: material.name, value, ...(small ? { small } : {}) };
 }
 
