@@ -69,9 +69,15 @@ function wordsInUsualUnit(amount: Fraction, dimension: Dimension, measures: Meas
   return unit ? wordsInUnit(amount, unit) : shownFigure(amount);
 }
 
+// Somebody who buys by the millilitre still reads 1.6 l: metric units of one dimension are one way of saying it.
+function onItsLadder(unit: Unit, amount: Fraction): Unit {
+  const rungs = metricLadder[unit.dimension];
+  return rungs.includes(unit.id) ? largestReached(amount, ladder(unit.dimension, metricLadder)) ?? unit : unit;
+}
+
 function wordsAsked(amount: Fraction, dimension: Dimension, options: WordingOptions): string | null {
   const unit = units.find(({ id }) => id === options.unit);
-  if (unit?.dimension === dimension) return wordsInUnit(amount, unit);
+  if (unit?.dimension === dimension) return wordsInUnit(amount, onItsLadder(unit, amount));
   const pack = options.packs?.find(({ name }) => name === options.unit);
   const size = pack && exactFrom(pack.amount);
   return pack && size ? packWords(amount.div(size), pack, wordsInUsualUnit(size, dimension, options.measures)) : null;

@@ -40,10 +40,17 @@ describe('a slip', () => {
 
 describe('the tally margin', () => {
   it('reads in the order of the page: words, their slips, the next words', () => {
-    const { container } = render(
-      <TallyMargin rows={[{ key: 'a', prose: 'First words.', slips: ['First slip.'] }, { key: 'b', prose: 'Second words.', slips: [] }]} />,
-    );
+    const part = (key: string, prose: string, slips: string[]) => ({ key, parts: [{ key, prose, slips }] });
+    const { container } = render(<TallyMargin runs={[part('a', 'First words.', ['First slip.']), part('b', 'Second words.', [])]} />);
     expect(container.textContent).toBe('First words.First slip.Second words.');
+  });
+
+  it('lets words run on within a run, and puts each slip after its own words on a phone', () => {
+    const { container } = render(
+      <TallyMargin runs={[{ key: 'a', parts: [{ key: 'a', prose: 'One.', slips: ['First slip.'] }, { key: 'b', prose: 'Two.', slips: ['Second slip.'] }] }]} />,
+    );
+    const ordered = [...container.querySelectorAll<HTMLElement>('[style]')].toSorted((a, b) => Number(a.style.order) - Number(b.style.order));
+    expect(ordered.map((part) => part.textContent)).toEqual(['One.', 'First slip.', 'Two.', 'Second slip.']);
   });
 });
 

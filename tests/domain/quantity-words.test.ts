@@ -51,6 +51,9 @@ test('an amount is said in the unit or pack asked for', () => {
   expect(wordsForQuantity(halfGallon, 'volume', { ...us, unit: 'us-cup' })).toBe('8 US cups');
   expect(wordsForQuantity('1000/1', 'volume', { ...tins, unit: 'tin' })).toBe('0.4 of a tin');
   expect(wordsForQuantity('1000/1', 'volume', { ...tins, unit: 'kg' })).toBe('1 l');
+  // metric units of one dimension are one way of saying it
+  expect(wordsForQuantity('1600/1', 'volume', { ...imperial, unit: 'ml' })).toBe('1.6 l');
+  expect(wordsForQuantity('350/1', 'volume', { ...imperial, unit: 'l' })).toBe('350 ml');
 });
 
 test('text that is no exact amount is refused', () => {

@@ -35,7 +35,7 @@ async function signOff(slug: string, document: EntryDocument, number?: number): 
 }
 
 /** A day that buys twenty lengths for 68.00, uses seventeen and wastes one, with an hour's work and a hire. */
-async function costedDay(slug: string, title: string): Promise<EntryDocument> {
+async function costedDay(title: string): Promise<EntryDocument> {
   const oak = await owner.ask(addMaterial, { body: { name: `Oak for ${title}`, dimension: 'count', unit: 'piece', packs: [] } });
   return dayOf('2026-06-14', [
     boughtBlock([{ of: oak, amount: '20', unit: 'piece', money: '68.00' }]),
@@ -61,7 +61,7 @@ async function buildAt(client: TestClient, slug: string): Promise<BuildPage> {
 describe('a published day', () => {
   test('shows what it came to on its page, on the build and in both feeds', async () => {
     const slug = await build('Priced');
-    const { href } = await signOff(slug, await costedDay(slug, 'Ribs in'));
+    const { href } = await signOff(slug, await costedDay('Ribs in'));
     const page = await pageAt(visitor, href);
     // 68.00 for twenty: seventeen 57.80, one 3.40, two left 6.80; the hire counts as used on its day
     expect(page.tally.money).toMatchObject({ used: 5780, wasted: 340, costs: 1234, day: 7354, bought: 6800, buildUsed: 7014, one: 340, unsettled: false });
@@ -77,7 +77,7 @@ describe('a published day', () => {
 
   test('sends readers nothing of the stored document', async () => {
     const slug = await build('Projected');
-    const { href } = await signOff(slug, await costedDay(slug, 'Projected day'));
+    const { href } = await signOff(slug, await costedDay('Projected day'));
     const text = JSON.stringify(await pageAt(visitor, href));
     for (const inner of ['"exact"', '"read"', '"material"', '"fate"', '"paperTotal"', '"basis"']) expect(text).not.toContain(inner);
   });
@@ -86,7 +86,7 @@ describe('a published day', () => {
 describe('costs kept to the crew', () => {
   test('are absent from pages, lists and feeds for everyone else, and there for the restorer', async () => {
     const slug = await build('Quiet', { costsShown: false });
-    const { href } = await signOff(slug, await costedDay(slug, 'Quiet day'));
+    const { href } = await signOff(slug, await costedDay('Quiet day'));
     expect((await pageAt(owner, href)).tally.money?.used).toBe(5780);
     const answers = [
       JSON.stringify(await pageAt(visitor, href)), JSON.stringify(await buildAt(visitor, slug)), JSON.stringify(await buildAt(other, slug)),
@@ -105,7 +105,7 @@ describe('costs kept to the crew', () => {
 describe('who may see a build', () => {
   test('a private build answers 404 everywhere and is in no list', async () => {
     const slug = await build('Hidden away', { visibility: 'private' });
-    const { href } = await signOff(slug, await costedDay(slug, 'Hidden day'));
+    const { href } = await signOff(slug, await costedDay('Hidden day'));
     const entry = href.split('/')[3] ?? '';
     for (const client of [visitor, other]) {
       expect((await client.call(readBuild, { params: { build: slug } })).status).toBe(404);
@@ -120,7 +120,7 @@ describe('who may see a build', () => {
   test('an unlisted build is read by its address, which cannot be guessed, and is in no list', async () => {
     const slug = await build('Word of mouth', { visibility: 'unlisted' });
     expect(slug).toMatch(/^word-of-mouth-[a-z0-9]{10}$/);
-    await signOff(slug, await costedDay(slug, 'Told day'));
+    await signOff(slug, await costedDay('Told day'));
     expect((await buildAt(visitor, slug)).entries).toHaveLength(1);
     expect((await visitor.get(`/builds/${slug}/feed.xml`)).status).toBe(200);
     expect(JSON.stringify([await visitor.ask(readHome), await visitor.ask(readBuilds)])).not.toContain('Told day');
@@ -146,7 +146,7 @@ describe('who may see a build', () => {
 describe('addresses are permanent', () => {
   test('a renamed build and a renamed entry redirect to where they are now', async () => {
     const slug = await build('First name');
-    const day = await costedDay(slug, 'First title');
+    const day = await costedDay('First title');
     const { number } = await signOff(slug, day);
     await signOff(slug, { ...day, title: 'Second title' }, number);
     const settings = await owner.ask(readBuildSettings, { params: { build: slug } });
@@ -164,7 +164,7 @@ describe('feeds', () => {
   test('stay well-formed with hostile titles and keep the guid through edits and renames', async () => {
     const slug = await build('Nasty ]]> & <b>feed</b>');
     const title = 'Tar ]]> & <script>alert(1)</script> \u0007 \u202Eright to left';
-    const day = await costedDay(slug, title);
+    const day = await costedDay(title);
     const { number } = await signOff(slug, day);
     const read = async () => new Parser().parseString((await visitor.get(`/builds/${slug}/feed.xml`)).text);
     const before = await read();
@@ -180,7 +180,7 @@ describe('feeds', () => {
   // RSS Best Practices Profile: atom:link rel="self". JSON Feed 1.1: version, title, items with id and content.
   test('hold what their specifications ask for, with absolute addresses', async () => {
     const slug = await build('By the book');
-    const { href } = await signOff(slug, await costedDay(slug, 'By the book day'));
+    const { href } = await signOff(slug, await costedDay('By the book day'));
     const xml = (await visitor.get(`/builds/${slug}/feed.xml`)).text;
     expect(xml).toContain(`<atom:link href="${site.url}/builds/${slug}/feed.xml" rel="self" type="application/rss+xml"/>`);
     expect(xml).toMatch(/<guid isPermaLink="false">urn:uuid:[0-9a-f-]{36}<\/guid>/);
@@ -195,7 +195,7 @@ describe('feeds', () => {
 
   test('answer 304 to a reader that has this version', async () => {
     const slug = await build('Twice asked');
-    await signOff(slug, await costedDay(slug, 'Twice asked day'));
+    await signOff(slug, await costedDay('Twice asked day'));
     const first = await visitor.get(`/builds/${slug}/feed.xml`);
     // fetch would add no-cache of its own beside a condition, which asks for the whole answer
     const again = await visitor.get(`/builds/${slug}/feed.xml`, { 'if-none-match': first.headers.get('etag') ?? '', 'cache-control': 'max-age=0' });

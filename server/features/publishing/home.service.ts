@@ -41,7 +41,7 @@ async function latestTakes(em: Em, entries: readonly Entry[]): Promise<HomeView[
     const work = { amount: '1/1', unit: entry.workUnit ?? 'piece', kind: entry.workKind.one };
     const words = workWords(work, new Map()).replace(/^1 /, '');
     takes.push({
-      one: `${words.charAt(0).toUpperCase()}${words.slice(1)}`, href: entryHref(entry.build, entry), build: entry.build.title, currency: entry.build.currency,
+      one: work.unit === 'piece' ? `${words.charAt(0).toUpperCase()}${words.slice(1)}` : words, href: entryHref(entry.build, entry), build: entry.build.title, currency: entry.build.currency,
       money: entry.build.costsShown ? one.money : null, minutes: one.minutes > 0 ? one.minutes : null,
     });
   }

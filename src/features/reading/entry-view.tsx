@@ -1,7 +1,7 @@
 import { Link, useLocation } from 'react-router-dom';
 import type { EntryPage, TallyView } from '#contracts/entry-view.ts';
 import { formatDayLong, formatMinutes, formatMoney } from '#domain/format.ts';
-import { readerRows } from '#src/blocks/views.ts';
+import { readerRuns } from '#src/blocks/views.ts';
 import { Byline } from '#src/components/byline.tsx';
 import { Chip } from '#src/components/chip.tsx';
 import { DayLinks } from '#src/components/day-links.tsx';
@@ -83,7 +83,7 @@ export function EntryView({ page, notice }: { page: EntryPage; notice?: React.Re
       hang={page.tape.days.length > 0 ? <BuildTape title={page.build.title} tape={page.tape} currency={page.build.currency} hours={hours} otherHref={pathname + withSearch(search, { tape: hours ? null : 'hours' })} current={page.number} /> : null}
     >
       <article aria-label={page.title}>
-        <TallyMargin rows={readerRows(page.rows, <DayTally key="tally" tally={page.tally} />)} />
+        <TallyMargin runs={readerRuns(page.rows, <DayTally key="tally" tally={page.tally} />)} />
       </article>
       <div className="mt-6 border-t border-rule pt-6">
         <PageColumns aside={<DayLinks before={page.before && { to: page.before.href, title: page.before.title }} after={page.after && { to: page.after.href, title: page.after.title }} />}>
