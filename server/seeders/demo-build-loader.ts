@@ -1,5 +1,7 @@
+import { AppError } from '#contracts/errors.ts';
 import type { DemoBuild, DemoEntry, DemoWriter } from '#fixtures/demo-build.ts';
 import { documentOf, type Bench } from '#fixtures/entry-words.ts';
+import { entryDocument } from '#src/blocks/pure.ts';
 import { Build, Material, Person, Picture, Stage } from '#server/entities/index.ts';
 import { joinCrew, startRestoration } from '#server/features/builds/builds.service.ts';
 import { replaceStages } from '#server/features/builds/stages.service.ts';
@@ -124,13 +126,24 @@ export class DemoBuildLoader {
     };
   }
 
-  /** Writes up one day as its writer does: begun, saved, and signed off that evening unless it is left as a draft. */
+  /** Writes up one day; what bars it is said with the day's title, since it is a fault of the fixture. */
   async writeUp(entry: DemoEntry): Promise<void> {
+    try {
+      await this.#signOff(entry);
+    } catch (error) {
+      if (!(error instanceof AppError)) throw error;
+      throw new Error(`The demo's “${entry.title}” does not go in: ${error.message} ${JSON.stringify(error.fields ?? {})}`, { cause: error });
+    }
+  }
+
+  /** As its writer does: begun, saved, and signed off that evening unless it is left as a draft. */
+  async #signOff(entry: DemoEntry): Promise<void> {
     const { slug } = this.#build;
     const caller = this.#writers[entry.by];
     const em = this.#em();
     const evening = this.#when.evening(entry.daysAgoTo ?? entry.daysAgo);
-    const document = documentOf(entry, this.#bench());
+    // Read as what comes over the wire is.
+    const document = entryDocument.parse(documentOf(entry, this.#bench()));
     const number = await startDay(em, caller, slug, { day: document.day, stage: document.stage }, evening);
     const saved = await saveTyped(em.fork(), caller, slug, number, { version: 1, document }, evening);
     if (!entry.draft) await signOffDay(em.fork(), caller, slug, number, saved, evening);
