@@ -44,18 +44,25 @@ function materialsIn(document: EntryDocument): Set<number> {
   return new Set(document.content.flatMap((node) => (node.type === 'used' || node.type === 'bought' ? node.attrs.data.lines.flatMap(({ material }) => material ?? []) : [])));
 }
 
-function byMaterial(on: MaterialHistory['shelf'], movements: readonly LaidMovement[]): MaterialHistory[] {
-  const histories = new Map<number, MaterialHistory>();
-  for (const { material, ...row } of movements) {
-    const history = histories.get(material) ?? { material, shelf: on, rows: [] };
-    history.rows.push(row);
-    histories.set(material, history);
+interface Group { readonly material: number; readonly on: MaterialHistory['shelf']; readonly movements: LaidMovement[] }
+
+function byMaterial(on: Group['on'], movements: readonly LaidMovement[]): Group[] {
+  const groups = new Map<number, Group>();
+  for (const movement of movements) {
+    const group = groups.get(movement.material);
+    if (group) group.movements.push(movement);
+    else groups.set(movement.material, { material: movement.material, on, movements: [movement] });
   }
-  return [...histories.values()];
+  return [...groups.values()];
 }
 
-function lastDay({ rows }: MaterialHistory): string {
-  return rows.reduce((latest, { day }) => (day > latest ? day : latest), '');
+function lastDay({ movements }: Group): string {
+  return movements.reduce((latest, { day }) => (day > latest ? day : latest), '');
+}
+
+function historyOf({ material, on, movements }: Group): MaterialHistory {
+  const rows = movements.map(({ key, kind, day, sequence, place, amount, cost, of, shortage }) => ({ key, kind, day, sequence, place, amount, cost, of, shortage }));
+  return { material, shelf: on, rows };
 }
 
 /**
@@ -67,5 +74,5 @@ export function materialHistories(shelves: DeskShelves, documents: readonly Entr
   const all = [...byMaterial('shelf', shelves.onShelf), ...byMaterial('shed', shelves.inShed)];
   const others = all.filter(({ material }) => !own.has(material)).toSorted((a, b) => lastDay(b).localeCompare(lastDay(a)));
   let room = rowsBeside;
-  return [...all.filter(({ material }) => own.has(material)), ...others.filter(({ rows }) => (room -= rows.length) >= 0)];
+  return [...all.filter(({ material }) => own.has(material)), ...others.filter(({ movements }) => (room -= movements.length) >= 0)].map(historyOf);
 }

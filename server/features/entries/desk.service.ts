@@ -48,8 +48,12 @@ function entryView(build: Build, entry: Entry): DeskView['entry'] {
   };
 }
 
-/** All the desk needs to show a cost while somebody types: with drafts, and nothing of it stored. */
-export async function readDeskOf(em: Em, caller: Caller, slug: string, number: number): Promise<DeskView> {
+/** All the desk needs to show a cost while somebody types: with drafts, and nothing of it stored. One transaction, so that a sign-off meanwhile is in all of it or in none. */
+export function readDeskOf(em: Em, caller: Caller, slug: string, number: number): Promise<DeskView> {
+  return em.transactional((inner) => deskOf(inner, caller, slug, number));
+}
+
+async function deskOf(em: Em, caller: Caller, slug: string, number: number): Promise<DeskView> {
   const { build, entry } = await requireEntry(em, caller, slug, number);
   const shelves = await deskShelves(em, caller, build, entry);
   const { title, currency, measures, costsShown, visibility } = build;

@@ -27,7 +27,7 @@ export async function storedMovements(em: Em, shelf: Shelf, without: ReadonlySet
   const rows = await em.execute<StoredRow[]>(
     `select key, kind, material_id as material, day, sequence, place, amount, cost, "of", shortage, entry_id as entry from movement where shelf_id = ?${some}`, [shelf.id, ...(only ?? [])],
   );
-  return rows.flatMap(({ entry, ...row }) => (entry !== null && without.has(entry) ? [] : [row]));
+  return rows.filter(({ entry }) => entry === null || !without.has(entry));
 }
 
 /** A working copy and what it would say to the ledger. */

@@ -66,7 +66,7 @@ async function entryDifferences(em: Em, build: Build): Promise<{ count: number; 
   const differences: string[] = [];
   for (const entry of entries) {
     const derived = entry.published ? deriveEntry(storedDocument(entry.published), context) : nothingDerived;
-    differences.push(...rowDifferences(`build ${build.id}, entry ${entry.number}`, await storedRows(em, entry), derivedRows(entry, derived)));
+    differences.push(...rowDifferences(`build ${build.id}, entry ${entry.number}`, await storedRows(em.fork({ keepTransactionContext: true }), entry), derivedRows(entry, derived)));
   }
   return { count: entries.length, differences };
 }

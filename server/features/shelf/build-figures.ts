@@ -22,6 +22,10 @@ const bought = `
   from receipt_line l join receipt r on r.id = l.receipt_id where r.build_id = ?`;
 const receiptCount = `select count(*) as receipts, ifnull(sum(not_sorted), 0) as notSorted from receipt where build_id = ?`;
 
+// One statement, so that a sign-off between two of them cannot make the sum look wrong.
+const parts = [charged, onShelf, materialsLeft, costs, bought, receiptCount];
+const allTerms = `select * from ${parts.map((part) => `(${part})`).join(', ')}`;
+
 interface BuildSums {
   used: number; wasted: number; unsettled: number | null; movedIn: number; left: number; returned: number; sold: number;
   materialsLeft: number; costs: number; typed: number; lines: number; onOrder: number; receipts: number; notSorted: number;
@@ -32,10 +36,7 @@ interface BuildSums {
  * *Spent* comes from receipts and costs alone and *left* from the shelf alone, so that the sum is a check and no tautology.
  */
 export async function buildFigures(em: Em, build: Pick<Build, 'id'>): Promise<FiguresView> {
-  const sums: Partial<BuildSums> = {};
-  for (const query of [charged, onShelf, materialsLeft, costs, bought, receiptCount]) {
-    Object.assign(sums, (await em.execute<Partial<BuildSums>[]>(query, [build.id]))[0]);
-  }
+  const [sums = {}] = await em.execute<Partial<BuildSums>[]>(allTerms, parts.map(() => build.id));
   const { used = 0, wasted = 0, movedIn = 0, left = 0, returned = 0, sold = 0, lines = 0, onOrder = 0, notSorted = 0 } = sums;
   return {
     spent: lines + (sums.typed ?? 0) + notSorted, used: used + (sums.costs ?? 0), wasted, left,
