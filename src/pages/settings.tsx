@@ -71,7 +71,7 @@ export function Component() {
     <PageFrame head={<PageHead title="Settings" lettering="place" lede={<>{`You are @${account.handle} here, signed in as ${account.email}.`}</>} />}>
       <Head title="Settings" />
       {notice && <Notice key={search.toString()} good={notice.good}>{notice.words}</Notice>}
-      <div className="grid max-w-[40rem] gap-10">
+      <div className="grid max-w-[36rem] gap-10">
         <section><SectionHeading>Profile</SectionHeading><Panel><ProfileForm account={account} /></Panel></section>
         <section><SectionHeading>Password</SectionHeading><Panel><PasswordForm key={String(search.get('done'))} account={account} /></Panel></section>
         {(github || account.github) && <section><SectionHeading>GitHub</SectionHeading><Panel><GithubPanel account={account} /></Panel></section>}

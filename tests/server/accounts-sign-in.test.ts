@@ -2,6 +2,7 @@ import { hash, verify } from '@node-rs/argon2';
 import { afterAll, beforeAll, beforeEach, describe, expect, test, vi } from 'vitest';
 import { changeAccount, readAccount, readSession, signIn, signOut } from '#contracts/session.ts';
 import { HttpSession, Person } from '#server/entities/index.ts';
+import { createDemoPeople, demoAddress, demoPeople } from '#server/features/accounts/demo-people.ts';
 import { hashPassword } from '#server/features/accounts/password.ts';
 import { createPerson } from '#server/features/accounts/people.ts';
 import { startTestServer, type TestServer } from '#tests/support/test-server.ts';
@@ -129,6 +130,20 @@ describe('what does not go together', () => {
   test('an empty form is told what each field wants', async () => {
     expect((await site.visitor().refused(signIn, { body: { email: '', password: '' } })).fields).toEqual({ email: 'Give your e-mail address.', password: 'Give your password.' });
   });
+});
+
+test('the demo people sign in with one password, hashed once, each in their role', async () => {
+  const em = rows();
+  vi.mocked(hash).mockClear();
+  await createDemoPeople(em, 'three turns of twine', new Date());
+  await em.flush();
+  expect(vi.mocked(hash).mock.calls).toHaveLength(1);
+  const roles: Record<string, string> = {};
+  for (const { key } of demoPeople) {
+    const { viewer } = await site.visitor().ask(signIn, { body: { email: demoAddress(key), password: 'three turns of twine' } });
+    roles[`${key} ${viewer.handle}`] = viewer.role;
+  }
+  expect(roles).toEqual({ 'restorer marlow': 'member', 'crew ines': 'member', 'reader harker': 'member', 'moderator petra': 'moderator', 'administrator sol': 'administrator' });
 });
 
 describe('signing out', () => {
