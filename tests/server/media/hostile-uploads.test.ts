@@ -170,6 +170,13 @@ describe('names and forms', () => {
     expect(await site.left('quarantine')).toEqual([]);
   });
 
+  test('what is refused only after it arrived leaves nothing either', async () => {
+    const form = new FormData();
+    form.append('picture', new Blob([new Uint8Array(await quadrants().jpeg().toBuffer())]), 'a.jpg');
+    expect((await site.restorer.upload(`/api/builds/${site.build}/pictures?size=large`, form)).json()).toMatchObject({ code: 'bad-input' });
+    await expect.poll(() => site.left('quarantine')).toEqual([]);
+  });
+
   test('a form that breaks off is answered in words and leaves nothing', async () => {
     const answer = await site.restorer.fetch(`/api/builds/${site.build}/pictures`, {
       method: 'POST', headers: { 'content-type': 'multipart/form-data; boundary=plank' },
