@@ -2,7 +2,7 @@ import { readAmountOfWork } from '#domain/work.ts';
 import type { BlockContext, BlockDerivation, DerivedCost, DerivedReceipt, DerivedTime, DerivedUse, PureBlock, ShownPicture } from './block.ts';
 import { isProse, type BlockNode, type EntryDocument, type TopNode } from './entry-document.ts';
 import { pureBlocks, type BlockType } from './pure-list.ts';
-import { plainWords } from './prose.ts';
+import { plainWords } from './plain-words.ts';
 
 /** What stands around an entry: everything of `BlockContext` that is not in the document itself. */
 export type EntryContext = Omit<BlockContext, 'day' | 'dayTo' | 'stage'>;

@@ -1,5 +1,5 @@
 import type { RowView } from '#contracts/entry-view.ts';
-import { plainWords } from './prose.ts';
+import { plainWords } from './plain-words.ts';
 
 // Heights are guessed in the wide layout's pixels, well enough to tell a gap one reads across from a hole in the page.
 

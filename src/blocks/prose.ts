@@ -41,11 +41,3 @@ export const proseNode = z.discriminatedUnion('type', [
 ]);
 export type ProseNode = z.output<typeof proseNode>;
 export const proseTypes: ReadonlySet<string> = new Set(['paragraph', 'heading', 'bulletList', 'orderedList', 'blockquote', 'table']);
-
-interface Spoken { text?: string | undefined; content?: readonly unknown[] | undefined }
-/** The words of a node, for excerpts, search and checks. */
-export function plainWords(node: unknown): string {
-  const { text: words, content } = node as Spoken;
-  if (typeof words === 'string') return words;
-  return (content ?? []).map(plainWords).filter(Boolean).join(' ');
-}
