@@ -22,6 +22,9 @@ const environment = z.object({
   GITHUB_CLIENT_SECRET: optional(z.string()),
   LOG_LEVEL: z.preprocess(blankIsAbsent, z.enum(['fatal', 'error', 'warn', 'info', 'debug', 'trace', 'silent'], 'LOG_LEVEL is fatal, error, warn, info, debug, trace or silent').default('warn')),
 }).superRefine((env, context) => {
+  if (env.PUBLIC_URL?.startsWith('https:') && env.TRUST_PROXY === undefined) {
+    context.addIssue({ code: 'custom', path: ['TRUST_PROXY'], message: 'PUBLIC_URL is https, and TLS ends before this server: say which proxies to trust, such as TRUST_PROXY=1' });
+  }
   if (Boolean(env.GITHUB_CLIENT_ID) !== Boolean(env.GITHUB_CLIENT_SECRET)) {
     context.addIssue({ code: 'custom', path: ['GITHUB_CLIENT_ID'], message: 'GITHUB_CLIENT_ID and GITHUB_CLIENT_SECRET are set together or not at all' });
   }

@@ -5,7 +5,7 @@ import pino from 'pino';
 import { createApp } from './app.ts';
 import { ConfigFault, readConfig, type Config } from './config.ts';
 import { openDatabase } from './database.ts';
-import { loadDemo } from './demo.ts';
+import { clearInterruptedDemo, loadDemo } from './demo.ts';
 import type { Parts } from './http/context.ts';
 import { startJobs } from './jobs/runner.ts';
 import { jobHandlers } from './features/jobs.ts';
@@ -25,6 +25,7 @@ function configOrExit(): Config {
 const config = configOrExit();
 const dev = process.argv.includes('--dev');
 const log = pino({ level: config.logLevel, redact: ['req.headers.cookie', 'req.headers.authorization'] });
+if (config.local) await clearInterruptedDemo(config);
 const orm = await openDatabase(join(config.dataDir, 'tallywright.sqlite'));
 const parts: Parts = { config, orm, log, now: () => new Date(), limits: true };
 let ready = false;

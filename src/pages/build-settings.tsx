@@ -1,9 +1,10 @@
 import { useSuspenseQuery, type QueryClient } from '@tanstack/react-query';
-import { Form, redirect, useParams, type ActionFunctionArgs, type LoaderFunctionArgs } from 'react-router-dom';
+import { Form, Link, redirect, useParams, type ActionFunctionArgs, type LoaderFunctionArgs } from 'react-router-dom';
 import type { archiveBuild, BuildSettings, changeBuild } from '#contracts/builds.ts';
 import { ErrorSummary } from '#src/components/error-summary.tsx';
 import { Button } from '#src/components/button.tsx';
 import { Kicker } from '#src/components/kicker.tsx';
+import { PageColumns } from '#src/components/page-columns.tsx';
 import { PageFrame } from '#src/components/page-frame.tsx';
 import { PageHead } from '#src/components/page-head.tsx';
 import { Panel } from '#src/components/panel.tsx';
@@ -44,26 +45,41 @@ export function Component() {
   return (
     <PageFrame head={<PageHead kicker={<Kicker lead={{ label: data.title, to: `/builds/${data.slug}` }} />} title="Settings of the build" lettering="place" />}>
       <Head title={`Settings, ${data.title}`} />
-      <Form method="post" noValidate className="max-w-[760px]">
-        <ErrorSummary errors={form.errors} attempt={form.attempt} />
-        <input type="hidden" name="version" value={data.version} />
-        <div className="grid gap-6">
-          <Panel><SectionHeading>What it is</SectionHeading><NamingFields form={form} build={data} /></Panel>
-          <Panel><SectionHeading>Where it stands</SectionHeading><StandsFields form={form} build={data} /></Panel>
-          <Panel><SectionHeading>Maker and numbers</SectionHeading><IdentityFields form={form} build={data} /></Panel>
-          <Panel><SectionHeading>How it is reckoned</SectionHeading><ReckoningFields form={form} build={data} /></Panel>
-          <Panel><SectionHeading>Who sees it</SectionHeading><ShowingFields form={form} build={data} /></Panel>
-          <div><SubmitButton pending={form.pending} pendingWord="Keeping the settings">Keep the settings</SubmitButton></div>
-        </div>
-      </Form>
-      <PutAway build={data} />
+      <PageColumns aside={<><BuildPlaces build={data} /><PutAway build={data} /></>}>
+        <Form method="post" noValidate>
+          <ErrorSummary errors={form.errors} attempt={form.attempt} />
+          <input type="hidden" name="version" value={data.version} />
+          <div className="grid gap-6">
+            <Panel><SectionHeading>What it is</SectionHeading><NamingFields form={form} build={data} /></Panel>
+            <Panel><SectionHeading>Where it stands</SectionHeading><StandsFields form={form} build={data} /></Panel>
+            <Panel><SectionHeading>Maker and numbers</SectionHeading><IdentityFields form={form} build={data} /></Panel>
+            <Panel><SectionHeading>How it is reckoned</SectionHeading><ReckoningFields form={form} build={data} /></Panel>
+            <Panel><SectionHeading>Who sees it</SectionHeading><ShowingFields form={form} build={data} /></Panel>
+            <div><SubmitButton pending={form.pending} pendingWord="Keeping the settings">Keep the settings</SubmitButton></div>
+          </div>
+        </Form>
+      </PageColumns>
     </PageFrame>
+  );
+}
+
+/** The other places where a build is looked after. */
+function BuildPlaces({ build }: { build: BuildSettings }) {
+  const places = [
+    { to: `/builds/${build.slug}`, label: 'The page readers see' }, { to: `/builds/${build.slug}/plan`, label: 'Plan the stages' }, { to: `/write?build=${build.slug}`, label: 'Write up a day' },
+  ];
+  return (
+    <nav aria-label="This build">
+      <SectionHeading>This build</SectionHeading>
+      <ul>{places.map((place) => <li key={place.to} className="border-b border-rule px-3 py-[11px] text-control"><Link to={place.to}>{place.label}</Link></li>)}</ul>
+      <p className="mt-3 text-small text-ink-soft">A new name gives the build a new address. The old one leads to it, so links that people kept go on working.</p>
+    </nav>
   );
 }
 
 function PutAway({ build }: { build: BuildSettings }) {
   return (
-    <Form method="post" className="mt-12 max-w-[760px] border-t border-rule pt-6">
+    <Form method="post" className="mt-10">
       <SectionHeading>{build.archived ? 'Bring it back out' : 'Put it away'}</SectionHeading>
       <p className="max-w-reading text-control text-ink-soft">
         {build.archived ? 'It is out of the lists of builds. Its pages can still be read by their addresses.' : 'It leaves the lists of builds. Its pages stay where they are, and you can bring it back out.'}

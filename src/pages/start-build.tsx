@@ -4,6 +4,7 @@ import type { startBuild } from '#contracts/builds.ts';
 import type { InputOf } from '#contracts/endpoint.ts';
 import { AppError } from '#contracts/errors.ts';
 import { ErrorSummary } from '#src/components/error-summary.tsx';
+import { PageColumns } from '#src/components/page-columns.tsx';
 import { PageFrame } from '#src/components/page-frame.tsx';
 import { PageHead } from '#src/components/page-head.tsx';
 import { Panel } from '#src/components/panel.tsx';
@@ -38,15 +39,35 @@ export function Component() {
   return (
     <PageFrame head={<PageHead title="Start a build" lettering="place" lede="Say what it is. Everything here but the currency can be changed later." />}>
       <Head title="Start a build" />
-      <Form method="post" noValidate className="max-w-[760px]">
-        <ErrorSummary errors={form.errors} attempt={form.attempt} />
-        <div className="grid gap-6">
-          <Panel><SectionHeading>What it is</SectionHeading><NamingFields form={form} /></Panel>
-          <Panel><SectionHeading>How it is reckoned</SectionHeading><ReckoningFields form={form} /></Panel>
-          <Panel><SectionHeading>Who sees it</SectionHeading><ShowingFields form={form} /></Panel>
-          <div><SubmitButton pending={form.pending} pendingWord="Starting the build">Start the build</SubmitButton></div>
-        </div>
-      </Form>
+      <PageColumns aside={<WhatComesNext />}>
+        <Form method="post" noValidate>
+          <ErrorSummary errors={form.errors} attempt={form.attempt} />
+          <div className="grid gap-6">
+            <Panel><SectionHeading>What it is</SectionHeading><NamingFields form={form} /></Panel>
+            <Panel><SectionHeading>How it is reckoned</SectionHeading><ReckoningFields form={form} /></Panel>
+            <Panel><SectionHeading>Who sees it</SectionHeading><ShowingFields form={form} /></Panel>
+            <div><SubmitButton pending={form.pending} pendingWord="Starting the build">Start the build</SubmitButton></div>
+          </div>
+        </Form>
+      </PageColumns>
     </PageFrame>
+  );
+}
+
+const next = [
+  ['Plan the stages', 'The parts of the job in order, with what you mean to spend on each. It can wait.'],
+  ['Write up a day', 'What you did, a picture or two, and what it took: lines off the shelf, receipts, hours.'],
+  ['Sign off', 'The day is priced from what you really paid, and stands for others to read and budget from.'],
+] as const;
+
+/** What a first-time restorer does after this page. */
+function WhatComesNext() {
+  return (
+    <section>
+      <SectionHeading>What comes next</SectionHeading>
+      <ol className="list-none">
+        {next.map(([title, words]) => <li key={title} className="border-b border-rule py-3"><b className="lettering-row block">{title}</b><span className="text-control text-ink-soft">{words}</span></li>)}
+      </ol>
+    </section>
   );
 }
