@@ -6,7 +6,7 @@ import { RefusedPicture, type PictureAnswer, type PictureOrder } from './picture
 // The process that pictures are made in. It is started by `picture-maker.ts`, takes one order at a time and ends with the site.
 
 /** The site's own queries go first on a small machine. */
-const behindTheSite = 10;
+const behindTheSite = 5;
 setPriority(behindTheSite);
 
 sharp.cache(false);
