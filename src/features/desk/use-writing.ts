@@ -49,6 +49,8 @@ export function useWriting({ start, saver, onGone, onFiles }: WritingParts) {
 
   const editor = useEditor({
     extensions,
+    // what it would write into the page stands in desk.css: the page's policy lets no script write styles
+    injectCSS: false,
     content: editorContent(start.document.content),
     onUpdate: ({ editor: now, transaction }) => {
       edit((text) => ({ ...text, content: storedContent(now.getJSON()) }));
