@@ -16,7 +16,17 @@ await rm(out, { recursive: true, force: true });
 console.log('Building the client …');
 await bundleClient({
   logLevel: 'warn',
-  build: { outDir: `${out}/client`, emptyOutDir: true, manifest: true, sourcemap: true, assetsInlineLimit: 0, rolldownOptions },
+  build: {
+    outDir: `${out}/client`,
+    emptyOutDir: true,
+    manifest: true,
+    sourcemap: 'hidden', // made for us and for the weight test; readers are not told of it
+    // The list of what each page needs would weigh more than a kilobyte on every reader's page, which reads without scripts.
+    modulePreload: false,
+    assetsInlineLimit: 0,
+    chunkSizeWarningLimit: 800, // kB: the desk's editor; what readers load is weighed by a test
+    rolldownOptions,
+  },
 });
 
 console.log('Building the page renderer …');
