@@ -178,12 +178,12 @@ interface Spell {
 }
 const members: Readonly<Record<string, string>> = { marlow: 'Marlow Finch', ines: 'Ines Tarn' };
 /** Time of a member by handle, or of somebody by just a name. */
-export function took(who: string, time: string, what: string, kind: TimeKind = 'each'): Spell {
+export function took(who: string, long: string, what: string, kind: TimeKind = 'each'): Spell {
   const name = members[who];
-  return { handle: name === undefined ? null : who, name: name ?? who, time, what, kind };
+  return { handle: name === undefined ? null : who, name: name ?? who, time: long, what, kind };
 }
-export function waited(time: string, what: string): Spell {
-  return { handle: null, name: '', time, what, kind: 'waiting' };
+export function waited(long: string, what: string): Spell {
+  return { handle: null, name: '', time: long, what, kind: 'waiting' };
 }
 export function time(...lines: Spell[]): EntryPart {
   return (id) => block(id, 'time', { lines: numbered(id, lines, (spell, line) => ({ id: line, ...spell })) });

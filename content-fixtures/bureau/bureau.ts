@@ -10,11 +10,11 @@ export const bureau: DemoBuild = {
   currency: 'EUR', measures: 'imperial', method: 'fifo', visibility: 'public', costsShown: true,
   before: 'bureau-arrived.jpg', after: 'bureau-finished.jpg',
   stages: [
-    { title: 'Looking and cleaning', money: '70', time: '8 h', done: true },
-    { title: 'Fall front', money: '110', time: '24 h', work: { amount: '4.6', unit: 'm', kind: 'stringing let in' }, done: true },
-    { title: 'Drawers and beading', money: '130', time: '30 h', work: { amount: '8', unit: 'piece', kind: 'drawer runner' }, done: true },
-    { title: 'Polish', money: '90', time: '26 h', work: { amount: '2.1', unit: 'm2', kind: 'surface polished' }, done: true },
-    { title: 'Inside', money: '110', time: '10 h', done: true },
+    { title: 'Looking and cleaning', money: '50', time: '8 h', done: true },
+    { title: 'Fall front', money: '45', time: '20 h', work: { amount: '4.6', unit: 'm', kind: 'stringing let in' }, done: true },
+    { title: 'Drawers and beading', money: '85', time: '20 h', work: { amount: '8', unit: 'piece', kind: 'drawer runner' }, done: true },
+    { title: 'Polish', money: '45', time: '12 h', work: { amount: '2.1', unit: 'm2', kind: 'surface polished' }, done: true },
+    { title: 'Inside', money: '60', time: '6 h', done: true },
   ],
   materials: {
     soap: { name: 'Soft soap, neutral', dimension: 'mass', unit: 'g', packs: { jar: '250 g' } },

@@ -66,7 +66,7 @@ const polish: DemoEntry = {
   content: [
     caution('solvent'),
     h('Bodying up'),
-    p('Flakes in alcohol over night, a hundred grams to the half litre, strained through a stocking. Pumice and a nearly dry rubber first to fill the grain, then figures of eight, then straight strokes off the ends. The rubber must never stop on the work: where it stops, it takes the polish with it.'),
+    p('Flakes in alcohol over night, a hundred grams to the half litre, strained through a stocking. Pumice and a nearly dry rubber first to fill the grain, then figures of eight, then straight strokes off the ends. The rubber must never stop on the work: where it stops, it takes the polish with it. One drop of oil on its face when it begins to drag, and no more, since all of that oil has to come out again on the last day.'),
     photos({ 'bureau-polish.jpg': 'Half way across the top. The dull half has had one session fewer.' }, 'cover'),
     used(
       use('shellac', '180 g'), use('alcohol', '900 ml'), waste('alcohol', '100 ml'), waste('shellac', '20 g'), fromShed(use('linseed', '15 ml', 'whole')), use('pumice', '20 g', 'opened'), use('cloth', '0.3 m²', 'opened'),

@@ -5,7 +5,7 @@ import { bold, bought, bullets, cost, h, italic, notMine, p, photos, quote, step
 
 const arrived: DemoEntry = {
   key: 'bu01', by: 'restorer', daysAgo: 95, stage: 'Looking and cleaning',
-  title: 'What it is, and eleven things that are wrong with it',
+  title: 'What it is, and everything that is wrong with it',
   lead: 'Bought for the figure of its walnut and carried up four flights. Before any mending I wrote down everything that is broken and everything that only looks broken.',
   content: [
     photos({ 'bureau-arrived.jpg': 'In its corner on the first evening. The handle holds by one pin, and the ring on top is from a flowerpot.' }, 'cover'),

@@ -41,7 +41,7 @@ const skinOff: DemoEntry = {
   content: [
     p('The skin is one long sheet of soft aluminium, folded over the corner under a trim strip. The trim came first: its screws had slotted heads full of filler, and the quickest way in was to heat each head with a soldering iron for a count of ten and then tap the driver as I turned.'),
     steps(
-      'Rake the filler out of the slot and wet it, since some of it is old paint.',
+      'Rake the filler out of the slot and wet it, since some of it is old paint. Lead gives off fume when it is heated, so the slot must be bare.',
       'Warm the head, tap, turn. If it does not move, leave it and come back.',
       'Slide a wide scraper between skin and frame to find the clench nails.',
       'Roll the sheet back slowly over a length of drainpipe, so that it does not crease.',
@@ -88,7 +88,7 @@ const cornerPost: DemoEntry = {
 const floorEdge: DemoEntry = {
   key: 'cv04', by: 'restorer', daysAgo: 128, stage: 'Frame and floor',
   title: 'Three metres of floor edge, then the barn is needed',
-  lead: 'The outer 280 mm of the floor had opened like a book. It is out, and a new edge is bedded in. Then everything stops, because the barn has been promised to somebody else until the lambs are out of it.',
+  lead: 'The outer 280 mm of the floor had opened like a book. It is out, and a new edge is bedded in. Then everything stops, because the barn has been promised to somebody with a boat.',
   work: { amount: '3.4', unit: 'm', kind: 'floor edge renewed' },
   content: [
     h('Out with the old'),
@@ -109,7 +109,7 @@ const floorEdge: DemoEntry = {
     ),
     p('The third cartridge was Ines’s own; I owe her one and will settle it with the next order.'),
     h('Laid up'),
-    quote('You may have it back when the last ewe has lambed, and not a day before.'),
+    quote('You may have it back when she is in the water, and not a day before.'),
     bullets([bold('Done: '), 'post, rails, floor edge.'], [bold('Open: '), 'skin off on one side, so it is sheeted down with battens, not with string.'], [bold('Back: '), 'in about eight weeks.']),
   ],
 };

@@ -42,10 +42,10 @@ const runningGear: DemoEntry = {
 const roof: DemoEntry = {
   key: 'cv06', by: 'crew', daysAgo: 47, daysAgoTo: 46, stage: 'Skin and roof',
   title: 'Two hundred and twenty-four rivets',
-  lead: 'The roof sheet is on. Drilling took a day, riveting took less, and the part worth writing down is how we kept a three metre sheet from creeping.',
+  lead: 'The roof sheet is on. Drilling took a day, riveting took less, and the part worth writing down is how we kept a long sheet from creeping.',
   work: { amount: '11.2', unit: 'm', kind: 'roof seam sealed' },
   content: [
-    p('Ines writing. The old roof had been patched with bitumen, so there was nothing to copy the holes from. We marked the new line 12 mm in from the edge in blue, pricked it at 50 mm and drilled every fourth hole first.'),
+    p('Ines writing. The old roof had been patched with bitumen, so there was nothing to copy the holes from: two new sheets, lapped across the middle where the bow is. We marked the new line 12 mm in from the edge in blue, pricked it at 50 mm and drilled every fourth hole first.'),
     photos({ 'caravan-roof-sheet.jpg': 'Across two trestles, half drilled. The pins sit in every fourth hole and nothing moves.' }, 'cover'),
     worked('Skin pins in every fourth hole before any other hole was drilled through the frame.', 'The last hole met its mark within half a millimetre. On the old side panel, drilled from one end to the other, the sheet had crept 9 mm.', 'Start from the middle and pin outwards.'),
     time(took('ines', '7 h', 'drilling and riveting'), took('marlow', '7 h', 'drilling and riveting'), took('marlow', '2 h', 'marking out', 'setup')),
@@ -61,7 +61,7 @@ const roof: DemoEntry = {
       toShelf('sheet', '2 sheets', '148.00'), toShelf('rivet', '1 box', '27.40'), toShelf('sealant', '6 cartridges', '51.60'), toShelf('mastic', '3 rolls', '27.60'),
       straight('Skin pins and pliers', '26.00', 'tool'), notMine('Masking tape for the neighbour’s boat', '6.80'),
     ),
-    p('One of those cartridges goes back to me for the floor. Marlow says it is the most expensive loan he ever took.'),
+    p('One of those cartridges goes back to me for the floor. Marlow says it is the most expensive loan he ever took. The rest of the second sheet is standing behind the stove, waiting for the nearside corner, which will want the same in a year or two.'),
   ],
 };
 

@@ -51,7 +51,7 @@ const electrolysis: DemoEntry = {
       ['Four clamp plates, together', '10 h', '35 min'],
     ),
     photos({ 'lathe-handwheel.jpg': 'Half scrubbed, so that you can see what the tub leaves behind: black powder that a brush takes off.' }),
-    p('Bare iron out of the tub starts to rust while you watch, so each part was rinsed, dried in a warm oven and wiped with spindle oil within the half hour.'),
+    p('Bare iron out of the tub starts to rust while you watch, so each part was rinsed, dried in a warm oven and wiped with spindle oil within the half hour. I did not do that with the first clamp plate, and by supper it was orange again. It went back in for an hour and nobody was told.'),
     used(use('spindleOil', '1/2 US cup')),
     time(took('ines', '2 h', 'scrubbing and oiling'), took('ines', '2 h 15 min', 'tub, anodes and leads', 'setup'), waited('60 h', 'in the tub')),
     worked('Turning the part over half way through.', 'It works in line of sight: the side facing the anode cleans first. Turned at half time, both sides came out alike.', 'Use four anodes, one in each corner, and leave the part alone.'),
@@ -102,16 +102,16 @@ const pour: DemoEntry = {
       'Melt the old metal out and save it apart: nobody knows what is in it.',
       'Scrub the shells, smoke the mandrel with a candle so that nothing sticks to it, and set it on shims.',
       'Dam both ends with clay. Leave a spout twice as wide as seems needed.',
-      'Heat until a pine splinter just chars in the ladle, about 650 °F, and pour without stopping.',
+      'Heat until a pine splinter chars at once in the ladle, 800 °F by the thermometer, and pour without stopping.',
     ),
     photos({ 'lathe-bearing-pour.jpg': 'The second pour. One stream, no pause, and past the top so that it can shrink.' }, 'cover'),
-    wentWrong('Pouring with the mandrel only hand warm.', 'The metal froze in ripples half way round, what is called a cold shut. It all had to come out, and 0.6 lb went off as dross in melting it again.', 'Warm the mandrel and the headstock until spit dances on them, then check again just before the pour.'),
+    wentWrong('Pouring with the mandrel only hand warm.', 'The metal froze in ripples half way round, what is called a cold shut. It all had to come out, and 0.6 lb went off as dross in melting it again.', 'Warm mandrel and headstock until a 250 °F marking crayon melts on both, and check again just before the pour.'),
     used(use('whiteMetal', '5.4 lb'), waste('whiteMetal', '0.6 lb'), use('clay', '2 lb'), use('fuelGas', '2', 'whole')),
     time(took('ines', '3 h', 'heating and pouring'), took('marlow', '2 h', 'ladle'), took('ines', '3 h 30 min', 'drying, smoke and dams', 'setup'), waited('4 h', 'cooling')),
     cost(['Mandrel turned to size', 'service', '45.00']),
     bought({ supplier: 'Hardware store', tax: '0.84' }, toShelf('fuelGas', '2', '13.94')),
     p('Broken out of the clay the surface is the colour of a nickel and closed all over. It is eight thousandths tight on the spindle, as it should be. Next comes the scraper.'),
-    caution('gas'),
+    caution('hot-work'),
   ],
 };
 
@@ -121,7 +121,7 @@ const scraping: DemoEntry = {
   lead: 'Three evenings to take eight thousandths off by hand. Two thirds of each half carries now, and the spindle turns with one finger.',
   work: { amount: '2', unit: 'piece', kind: 'bearing scraped' },
   content: [
-    p('A smear of blue on the spindle, lay it in, a quarter turn each way, lift it out. What is blue is high. Scrape the blue off, wipe, and do it again. There is no way to hurry it, and after an hour there is no wish to.'),
+    p('A smear of blue on the spindle, lay it in, a quarter turn each way, lift it out. What is blue is high. Scrape the blue off, wipe, and do it again. There is no way to hurry it, and after an hour there is no wish to. I counted thirty-one rounds for the front half and twenty-six for the back, and the last five took off next to nothing.'),
     photos({ 'lathe-bearing-blue.jpg': 'The last but one round. Small even spots over two thirds is what you want: one big patch is a spindle riding on a hump.' }, 'cover'),
     bullets(
       ['Cross the direction of the scraper each round, or you make a washboard.'],

@@ -10,10 +10,10 @@ export const lathe: DemoBuild = {
   currency: 'USD', measures: 'us', method: 'average', visibility: 'public', costsShown: true,
   before: 'lathe-in-the-yard.jpg', after: 'lathe-running.jpg',
   stages: [
-    { title: 'Rescue and rust', money: '190', time: '24 h', work: { amount: '7', unit: 'piece', kind: 'part derusted' }, done: true },
-    { title: 'Bearings', money: '280', time: '30 h', work: { amount: '2', unit: 'piece', kind: 'bearing scraped' }, done: true },
-    { title: 'Treadle and drive', money: '260', time: '30 h', done: true },
-    { title: 'Paint and proving', money: '90', time: '12 h', work: { amount: '30', unit: 'ft2', kind: 'casting painted' } },
+    { title: 'Rescue and rust', money: '100', time: '24 h', work: { amount: '7', unit: 'piece', kind: 'part derusted' }, done: true },
+    { title: 'Bearings', money: '190', time: '26 h', work: { amount: '2', unit: 'piece', kind: 'bearing scraped' }, done: true },
+    { title: 'Treadle and drive', money: '250', time: '24 h', done: true },
+    { title: 'Paint and proving', money: '40', time: '12 h', work: { amount: '30', unit: 'ft2', kind: 'casting painted' } },
   ],
   materials: {
     penetrating: { name: 'Penetrating oil', dimension: 'volume', unit: 'us-cup', packs: { can: '1 gal' }, hazards: ['solvent'] },
@@ -23,7 +23,7 @@ export const lathe: DemoBuild = {
     spindleOil: { name: 'Spindle oil', dimension: 'volume', unit: 'us-cup', packs: { jug: '1 gal' } },
     whiteMetal: { name: 'White metal, tin based', dimension: 'mass', unit: 'lb', packs: { ingot: '5 lb' }, hazards: ['molten-metal'] },
     clay: { name: 'Damming clay', dimension: 'mass', unit: 'lb', packs: { tub: '5 lb' } },
-    fuelGas: { name: 'Torch gas cylinder', dimension: 'count', unit: 'piece', hazards: ['gas'] },
+    fuelGas: { name: 'Torch gas cylinder', dimension: 'count', unit: 'piece', hazards: ['hot-work'] },
     blue: { name: 'Marking blue', dimension: 'volume', unit: 'us-tsp', packs: { tube: '2 fl oz' } },
     pin: { name: 'Stitching pin, 1/4 in', dimension: 'count', unit: 'piece', packs: { bag: '20' } },
     key: { name: 'Stitching key', dimension: 'count', unit: 'piece', packs: { card: '5' } },

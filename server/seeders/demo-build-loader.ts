@@ -2,7 +2,7 @@ import { AppError } from '#contracts/errors.ts';
 import type { DemoBuild, DemoEntry, DemoWriter } from '#fixtures/demo-build.ts';
 import { documentOf, type Bench } from '#fixtures/entry-words.ts';
 import { entryDocument } from '#src/blocks/pure.ts';
-import { Build, Material, Person, Picture, Stage } from '#server/entities/index.ts';
+import { Build, Material, Person, Stage, type Picture } from '#server/entities/index.ts';
 import { joinCrew, startRestoration } from '#server/features/builds/builds.service.ts';
 import { replaceStages } from '#server/features/builds/stages.service.ts';
 import { saveTyped } from '#server/features/entries/save-working.service.ts';

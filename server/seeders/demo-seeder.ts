@@ -12,7 +12,9 @@ const dayMs = 24 * 60 * 60 * 1000;
 /** Days count back from the day of loading, so that the demo is always fresh. */
 function loadingDay(now: Date): LoadingDay {
   const day = (daysAgo: number) => new Date(now.getTime() - daysAgo * dayMs).toISOString().slice(0, 10);
-  return { day, evening: (daysAgo) => new Date(`${day(daysAgo)}T19:40:00Z`) };
+  // some evenings later than others, always the same for the same day
+  const minute = (daysAgo: number) => 10 + ((daysAgo * 17) % 50);
+  return { day, evening: (daysAgo) => new Date(`${day(daysAgo)}T19:${minute(daysAgo)}:00Z`) };
 }
 
 const callerOf = ({ id, handle, name, role }: Person): Caller => ({ id, handle, name, role: role ?? 'member', suspended: false });
