@@ -172,6 +172,8 @@ test('the shed serves several builds: what a day draws is moved in and used ther
   expect(await entryFigures(van, inVan)).toMatchObject({ used: 300 });
   expect(await entryFigures(boat, inBoat)).toMatchObject({ used: 500, wasted: 100 });
   // the boat's receipt brought nothing to the boat: the lines are the shed's
+  const charged = await shop.em().find(Movement, { material: screws.id }, { populate: ['build'], orderBy: { kind: 'asc', day: 'asc', place: 'asc' } });
+  expect(charged.map(({ kind, build }) => [kind, build?.slug ?? null])).toEqual([['bought', null], ['used', boat], ['used', van], ['wasted', boat]]);
   expect(await figures(boat)).toEqual({ ...noted, movedIn: 600, used: 500, wasted: 100, receipts: 1 });
   expect(await figures(van)).toEqual({ ...noted, movedIn: 300, used: 300 });
   expect(await shedOf(owner, 'GBP')).toMatchObject({ spent: 2000, left: 100, movedOut: 900, onOrder: 1000 });
