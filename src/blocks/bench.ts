@@ -1,19 +1,10 @@
-import { createContext, useContext } from 'react';
+import { createContext, useContext, useSyncExternalStore } from 'react';
 import type { LastTime } from '#contracts/entries.ts';
 import type { DeskPicture } from '#contracts/pictures.ts';
 import type { InputOf } from '#contracts/endpoint.ts';
 import type { addMaterial } from '#contracts/materials.ts';
 import type { BlockContext, MaterialFacts } from './block.ts';
-
-/** What a line of a block comes to, with everything before it in the ledger counted. */
-export interface LineReckoning {
-  /** Minor units of the build's currency; settled so far. */
-  readonly value: number;
-  /** Exact `n/d`: not bought yet. */
-  readonly short: string;
-  /** Exact `n/d`: on its shelf after this line; nothing where it reaches no shelf. */
-  readonly left: string | null;
-}
+import type { Figures, FiguresStore, LineReckoning } from './figures-store.ts';
 
 /** A picture on its way up, or stopped on it. */
 export interface PictureUpload {
@@ -40,23 +31,17 @@ export interface PicturesOnBench {
 export type MaterialInput = Omit<InputOf<typeof addMaterial>['body'], 'build'>;
 export type MaterialOutcome = { ok: true; material: MaterialFacts } | { ok: false; problem: string; fields: Readonly<Record<string, string>> };
 
-/** What the desk lends to the blocks on it: figures, materials, people, and the few things they may ask for. */
+/** What the desk lends to the blocks on it: figures, materials, people, and the few things they may ask for. It stays the same while somebody types. */
 export interface Bench {
   readonly context: BlockContext;
   readonly buildTitle: string;
   readonly people: readonly { handle: string; name: string }[];
   /** Most used first. */
   readonly materials: readonly MaterialFacts[];
-  /** By `block:line`. */
-  readonly lines: ReadonlyMap<string, LineReckoning>;
-  /** "650 ml left", on the build's shelf as it would stand after this entry; nothing where none was ever there. */
-  readonly leftWords: (material: number) => string | null;
-  /** Words for beside a field, once it has been left or signing off was tried. */
-  readonly fault: (path: string) => string | undefined;
+  readonly figures: FiguresStore;
   readonly touch: (path: string) => void;
   readonly addMaterial: (material: MaterialInput) => Promise<MaterialOutcome>;
   readonly lastTime: () => Promise<LastTime>;
-  readonly pictures: PicturesOnBench;
   /** Said aloud by a screen reader. */
   readonly say: (words: string) => void;
   /** Says what was taken out, and offers to put it back. */
@@ -70,4 +55,26 @@ export function useBench(): Bench {
   const bench = useContext(BenchContext);
   if (!bench) throw new Error('A block stands outside the desk');
   return bench;
+}
+
+// Apart from the bench, as it changes with every part of a picture that goes up.
+const PicturesContext = createContext<PicturesOnBench | null>(null);
+export const PicturesProvider = PicturesContext.Provider;
+
+export function usePictures(): PicturesOnBench {
+  const pictures = useContext(PicturesContext);
+  if (!pictures) throw new Error('A Photos block stands outside the desk');
+  return pictures;
+}
+
+/** One figure, drawn again only when it changes: `pick` gives a plain value or an object out of the store. */
+export function useFigure<T>(pick: (figures: Figures) => T): T {
+  const { figures } = useBench();
+  return useSyncExternalStore(figures.subscribe, () => pick(figures.read()));
+}
+export function useFault(path: string): string | undefined {
+  return useFigure(({ fault }) => fault(path));
+}
+export function useLineReckoning(block: string, line: string): LineReckoning | undefined {
+  return useFigure(({ lines }) => lines.get(`${block}:${line}`));
 }

@@ -50,7 +50,7 @@ function Handles() {
 export function BlockFrame({ kind, word, note, end, children }: BlockFrameProps) {
   const edge = kind ? edges[kind] : 'border-l-rule-strong';
   return (
-    <section aria-label={word} className={`num border border-l-[5px] border-rule ${edge} bg-card px-4 py-3.5 text-control wide:px-5`}>
+    <section role="group" aria-label={word} className={`num border border-l-[5px] border-rule ${edge} bg-card px-4 py-3.5 text-control wide:px-5`}>
       <div className="flex flex-wrap items-center gap-x-3 gap-y-1">
         <p className="flex flex-1 flex-wrap items-baseline gap-x-2.5">
           <b className={`font-head text-[1.0625rem] font-[740] font-stretch-[110%] ${kind ? words[kind] : 'text-ink'}`}>{word}</b>

@@ -26,8 +26,8 @@ export function contextOf(document: EntryDocument, context: EntryContext): Block
 }
 
 // One type's data always meets its own block, which the index type cannot say.
-function pureOf(type: BlockType): PureBlock<BlockType, unknown> {
-  return pureBlocks[type] as unknown as PureBlock<BlockType, unknown>;
+function pureOf(type: BlockType): PureBlock<BlockType> {
+  return pureBlocks[type] as unknown as PureBlock<BlockType>;
 }
 
 function entryFaults(document: EntryDocument): Record<string, string> {

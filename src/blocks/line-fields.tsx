@@ -1,6 +1,6 @@
 import type { ComponentProps, KeyboardEvent, ReactNode } from 'react';
 import { controlClass, controlProps, fieldId, FieldNotes } from '#src/components/field.tsx';
-import { useBench } from './bench.ts';
+import { useBench, useFault } from './bench.ts';
 
 /** 44 px for cold hands on a phone. */
 export const tall = 'max-wide:min-h-11';
@@ -26,7 +26,7 @@ function onEnterKey(act: (() => void) | undefined) {
 /** What every control of a line has: name, id, fault, and that leaving it shows the fault. */
 export function useLineControl(name: string, label: string) {
   const bench = useBench();
-  const error = bench.fault(name);
+  const error = useFault(name);
   return { error, control: controlProps({ name, label, error }), leave: () => bench.touch(name) };
 }
 
@@ -98,11 +98,11 @@ export function QuietSelect({ name, label, value, onValue, options, strong = fal
 
 /** The faults of a line, one under another, each tied to its field. */
 export function LineFaults({ names }: { names: readonly string[] }) {
-  const bench = useBench();
-  return names.map((name) => {
-    const error = bench.fault(name);
-    return error ? <FieldNotes key={name} id={fieldId(name)} error={error} /> : null;
-  });
+  return names.map((name) => <LineFault key={name} name={name} />);
+}
+
+function LineFault({ name }: { name: string }) {
+  return <FieldNotes id={fieldId(name)} error={useFault(name)} />;
 }
 
 export function optionsOf<T extends string>(words: Readonly<Record<T, string>>): Option[] {

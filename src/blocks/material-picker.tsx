@@ -75,7 +75,7 @@ export function MaterialPicker({ name, value, picked, onType, onPick, onNew }: M
       />
       <div id={listId} role="listbox" aria-label="Materials" hidden={!shown} className="absolute top-full left-0 z-20 mt-1 max-h-80 w-[min(24rem,78vw)] overflow-y-auto border border-rule-strong bg-card">
         {shown && found.map((material, index) => (
-          <Choice key={material.id} id={optionId(index)} active={index === at} onChoose={() => choose(index)} words={material.name} small={bench.leftWords(material.id)} />
+          <Choice key={material.id} id={optionId(index)} active={index === at} onChoose={() => choose(index)} words={material.name} small={bench.figures.read().leftWords(material.id)} />
         ))}
         {shown && offersNew && <Choice id={optionId(found.length)} active={at === found.length} onChoose={() => choose(found.length)} words={`Add “${typed}” to your materials`} small={null} />}
       </div>

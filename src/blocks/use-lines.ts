@@ -1,5 +1,5 @@
 import { nanoid } from 'nanoid';
-import { useEffect, useRef } from 'react';
+import { useEffect, useMemo, useRef } from 'react';
 import { fieldId } from '#src/components/field.tsx';
 import { useBench } from './bench.ts';
 import type { BlockDeskProps } from './desk-block.ts';
@@ -10,11 +10,22 @@ export function newId(): string {
   return nanoid(10);
 }
 
-/** Adding, changing and taking out the lines of a block; the focus follows the hand. */
-export function useLines<L extends Line, D extends { lines: L[] }>({ id: block, data, onChange }: BlockDeskProps<D>, blank: (id: string) => L, firstField: string) {
-  const bench = useBench();
+export interface LineActions<L extends Line> {
+  readonly add: (lines?: L[]) => void;
+  readonly change: (line: string, change: Partial<L>) => void;
+  /** Enter in a line: on to the next, or a new one after the last. */
+  readonly goOn: (line: string) => void;
+  readonly goTo: (line: string, field: string) => void;
+  readonly takeOut: (line: string, words: string) => void;
+}
+
+/** Adding, changing and taking out the lines of a block; the focus follows the hand. The actions stay the same while lines change. */
+export function useLines<L extends Line, D extends { lines: L[] }>(props: BlockDeskProps<D>, blank: (id: string) => L, firstField: string): LineActions<L> {
+  const { tookOut } = useBench();
+  const latest = useRef(props);
   const wanted = useRef<string | null>(null);
   useEffect(() => {
+    latest.current = props;
     if (wanted.current === null) return;
     const field = document.getElementById(fieldId(wanted.current));
     if (!field) return;
@@ -22,33 +33,35 @@ export function useLines<L extends Line, D extends { lines: L[] }>({ id: block, 
     field.focus();
   });
 
-  const withLines = (change: (lines: L[]) => L[]) => onChange((now) => ({ ...now, lines: change(now.lines) }));
-  const focus = (line: string, field: string) => { wanted.current = `${block}.${line}.${field}`; };
-
-  const add = (lines: L[] = [blank(newId())]) => {
-    const first = lines[0];
-    if (!first) return;
-    focus(first.id, firstField);
-    withLines((now) => [...now, ...lines]);
-  };
-  return {
-    add,
-    change: (line: string, change: Partial<L>) => withLines((now) => now.map((one) => (one.id === line ? { ...one, ...change } : one))),
-    /** Enter in a line: on to the next, or a new one after the last. */
-    goOn: (line: string) => {
-      const next = data.lines[data.lines.findIndex((one) => one.id === line) + 1];
-      if (!next) add();
-      else document.getElementById(fieldId(`${block}.${next.id}.${firstField}`))?.focus();
-    },
-    goTo: (line: string, field: string) => document.getElementById(fieldId(`${block}.${line}.${field}`))?.focus(),
-    takeOut: (line: string, words: string) => {
-      const place = data.lines.findIndex((one) => one.id === line);
-      const taken = data.lines[place];
-      if (!taken) return;
-      const neighbour = data.lines[place + 1] ?? data.lines[place - 1];
-      if (neighbour) focus(neighbour.id, firstField);
-      withLines((now) => now.filter((one) => one.id !== line));
-      bench.tookOut(`${words} taken out`, () => withLines((now) => (now.some((one) => one.id === line) ? now : [...now.slice(0, place), taken, ...now.slice(place)])));
-    },
-  };
+  return useMemo(() => {
+    const withLines = (change: (lines: L[]) => L[]) => latest.current.onChange((now) => ({ ...now, lines: change(now.lines) }));
+    const path = (line: string, field: string) => `${latest.current.id}.${line}.${field}`;
+    const goTo = (line: string, field: string) => document.getElementById(fieldId(path(line, field)))?.focus();
+    const add = (lines: L[] = [blank(newId())]) => {
+      const first = lines[0];
+      if (!first) return;
+      wanted.current = path(first.id, firstField);
+      withLines((now) => [...now, ...lines]);
+    };
+    return {
+      add, goTo,
+      change: (line, change) => withLines((now) => now.map((one) => (one.id === line ? { ...one, ...change } : one))),
+      goOn: (line) => {
+        const { lines } = latest.current.data;
+        const next = lines[lines.findIndex((one) => one.id === line) + 1];
+        if (next) goTo(next.id, firstField);
+        else add();
+      },
+      takeOut: (line, words) => {
+        const { lines } = latest.current.data;
+        const place = lines.findIndex((one) => one.id === line);
+        const taken = lines[place];
+        if (!taken) return;
+        const neighbour = lines[place + 1] ?? lines[place - 1];
+        if (neighbour) wanted.current = path(neighbour.id, firstField);
+        withLines((now) => now.filter((one) => one.id !== line));
+        tookOut(`${words} taken out`, () => withLines((now) => (now.some((one) => one.id === line) ? now : [...now.slice(0, place), taken, ...now.slice(place)])));
+      },
+    };
+  }, [blank, firstField, tookOut]);
 }

@@ -1,22 +1,22 @@
-import { useState } from 'react';
+import { memo, useState } from 'react';
 import { formatMoney } from '#domain/format.ts';
 import { readMoney } from '#domain/money.ts';
 import { costCategories, costCategoryWords, lineGoesList, lineGoesWords } from '#contracts/words.ts';
 import { AmountInput, useAmountWords, useShownBack } from '../amount-input.tsx';
-import { useBench } from '../bench.ts';
+import { useBench, useLineReckoning } from '../bench.ts';
 import type { MaterialFacts } from '../block.ts';
 import { FigureInput, LineFaults, LineInput, optionsOf, QuietSelect, tall } from '../line-fields.tsx';
 import { MaterialPicker } from '../material-picker.tsx';
 import { NewMaterial } from '../new-material.tsx';
 import { TakeOutLine } from '../take-out-line.tsx';
 import { unitWordOf } from '../unit-choice.ts';
-import type { useLines } from '../use-lines.ts';
-import type { BoughtData, BoughtLine } from './bought.ts';
+import type { LineActions } from '../use-lines.ts';
+import type { BoughtLine } from './bought.ts';
 
 interface BoughtLineDeskProps {
   block: string;
   line: BoughtLine;
-  lines: ReturnType<typeof useLines<BoughtLine, BoughtData>>;
+  lines: LineActions<BoughtLine>;
   /** The receipt's. */
   currency: string;
   /** Minor units of the build's currency. */
@@ -73,16 +73,17 @@ function Where({ block, line, lines }: Pick<BoughtLineDeskProps, 'block' | 'line
 }
 
 /** One line of a receipt: what, how much, what it says on the paper, and what it came to at the door. */
-export function BoughtLineDesk({ block, line, lines, currency, door, foreign }: BoughtLineDeskProps) {
-  const { context, lines: reckonings } = useBench();
+export const BoughtLineDesk = memo(function BoughtLineDesk({ block, line, lines, currency, door, foreign }: BoughtLineDeskProps) {
+  const { context } = useBench();
+  const reckoning = useLineReckoning(block, line.id);
   const shownBack = useShownBack(line);
   const inWords = useAmountWords(line);
   const path = (field: string) => `${block}.${line.id}.${field}`;
   const of = line.name.trim() || 'this line';
   const stocked = line.goes === 'shelf' || line.goes === 'shed';
-  const left = reckonings.get(`${block}:${line.id}`)?.left;
+  const left = reckoning?.left;
   const own = readMoney(line.money, currency);
-  const differs = foreign || !own.ok || own.value.minor !== door;
+  const differs = own.ok && (foreign || own.value.minor !== door);
   const after = [shownBack, stocked && left ? `then ${inWords(left)} there` : '', differs ? `${formatMoney(door, context.currency)} to the door` : ''].filter(Boolean);
   return (
     <li className="m-0! border-b border-rule py-2.5">
@@ -99,4 +100,4 @@ export function BoughtLineDesk({ block, line, lines, currency, door, foreign }: 
       <LineFaults names={[path('material'), path('name'), path('amount'), path('money')]} />
     </li>
   );
-}
+});

@@ -1,7 +1,7 @@
 import { SelectField } from '#src/components/select-field.tsx';
 import { TextArea } from '#src/components/text-area.tsx';
 import { hazardTags } from '#contracts/words.ts';
-import { useBench } from '../bench.ts';
+import { useBench, useFault } from '../bench.ts';
 import { BlockFrame } from '../block-frame.tsx';
 import { deskBlock, type BlockDeskProps } from '../desk-block.ts';
 import { LabelledInput } from '../line-fields.tsx';
@@ -14,7 +14,7 @@ function CautionDesk({ id, data, onChange }: BlockDeskProps<CautionData>) {
   const bench = useBench();
   const listed = data.hazard === null ? null : cautionFor(data.hazard);
   const pick = (value: string) => onChange((now) => ({ ...now, hazard: hazardTags.find((tag) => tag === value) ?? null }));
-  const error = bench.fault(`${id}.words`);
+  const error = useFault(`${id}.words`);
   return (
     <BlockFrame kind="wrong" word="Caution" note="beside what it warns of">
       <div className="mt-2 space-y-3">

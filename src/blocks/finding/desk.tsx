@@ -1,5 +1,5 @@
 import { BlockFrame } from '../block-frame.tsx';
-import { useBench } from '../bench.ts';
+import { useBench, useFault } from '../bench.ts';
 import { Choice } from '#src/components/choice.tsx';
 import { TextArea } from '#src/components/text-area.tsx';
 import { deskBlock, type BlockDeskProps } from '../desk-block.ts';
@@ -7,15 +7,17 @@ import { blankFinding, finding, type FindingData } from './finding.ts';
 
 const verdicts = [{ value: 'worked', label: 'Worked' }, { value: 'wrong', label: 'Went wrong' }];
 
+type Part = 'tried' | 'happened' | 'instead';
+
+function FindingWords({ id, name, label, value, onWords }: { id: string; name: Part; label: string; value: string; onWords: (words: string) => void }) {
+  const { touch } = useBench();
+  const path = `${id}.${name}`;
+  return <TextArea name={path} label={label} rows={2} value={value} error={useFault(path)} maxLength={2000} onChange={(event) => onWords(event.target.value)} onBlur={() => touch(path)} />;
+}
+
 function FindingDesk({ id, data, onChange }: BlockDeskProps<FindingData>) {
-  const bench = useBench();
   const wrong = data.verdict === 'wrong';
-  const field = (name: 'tried' | 'happened' | 'instead', label: string) => (
-    <TextArea
-      name={`${id}.${name}`} label={label} rows={2} value={data[name]} error={bench.fault(`${id}.${name}`)} maxLength={2000}
-      onChange={(event) => { const words = event.target.value; onChange((now) => ({ ...now, [name]: words })); }} onBlur={() => bench.touch(`${id}.${name}`)}
-    />
-  );
+  const field = (name: Part, label: string) => <FindingWords id={id} name={name} label={label} value={data[name]} onWords={(words) => onChange((now) => ({ ...now, [name]: words }))} />;
   return (
     <BlockFrame kind={data.verdict} word={wrong ? 'Went wrong' : 'Worked'}>
       <div className="mt-2 space-y-3">

@@ -1,7 +1,7 @@
 import { useRef, useState, type DragEvent } from 'react';
 import { Button } from '#src/components/button.tsx';
 import { plural } from '#domain/format.ts';
-import { useBench } from '../bench.ts';
+import { useBench, usePictures } from '../bench.ts';
 import { BlockFrame } from '../block-frame.tsx';
 import { deskBlock, type BlockDeskProps } from '../desk-block.ts';
 import { PhotoDesk } from './photo-desk.tsx';
@@ -13,7 +13,8 @@ function imagesOf(list: DataTransfer | null): File[] {
 }
 
 function PhotosDesk({ id, data, onChange }: BlockDeskProps<PhotosData>) {
-  const { pictures, tookOut } = useBench();
+  const { tookOut } = useBench();
+  const pictures = usePictures();
   const picker = useRef<HTMLInputElement>(null);
   const camera = useRef<HTMLInputElement>(null);
   const [over, setOver] = useState(false);

@@ -1,5 +1,5 @@
 import { Picture } from '#src/components/picture.tsx';
-import { useBench } from '../bench.ts';
+import { usePictures } from '../bench.ts';
 import { LabelledInput } from '../line-fields.tsx';
 import type { Photo } from './photos.ts';
 
@@ -17,7 +17,7 @@ const quiet = 'min-h-8 rounded-edge px-2 text-small text-ink-soft hover:bg-hover
 
 /** One photo: its words, its place, whether it is the cover. */
 export function PhotoDesk({ block, photo, place, last, onPhoto, onMove, onTakeOut }: PhotoDeskProps) {
-  const { pictures } = useBench();
+  const pictures = usePictures();
   const view = pictures.of(photo.picture)?.picture;
   const which = `photo ${place + 1}`;
   const path = (field: string) => `${block}.${photo.id}.${field}`;

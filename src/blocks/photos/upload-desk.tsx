@@ -1,4 +1,4 @@
-import { useBench, type PictureUpload } from '../bench.ts';
+import { usePictures, type PictureUpload } from '../bench.ts';
 import { textButton } from '../block-frame.tsx';
 
 function mb(bytes: number): string {
@@ -17,7 +17,7 @@ function words({ state, sent, size, problem }: PictureUpload): string {
 
 /** A photo on its way up, in the place it will have. */
 export function UploadDesk({ upload }: { upload: PictureUpload }) {
-  const { pictures } = useBench();
+  const pictures = usePictures();
   const { id, name, state } = upload;
   const wrong = state === 'failed' || state === 'refused';
   return (

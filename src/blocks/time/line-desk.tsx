@@ -1,3 +1,4 @@
+import { memo } from 'react';
 import { fieldId, controlClass } from '#src/components/field.tsx';
 import { readMinutes } from '#domain/duration.ts';
 import { formatMinutes } from '#domain/format.ts';
@@ -5,8 +6,8 @@ import { timeKinds, timeKindWords, type TimeKind } from '#contracts/words.ts';
 import { useBench } from '../bench.ts';
 import { FigureInput, LineFaults, LineInput, optionsOf, QuietSelect, tall } from '../line-fields.tsx';
 import { TakeOutLine } from '../take-out-line.tsx';
-import type { useLines } from '../use-lines.ts';
-import type { TimeData, TimeLineData } from './time.ts';
+import type { LineActions } from '../use-lines.ts';
+import type { TimeLineData } from './time.ts';
 
 const somebodyElse = ' else';
 const kinds = optionsOf(timeKindWords);
@@ -17,7 +18,7 @@ function kindOf(value: string): TimeKind {
 interface TimeLineDeskProps {
   block: string;
   line: TimeLineData;
-  lines: ReturnType<typeof useLines<TimeLineData, TimeData>>;
+  lines: LineActions<TimeLineData>;
 }
 
 /** Who: somebody of the build, or just a name. */
@@ -42,7 +43,7 @@ function WhoSelect({ block, line, lines }: TimeLineDeskProps) {
 }
 
 /** One person's time, or waiting for something to cure. */
-export function TimeLineDesk(props: TimeLineDeskProps) {
+export const TimeLineDesk = memo(function TimeLineDesk(props: TimeLineDeskProps) {
   const { block, line, lines } = props;
   const path = (field: string) => `${block}.${line.id}.${field}`;
   const minutes = readMinutes(line.time);
@@ -72,4 +73,4 @@ export function TimeLineDesk(props: TimeLineDeskProps) {
       <LineFaults names={[path('name'), path('time')]} />
     </li>
   );
-}
+});

@@ -2,9 +2,10 @@ import { useState } from 'react';
 import { exactFrom } from '#domain/quantity.ts';
 import { formatMoney } from '#domain/format.ts';
 import { typedAmount } from '../amount-line.ts';
-import { useBench } from '../bench.ts';
+import { useBench, useFigure } from '../bench.ts';
 import { BlockFrame, BlockSum, textButton } from '../block-frame.tsx';
 import { deskBlock, type BlockDeskProps } from '../desk-block.ts';
+import type { Figures } from '../figures-store.ts';
 import { shortTitle } from '../short-title.ts';
 import { newId, useLines } from '../use-lines.ts';
 import { UsedLineDesk } from './line-desk.tsx';
@@ -16,9 +17,9 @@ function UsedDesk(props: BlockDeskProps<UsedData>) {
   const lines = useLines<UsedLine, UsedData>(props, blankUsedLine, 'material');
   const [asking, setAsking] = useState(false);
   const currency = bench.context.currency;
-  const sumOf = (fate: UsedLine['fate']) => data.lines.filter((line) => line.fate === fate).reduce((sum, line) => sum + (bench.lines.get(`${id}:${line.id}`)?.value ?? 0), 0);
-  const [usedSum, wastedSum] = [sumOf('used'), sumOf('wasted')];
-  const short = data.lines.some((line) => exactFrom(bench.lines.get(`${id}:${line.id}`)?.short ?? '0/1').gt(0));
+  const sumOf = (fate: UsedLine['fate']) => ({ lines: priced }: Figures) => data.lines.filter((line) => line.fate === fate).reduce((sum, line) => sum + (priced.get(`${id}:${line.id}`)?.value ?? 0), 0);
+  const [usedSum, wastedSum] = [useFigure(sumOf('used')), useFigure(sumOf('wasted'))];
+  const short = useFigure(({ lines: priced }) => data.lines.some((line) => exactFrom(priced.get(`${id}:${line.id}`)?.short ?? '0/1').gt(0)));
 
   const sameAsLastTime = async () => {
     setAsking(true);

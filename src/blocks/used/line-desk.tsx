@@ -1,26 +1,25 @@
-import { useState } from 'react';
+import { memo, useState } from 'react';
 import { exactFrom } from '#domain/quantity.ts';
 import { formatMoney } from '#domain/format.ts';
 import { countsWords } from '#contracts/words.ts';
 import { AmountInput, useAmountWords, useShownBack } from '../amount-input.tsx';
-import { useBench } from '../bench.ts';
+import { useBench, useLineReckoning } from '../bench.ts';
 import type { MaterialFacts } from '../block.ts';
+import type { LineReckoning } from '../figures-store.ts';
 import { LineFaults, optionsOf, QuietSelect } from '../line-fields.tsx';
 import { MaterialPicker } from '../material-picker.tsx';
 import { NewMaterial } from '../new-material.tsx';
 import { TakeOutLine } from '../take-out-line.tsx';
 import { unitWordOf } from '../unit-choice.ts';
-import type { useLines } from '../use-lines.ts';
-import type { UsedData, UsedLine } from './used.ts';
+import type { LineActions } from '../use-lines.ts';
+import type { UsedLine } from './used.ts';
 
 const fates = [{ value: 'used', label: 'Used' }, { value: 'wasted', label: 'Wasted' }];
 const places = [{ value: 'shelf', label: 'Off the shelf' }, { value: 'shed', label: 'From the shed' }];
 
 /** What is left after a line, or by how much it falls short. */
-function useLeft(block: string, line: UsedLine): { words: string; short: boolean } {
-  const bench = useBench();
+function useLeft(line: UsedLine, reckoning: LineReckoning | undefined): { words: string; short: boolean } {
   const inWords = useAmountWords(line);
-  const reckoning = bench.lines.get(`${block}:${line.id}`);
   if (!reckoning || reckoning.left === null) return { words: '', short: false };
   const short = exactFrom(reckoning.short).gt(0);
   return short ? { words: `${inWords(reckoning.short)} short`, short } : { words: `${inWords(reckoning.left)} left`, short };
@@ -29,17 +28,18 @@ function useLeft(block: string, line: UsedLine): { words: string; short: boolean
 interface UsedLineDeskProps {
   block: string;
   line: UsedLine;
-  lines: ReturnType<typeof useLines<UsedLine, UsedData>>;
+  lines: LineActions<UsedLine>;
 }
 
 /** One line: the material, how much, what is left after it, what it cost; below it what mostly stays as it is. */
-export function UsedLineDesk({ block, line, lines }: UsedLineDeskProps) {
+export const UsedLineDesk = memo(function UsedLineDesk({ block, line, lines }: UsedLineDeskProps) {
   const bench = useBench();
   const [newName, setNewName] = useState<string | null>(null);
   const shownBack = useShownBack(line);
-  const left = useLeft(block, line);
+  const reckoning = useLineReckoning(block, line.id);
+  const left = useLeft(line, reckoning);
   const path = (field: string) => `${block}.${line.id}.${field}`;
-  const value = bench.lines.get(`${block}:${line.id}`)?.value;
+  const value = reckoning?.value;
   const change = (part: Partial<UsedLine>) => lines.change(line.id, part);
   const pick = (material: MaterialFacts) => {
     const same = line.material === material.id;
@@ -72,4 +72,4 @@ export function UsedLineDesk({ block, line, lines }: UsedLineDeskProps) {
       <LineFaults names={[path('material'), path('amount')]} />
     </li>
   );
-}
+});

@@ -5,7 +5,7 @@ import { whatOneTakes } from '#domain/one-takes.ts';
 import { exactFrom, exactText } from '#domain/quantity.ts';
 import { deriveEntry, readEntry, type EntryDerivation, type EntryDocument, type MaterialFacts } from '#src/blocks/pure.ts';
 import type { EntryContext } from '#src/blocks/derive-entry.ts';
-import type { LineReckoning } from '#src/blocks/bench.ts';
+import type { LineReckoning } from '#src/blocks/figures-store.ts';
 import { lineKey, shelfKey, shelfReplay, type ShelfName } from './shelf-replay.ts';
 import { stageReckoning, type StageReckoning } from './stage-reckoning.ts';
 

@@ -4,7 +4,7 @@ import type { DeskView } from '#contracts/entries.ts';
 import { ErrorSummary } from '#src/components/error-summary.tsx';
 import { PageColumns } from '#src/components/page-columns.tsx';
 import { PageFrame } from '#src/components/page-frame.tsx';
-import { BenchProvider } from '#src/blocks/bench.ts';
+import { BenchProvider, PicturesProvider } from '#src/blocks/bench.ts';
 import { useEntrySettled } from '#src/queries/entries.ts';
 import { putBack } from './block-commands.ts';
 import { deskLedger } from './desk-ledger.ts';
@@ -17,8 +17,9 @@ import { Notices, type TookOutNotice } from './notices.tsx';
 import { OpeningNotice } from './opening-notice.tsx';
 import { goneWords, type GoneBlock } from './took-out.ts';
 import { putIn, Tray } from './tray.tsx';
-import { useBenchOf } from './use-bench.ts';
+import { useBenchOf, useFiguresOf } from './use-bench.ts';
 import { useFaults } from './use-faults.ts';
+import { useMissingHistory } from './use-missing-history.ts';
 import { useMaterials } from './use-materials.ts';
 import { useSaver } from './use-saver.ts';
 import { useSignOff } from './use-sign-off.ts';
@@ -55,9 +56,10 @@ export function DeskOpen({ view, start, at, kept, onReopen }: DeskOpenProps) {
   const { materials, byId, addMaterial } = useMaterials(view);
   const ledger = useMemo(() => deskLedger(view), [view]);
   const reckoning = useMemo(() => ledger.reckon(document, byId), [ledger, document, byId]);
-  const signing = useSignOff({ at, kept, saver, calls, reckonNow: () => ledger.reckon(current.current, byId), photosGoingUp: () => uploads.state().going !== null });
+  useMissingHistory(view, reckoning, save);
+  const signing = useSignOff({ at, kept, saver, calls, reckonNow: () => ledger.reckon(current.current, byId), uploads: uploads.state });
   const { touch, fault, shown } = useFaults(reckoning, signing.attempt > 0, signing.serverFaults);
-  const bench = useBenchOf({ view, document, reckoning, materials, byId, addMaterial, pictures, fault, touch, say: setSaid, tookOut });
+  const bench = useBenchOf({ view, document, materials, byId, addMaterial, touch, say: setSaid, tookOut }, useFiguresOf(view, reckoning, byId, fault));
 
   const preview = async () => {
     await saver.flush();
@@ -93,6 +95,7 @@ export function DeskOpen({ view, start, at, kept, onReopen }: DeskOpenProps) {
   };
   return (
     <BenchProvider value={bench}>
+    <PicturesProvider value={pictures}>
       <PageFrame>
         <h1 className="sr-only">Write up: {document.title.trim() || 'a day'}</h1>
         <PageColumns
@@ -128,6 +131,7 @@ export function DeskOpen({ view, start, at, kept, onReopen }: DeskOpenProps) {
           <NewerTextDialog view={view} context={{ measures: view.build.measures, currency: view.build.currency, materials: byId }} mine={document} newer={newer} onChoose={choose} onLater={() => setLater(true)} />
         )}
       </PageFrame>
+    </PicturesProvider>
     </BenchProvider>
   );
 }

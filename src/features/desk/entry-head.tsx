@@ -2,7 +2,7 @@ import { useState } from 'react';
 import { Link } from 'react-router-dom';
 import type { DeskView } from '#contracts/entries.ts';
 import { controlClass, Field, fieldId, FieldNotes } from '#src/components/field.tsx';
-import { useBench } from '#src/blocks/bench.ts';
+import { useBench, useFault } from '#src/blocks/bench.ts';
 import { tall } from '#src/blocks/line-fields.tsx';
 import type { EntryDocument } from '#src/blocks/pure.ts';
 import { WorkDoneField } from './work-done-field.tsx';
@@ -17,13 +17,13 @@ const compact = `${controlClass} ${tall}`;
 
 /** The facts above the words: build, day, stage, work done, title, lead. */
 export function EntryHead({ view, document, onHead }: EntryHeadProps) {
-  const bench = useBench();
+  const stageFault = useFault('stage');
   return (
     <>
       <p className="text-note"><Link to={`/builds/${view.build.slug}`} className="lettering-name text-ink">{view.build.title}</Link></p>
       <div className="mt-3 flex flex-wrap items-start gap-x-3 gap-y-3">
         <DayField document={document} onHead={onHead} />
-        <Field name="stage" label="Stage" error={bench.fault('stage')}>
+        <Field name="stage" label="Stage" error={stageFault}>
           {(control) => (
             <select {...control} value={document.stage ?? ''} onChange={(event) => onHead({ stage: event.target.value === '' ? null : Number(event.target.value) })} className={`${compact} select-control w-auto! min-w-32 max-w-48 pr-8`}>
               <option value="">No stage</option>
@@ -34,11 +34,11 @@ export function EntryHead({ view, document, onHead }: EntryHeadProps) {
         <WorkDoneField work={document.work} kinds={view.workKinds} onWork={(work) => onHead({ work })} />
       </div>
       <WordsField
-        name="title" label="Title" value={document.title} most={140} placeholder="What was done" onValue={(title) => onHead({ title })}
+        name="title" label="Title" value={document.title} most={140} placeholder="What was done" next="lead" onValue={(title) => onHead({ title })}
         look="lettering-page mt-5 text-ink placeholder:text-ink-faint"
       />
       <WordsField
-        name="lead" label="Lead, one or two sentences for the lists" value={document.lead} most={600} placeholder="One or two sentences for the lists" onValue={(lead) => onHead({ lead })}
+        name="lead" label="Lead, one or two sentences for the lists" value={document.lead} most={600} placeholder="One or two sentences for the lists" next="content" onValue={(lead) => onHead({ lead })}
         look="mt-3 max-w-[56ch] font-read text-[1.125rem]/[1.5] text-ink-soft wide:text-lede"
       />
     </>
@@ -47,16 +47,17 @@ export function EntryHead({ view, document, onHead }: EntryHeadProps) {
 
 function DayField({ document, onHead }: Omit<EntryHeadProps, 'view'>) {
   const bench = useBench();
+  const faults = { day: useFault('day'), dayTo: useFault('dayTo') };
   const [spans, setSpans] = useState(document.dayTo !== null);
   const shown = spans || document.dayTo !== null;
   return (
     <div>
       <div className="flex items-start gap-1.5">
-        <Field name="day" label={shown ? 'From' : 'Day of work'} error={bench.fault('day')}>
+        <Field name="day" label={shown ? 'From' : 'Day of work'} error={faults.day}>
           {(control) => <input {...control} type="date" required value={document.day} onChange={(event) => event.target.value !== '' && onHead({ day: event.target.value })} className={`${compact} w-auto!`} />}
         </Field>
         {shown && (
-          <Field name="dayTo" label="To" error={bench.fault('dayTo')}>
+          <Field name="dayTo" label="To" error={faults.dayTo}>
             {(control) => <input {...control} type="date" min={document.day} value={document.dayTo ?? ''} onChange={(event) => onHead({ dayTo: event.target.value || null })} onBlur={() => bench.touch('dayTo')} className={`${compact} w-auto!`} />}
           </Field>
         )}
@@ -78,13 +79,15 @@ interface WordsFieldProps {
   most: number;
   placeholder: string;
   look: string;
+  /** Where Enter goes on. */
+  next: string;
   onValue: (value: string) => void;
 }
 
 /** Written where readers will read it, in the lettering they will see. Line breaks have no place here. */
-function WordsField({ name, label, value, most, placeholder, look, onValue }: WordsFieldProps) {
+function WordsField({ name, label, value, most, placeholder, look, next, onValue }: WordsFieldProps) {
   const bench = useBench();
-  const error = bench.fault(name);
+  const error = useFault(name);
   const id = fieldId(name);
   return (
     <div>
@@ -92,7 +95,11 @@ function WordsField({ name, label, value, most, placeholder, look, onValue }: Wo
         id={id} name={name} aria-label={label} aria-invalid={error ? true : undefined} aria-describedby={error ? `${id}-error` : undefined}
         rows={1} value={value} maxLength={most} placeholder={placeholder}
         onChange={(event) => onValue(event.target.value.replaceAll('\n', ' '))} onBlur={() => bench.touch(name)}
-        onKeyDown={(event) => { if (event.key === 'Enter') event.preventDefault(); }}
+        onKeyDown={(event) => {
+          if (event.key !== 'Enter' || event.nativeEvent.isComposing) return;
+          event.preventDefault();
+          document.getElementById(fieldId(next))?.focus();
+        }}
         className={`block field-sizing-content w-full resize-none rounded-edge bg-transparent ${look} aria-[invalid]:border-l-[3px] aria-[invalid]:border-lead aria-[invalid]:pl-3`}
       />
       <FieldNotes id={id} error={error} />

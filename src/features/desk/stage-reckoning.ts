@@ -3,7 +3,7 @@ import { finishAt } from '#domain/forecast.ts';
 import { exactFrom, exactText } from '#domain/quantity.ts';
 import { readAmountOfWork } from '#domain/work.ts';
 import type { EntryDerivation, EntryDocument } from '#src/blocks/pure.ts';
-import type { LineReckoning } from '#src/blocks/bench.ts';
+import type { LineReckoning } from '#src/blocks/figures-store.ts';
 import type { DayFigures } from './desk-ledger.ts';
 import { lineKey } from './shelf-replay.ts';
 

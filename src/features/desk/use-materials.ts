@@ -1,4 +1,4 @@
-import { useMemo, useState } from 'react';
+import { useCallback, useMemo, useState } from 'react';
 import type { DeskView } from '#contracts/entries.ts';
 import { AppError } from '#contracts/errors.ts';
 import type { MaterialInput, MaterialOutcome } from '#src/blocks/bench.ts';
@@ -23,7 +23,7 @@ export function useMaterials(view: DeskView) {
     return all.toSorted((a, b) => (uses.get(b.id) ?? 0) - (uses.get(a.id) ?? 0) || a.name.localeCompare(b.name, 'en'));
   }, [view, added]);
   const byId = useMemo(() => new Map(materials.map((material) => [material.id, material])), [materials]);
-  const addMaterial = async (input: MaterialInput): Promise<MaterialOutcome> => {
+  const addMaterial = useCallback(async (input: MaterialInput): Promise<MaterialOutcome> => {
     try {
       const material = await mutateAsync(input);
       setAdded((now) => [...now, material]);
@@ -32,6 +32,6 @@ export function useMaterials(view: DeskView) {
       if (!(cause instanceof AppError)) throw cause;
       return { ok: false, problem: cause.message, fields: cause.fields ?? {} };
     }
-  };
+  }, [mutateAsync]);
   return { materials, byId, addMaterial };
 }

@@ -7,6 +7,7 @@ import type { DeskReckoning } from './desk-ledger.ts';
 import { deskFaults } from './faults.ts';
 import type { KeptAt, KeptHere } from './kept-here.ts';
 import type { NewerText, Saver } from './saver.ts';
+import type { UploadsState } from './uploads.ts';
 
 export interface SignOffParts {
   at: KeptAt;
@@ -15,13 +16,19 @@ export interface SignOffParts {
   calls: ReturnType<typeof useEntryCalls>;
   /** The text as it is now, read and reckoned. */
   reckonNow: () => DeskReckoning;
-  photosGoingUp: () => boolean;
+  uploads: () => UploadsState;
 }
 
-const stillGoing = 'Photos are still going up. Wait for them, or stop them.';
+/** A photo on its way, or stopped on it, is in nobody's text yet: signing off would leave it behind unsaid. */
+export function photosOnTheWay({ uploads, going }: UploadsState): string | null {
+  if (going) return 'Photos are still going up. Wait for them, or stop them and leave them out.';
+  const stuck = uploads.filter(({ state }) => state === 'failed' || state === 'stopped').length;
+  if (stuck === 0) return null;
+  return stuck === 1 ? 'A photo has not gone up. Try it again, or leave it out.' : `${stuck} photos have not gone up. Try them again, or leave them out.`;
+}
 
 /** Publishing the day: faults first, each leading to its field; then one call, and on to the page. */
-export function useSignOff({ at, kept, saver, calls, reckonNow, photosGoingUp }: SignOffParts) {
+export function useSignOff({ at, kept, saver, calls, reckonNow, uploads }: SignOffParts) {
   const navigate = useNavigate();
   const settled = useEntrySettled(at);
   const [pending, setPending] = useState(false);
@@ -48,7 +55,8 @@ export function useSignOff({ at, kept, saver, calls, reckonNow, photosGoingUp }:
     if (pending) return;
     const reckoning = reckonNow();
     const found = deskFaults(reckoning.derived.faults, reckoning.document).map(({ path, words }) => ({ name: path, message: words }));
-    if (photosGoingUp()) found.push({ name: '', message: stillGoing });
+    const onTheWay = photosOnTheWay(uploads());
+    if (onTheWay) found.push({ name: '', message: onTheWay });
     setServerFaults({});
     if (found.length > 0) {
       refuse(found);

@@ -1,5 +1,5 @@
 import { controlClass, fieldId, FieldNotes } from '#src/components/field.tsx';
-import { useBench } from '#src/blocks/bench.ts';
+import { useBench, useFault } from '#src/blocks/bench.ts';
 import { tall } from '#src/blocks/line-fields.tsx';
 import { workUnits, type WorkDone } from '#src/blocks/pure.ts';
 import { workUnitWords } from './work-words.ts';
@@ -21,12 +21,12 @@ export function WorkDoneField({ work, kinds, onWork }: WorkDoneFieldProps) {
     const next = { ...now, ...part };
     onWork(next.amount === '' && next.kind === '' && next.unit === 'piece' ? null : next);
   };
-  const faults = { amount: bench.fault('work.amount'), kind: bench.fault('work.kind') };
+  const faults = { amount: useFault('work.amount'), kind: useFault('work.kind') };
   const ids = { amount: fieldId('work.amount'), kind: fieldId('work.kind') };
   return (
     <fieldset>
       <legend className="mb-[5px] text-small font-semibold">Work done</legend>
-      <div className="flex gap-1">
+      <div className="flex flex-wrap gap-1">
         <input
           id={ids.amount} aria-label="How much work" aria-invalid={faults.amount ? true : undefined} aria-describedby={faults.amount ? `${ids.amount}-error` : undefined}
           inputMode="decimal" autoComplete="off" value={now.amount} maxLength={20} placeholder="17" onChange={(event) => change({ amount: event.target.value })} onBlur={() => bench.touch('work.amount')}

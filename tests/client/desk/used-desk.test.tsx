@@ -1,8 +1,9 @@
 import { cleanup, render, screen, within } from '@testing-library/react';
 import { userEvent } from '@testing-library/user-event';
-import { useState } from 'react';
+import { useEffect, useState } from 'react';
 import { afterEach, describe, expect, test, vi } from 'vitest';
 import { BenchProvider, type Bench } from '#src/blocks/bench.ts';
+import { makeFiguresStore } from '#src/blocks/figures-store.ts';
 import { usedDesk } from '#src/blocks/used/desk.tsx';
 import type { UsedData } from '#src/blocks/used/used.ts';
 import { deskLedger } from '#src/features/desk/desk-ledger.ts';
@@ -17,11 +18,13 @@ function Bare({ bench, start }: { bench: Partial<Bench>; start: UsedData }) {
   const [data, setData] = useState(start);
   const [touched, setTouched] = useState<string[]>([]);
   const reckoning = deskLedger(viewOf({ history })).reckon(documentOf({ content: [{ type: 'used', attrs: { id: 'used1', version: 1, data } }] }), byId);
+  const figures = { lines: reckoning.lines, leftWords: () => null, fault: (path: string) => (touched.includes(path) ? reckoning.derived.faults[path] : undefined) };
+  const [store] = useState(() => makeFiguresStore(figures));
+  useEffect(() => store.publish(figures));
   const whole: Bench = {
-    context: { measures: 'us', currency: 'USD', day: '2026-11-14', dayTo: null, stage: null, materials: byId }, buildTitle: 'Curlew, a dinghy', people: [], materials, lines: reckoning.lines,
-    leftWords: () => null, fault: (path) => (touched.includes(path) ? reckoning.derived.faults[path] : undefined), touch: (path) => setTouched((now) => [...now, path]),
+    context: { measures: 'us', currency: 'USD', day: '2026-11-14', dayTo: null, stage: null, materials: byId }, buildTitle: 'Curlew, a dinghy', people: [], materials, figures: store,
+    touch: (path) => setTouched((now) => [...now, path]),
     addMaterial: () => Promise.resolve({ ok: false, problem: 'no', fields: {} }), lastTime: () => Promise.resolve({ title: null, used: [], time: [] }),
-    pictures: { uploads: [], add: () => undefined, retry: () => undefined, stop: () => undefined, dismiss: () => undefined, of: () => undefined },
     say: () => undefined, tookOut: () => undefined, ...bench,
   };
   return <BenchProvider value={whole}><usedDesk.Desk id="used1" data={data} onChange={setData} /></BenchProvider>;
