@@ -40,7 +40,7 @@ async function openContext(browser: Browser, site: DemoSite, view: View) {
     reducedMotion: 'reduce',
   });
   context.setDefaultTimeout(15_000);
-  return { context, watch: watchContext(context), page: await context.newPage() };
+  return { context, watch: watchContext(context, view.scripts ?? true), page: await context.newPage() };
 }
 
 async function keepPictures(opened: readonly Opened[], name: string): Promise<void> {
