@@ -10,6 +10,10 @@ const runners: DemoEntry = {
   work: { amount: '8', unit: 'piece', kind: 'drawer runner' },
   content: [
     p('A drawer wears hollow at the back of its own lower edge, and then it drops, rides up at the front and grinds the rail it sits on. New runners in the carcase do not help while the side is a banana, so the sides come first.'),
+    bought(
+      { supplier: 'Joiner’s yard', discount: '2.00' },
+      toShelf('oak', '5 lengths', '21.00'), toShelf('canvas', '0.5 m²', '8.40'),
+    ),
     photos({ 'bureau-runner-worn.jpg': 'The rule touches only at the ends. That gap is 5 mm on this one.' }),
     table(['Drawer', 'Left', 'Right'], ['Top', '2.5 mm', '3 mm'], ['Second', '4 mm', '5 mm'], ['Third', '3.5 mm', '4.5 mm'], ['Bottom', '3 mm', '3 mm']),
     steps(
@@ -26,10 +30,6 @@ const runners: DemoEntry = {
     photos({ 'bureau-drawer-bottom.jpg': 'Canvas while it is still wet. It pulls itself flat as it dries.' }),
     used(use('canvas', '0.12 m²', 'whole'), use('glue', '60 g', 'whole')),
     time(took('marlow', '6 h 30 min', 'runners'), took('Tove', '2 h', 'holding and planing'), took('marlow', '2 h', 'bottoms', 'setup'), waited('24 h', 'glue')),
-    bought(
-      { supplier: 'Joiner’s yard', discount: '2.00' },
-      toShelf('oak', '5 lengths', '21.00'), toShelf('canvas', '0.5 m²', '8.40'),
-    ),
   ],
 };
 
@@ -40,6 +40,10 @@ const beading: DemoEntry = {
   work: { amount: '6.8', unit: 'm', kind: 'cock bead fitted' },
   content: [
     p('The bead stands 2 mm proud of the front and takes the knocks that the veneer would otherwise take. It had done so: four lengths were gone, and most of the rest were held by polish alone. I took them all off and kept the best as patterns.'),
+    bought(
+      { supplier: 'Polishers’ supplies', daysAgo: 45, delivery: '6.90' },
+      toShelf('bead', '9 lengths', '27.90'), toShelf('pin', '1 box', '6.20'), toShelf('escutcheonPin', '1 bag', '4.50'), toShelf('paste', '1 tube', '5.80'),
+    ),
     photos({ 'bureau-cock-bead.jpg': 'Three sides on. Tape is enough of a clamp while the glue grabs, and the pins only keep it from sliding.' }, 'cover'),
     used(use('bead', '6.8 m'), waste('bead', '700 mm'), use('pin', '48'), use('glue', '50 g')),
     bullets('Mitre the top length first, both ends, and fit the sides to it.', 'Cut a hair long and spring it in.', 'Blunt the pins before driving, or the bead splits.', 'Round the edge last, with the drawer in its place.'),
@@ -51,10 +55,6 @@ const beading: DemoEntry = {
     used(use('paste', '15 g', 'opened'), use('escutcheonPin', '6', 'whole')),
     time(took('Tove', '1 h 30 min', 'brass', 'setup')),
     cost(['Key cut for the fall lock', 'service', '28.00']),
-    bought(
-      { supplier: 'Polishers’ supplies', daysAgo: 45, delivery: '6.90' },
-      toShelf('bead', '9 lengths', '27.90'), toShelf('pin', '1 box', '6.20'), toShelf('escutcheonPin', '1 bag', '4.50'), toShelf('paste', '1 tube', '5.80'),
-    ),
   ],
 };
 

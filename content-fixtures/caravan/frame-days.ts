@@ -52,7 +52,7 @@ const skinOff: DemoEntry = {
     h('The corner post'),
     p('The foot of the rear offside post is not wood any more. A screwdriver went in to half its length under its own weight. Above the waist rail it is dry, bright and hard, so this is a job for a scarf and a new foot, not for a new post.'),
     photos({ 'caravan-corner-post-soft.jpg': 'The foot of the post. That is a 6 mm screwdriver and I did not push it.' }),
-    used(use('mask', '2', 'whole')),
+    used(use('mask', '2')),
     h('Wood ordered'),
     p('I measured up while it was all open and rang the timber yard before they shut. Ash because it was ash, and because it holds a screw near an end without splitting.'),
     bought(

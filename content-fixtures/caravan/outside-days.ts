@@ -108,7 +108,7 @@ const stove: DemoEntry = {
     h('Cleaning'),
     p('The left burner came up with a brass brush in ten minutes. The right one had been boiled over for years. Degreaser for an hour, hot water, and a piece of copper wire through each port. Never steel: it opens the hole, and then the flame lifts.'),
     photos({ 'caravan-stove.jpg': 'One done, one not. The new cord is under the hotplate already.' }, 'cover'),
-    used(use('cord', '1.3 m', 'whole'), use('cleaner', '250 ml', 'opened')),
+    used(use('cord', '1.3 m'), use('cleaner', '250 ml', 'opened')),
     caution('corrosive'),
     time(took('ines', '2 h 20 min', 'burners'), took('ines', '40 min', 'hotplate and cord', 'setup'), waited('1 h', 'degreaser soaking')),
     worked('Counting the ports before and after, with a torch behind the burner.', 'Forty-eight points of light on each. Before, the right one had twenty-nine.'),

@@ -16,7 +16,8 @@ const found: DemoEntry = {
     h('Freeing the wheel'),
     p('The crank runs in two plain bearings with an oil hole on top. Both holes were packed with rust and sawdust. I picked them out with wire, built a little dam of clay round each and kept it full of penetrating oil, morning and night.'),
     photos({ 'lathe-flywheel-seized.jpg': 'The wedge keeps a gentle push on the rim. The dark ring is oil that has found its way through.' }),
-    used(use('penetrating', '3 US cups', 'whole')),
+    bought({ supplier: 'Farm supply store', tax: '2.04' }, toShelf('penetrating', '1 can', '34.00')),
+    used(use('penetrating', '3 US cups')),
     steps(
       'Clear the oil holes, or you are only wetting the paint.',
       'Oil, and a hardwood wedge under a spoke for a steady push. No hammer on cast iron.',
@@ -27,7 +28,6 @@ const found: DemoEntry = {
     wentWrong('Letting go of the rim once it was free.', 'Ninety pounds of wheel swung back by itself and took the wedge out of my hand.', 'Rope the rim to the leg whenever you are not turning it.'),
     caution('stored-energy'),
     time(took('ines', '3 h 30 min', 'oil holes, wedge and heat'), took('marlow', '2 h', 'lift and truck', 'setup'), took('ines', '2 h', 'lift and truck', 'setup'), waited('72 h', 'soaking')),
-    bought({ supplier: 'Farm supply store', tax: '2.04' }, toShelf('penetrating', '1 can', '34.00')),
   ],
 };
 
@@ -38,9 +38,13 @@ const electrolysis: DemoEntry = {
   work: { amount: '7', unit: 'piece', kind: 'part derusted' },
   content: [
     p('A plastic tub, water, a cup of washing soda to every five gallons, the part on the minus and plain steel on the plus. It lifts rust and leaves iron, which no grinder can say. The method is as the ', link('conservation file on electrolytic cleaning', 'https://nautarch.tamu.edu/CRL/conservationmanual/'), ' tells it, only with a battery charger.'),
+    bought(
+      { supplier: 'Farm supply store', tax: '3.00' },
+      toShelf('soda', '2 x 55 oz', '10.96'), toShelf('anode', '1 bar', '7.80'), toShelf('spindleOil', '1 jug', '31.50'),
+    ),
     caution('electrolysis'),
     photos({ 'lathe-electrolysis.jpg': 'The handwheel between its plates. Fizz all over means the connection is good.' }, 'cover'),
-    used(use('soda', '6 US cups', 'whole'), waste('soda', '6 US cups', 'whole'), use('anode', '6 ft', 'whole')),
+    used(use('soda', '6 US cups'), waste('soda', '6 US cups'), use('anode', '6 ft')),
     wentWrong('Filling the tub before looking at the bottom of it.', 'It had a split along one foot. Thirty gallons and six cups of soda were gone by breakfast.', 'Fill with plain water, leave it an hour on dry cardboard, and only then add the soda.'),
     h('What each part took'),
     table(
@@ -55,10 +59,7 @@ const electrolysis: DemoEntry = {
     used(use('spindleOil', '1/2 US cup')),
     time(took('ines', '2 h', 'scrubbing and oiling'), took('ines', '2 h 15 min', 'tub, anodes and leads', 'setup'), waited('60 h', 'in the tub')),
     worked('Turning the part over half way through.', 'It works in line of sight: the side facing the anode cleans first. Turned at half time, both sides came out alike.', 'Use four anodes, one in each corner, and leave the part alone.'),
-    bought(
-      { supplier: 'Farm supply store', tax: '3.00' },
-      toShelf('soda', '2 boxes', '10.96'), toShelf('anode', '1 bar', '7.80'), toShelf('spindleOil', '1 jug', '31.50'),
-    ),
+    p('The water is as it was on the first day, only browner. I have left the tub standing for the lathe’s other tool rest, if that ever turns up.'),
   ],
 };
 

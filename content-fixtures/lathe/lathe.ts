@@ -17,8 +17,8 @@ export const lathe: DemoBuild = {
   ],
   materials: {
     penetrating: { name: 'Penetrating oil', dimension: 'volume', unit: 'us-cup', packs: { can: '1 gal' }, hazards: ['solvent'] },
-    // Common practice, no source: about 0.95 g to the millilitre, poured, not pressed.
-    soda: { name: 'Washing soda', dimension: 'mass', unit: 'oz', packs: { box: '55 oz' }, ratio: { to: 'volume', amount: '20/19' } },
+    // Bought by weight, used by the cup. Common practice, no source: about 0.95 g to the millilitre, poured, not pressed.
+    soda: { name: 'Washing soda', dimension: 'volume', unit: 'us-cup', ratio: { to: 'mass', amount: '19/20' } },
     anode: { name: 'Plain steel bar, 1/2 in', dimension: 'length', unit: 'ft', packs: { bar: '10 ft' } },
     spindleOil: { name: 'Spindle oil', dimension: 'volume', unit: 'us-cup', packs: { jug: '1 gal' } },
     whiteMetal: { name: 'White metal, tin based', dimension: 'mass', unit: 'lb', packs: { ingot: '5 lb' }, hazards: ['molten-metal'] },
