@@ -8,8 +8,17 @@ type StageInput = InputOf<typeof changeStages>['body']['stages'][number];
 /** The fields of a stage as they stand in the form, all as typed. */
 export const stageFields = ['title', 'plannedMoney', 'plannedTime', 'plannedWork', 'workUnit', 'workKind'] as const;
 
+/** Far more rows than a plan may have: the page's action reads the form before anybody is asked who they are. */
+const mostRows = 200;
+
+/** The number of rows a form says it has, held to what can be read. */
+export function rowsNamed(text: string): number {
+  const count = Number(text);
+  return Number.isInteger(count) && count > 0 ? Math.min(count, mostRows) : 0;
+}
+
 export function stageCount(form: FormData): number {
-  return Number(textOf(form, 'count')) || 0;
+  return rowsNamed(textOf(form, 'count'));
 }
 
 /** Stages as sent, in the order asked for. Empty rows and rows ticked to be taken out are left out. */

@@ -6,7 +6,7 @@ import { Panel } from '#src/components/panel.tsx';
 import { SelectField } from '#src/components/select-field.tsx';
 import { TextField } from '#src/components/text-field.tsx';
 import type { FormState } from '#src/lib/form-action.ts';
-import { stageText, type stageFields } from './stage-form.ts';
+import { rowsNamed, stageText, type stageFields } from './stage-form.ts';
 
 const units = [
   { value: 'piece', label: 'pieces' }, { value: 'm', label: 'm' }, { value: 'm2', label: 'm²' }, { value: 'ft', label: 'ft' }, { value: 'ft2', label: 'ft²' }, { value: 'h', label: 'hours' },
@@ -16,7 +16,7 @@ const blanks = 3;
 
 export function StageRows({ stages, currency, form }: { stages: readonly StageView[]; currency: string; form: FormState }) {
   const [added, setAdded] = useState(blanks);
-  const count = Math.max(stages.length + added, Number(form.value('count', '0')));
+  const count = Math.max(stages.length + added, rowsNamed(form.value('count', '0')));
   return (
     <>
       <input type="hidden" name="count" value={count} />
