@@ -15,7 +15,8 @@ export function buildInput(form: FormData): BuildInput {
   for (const name of picks) if (form.has(name)) input[name] = textOf(form, name);
   if (form.has('year')) {
     const year = textOf(form, 'year');
-    input['year'] = year === '' ? null : Number(year);
+    // what is no number goes as it was typed and is refused; as NaN it would arrive as nothing and clear the year
+    input['year'] = year === '' ? null : /^\d+$/.test(year) ? Number(year) : year;
   }
   // an unticked box is not sent: the form says which boxes it holds
   for (const name of ticks) if (form.has(`${name}-asked`)) input[name] = form.has(name);
