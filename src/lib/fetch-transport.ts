@@ -24,8 +24,13 @@ export function errorOf(status: number, body: unknown): AppError {
   return new AppError(code, status === 429 ? 'Too many tries. Wait a minute and try again.' : 'The server could not do that. Try again in a moment.');
 }
 
+function isJson(answer: Response): boolean {
+  return (answer.headers.get('content-type') ?? '').includes('json');
+}
+
 export const fetchTransport: Transport = async (method, path, { params, query, body }) => {
   let answer: Response;
+  let parsed: unknown;
   try {
     answer = await fetch(addressOf(path, params, query), {
       method,
@@ -33,11 +38,12 @@ export const fetchTransport: Transport = async (method, path, { params, query, b
       headers: body === undefined ? { accept: 'application/json' } : { accept: 'application/json', 'content-type': 'application/json' },
       ...(body === undefined ? {} : { body: JSON.stringify(body) }),
     });
+    // the connection can be lost while the answer comes, too
+    const text = await answer.text();
+    parsed = text !== '' && isJson(answer) ? JSON.parse(text) : null;
   } catch (cause) {
     throw new AppError('unreachable', `The server could not be reached (${cause instanceof Error ? cause.message : 'no answer'}). Check the connection and try again.`);
   }
-  const text = await answer.text();
-  const parsed: unknown = text !== '' && (answer.headers.get('content-type') ?? '').includes('json') ? JSON.parse(text) : null;
   if (!answer.ok) throw errorOf(answer.status, parsed);
   return parsed;
 };
