@@ -17,7 +17,8 @@ type SlipNode = RowView['slips'][number];
 function cautionView(id: string, data: CautionData): BodyNode {
   const listed = data.hazard ? cautionFor(data.hazard) : null;
   const words = [data.words.trim(), data.words.trim() === '' ? listed?.words ?? '' : ''].filter(Boolean).join(' ');
-  return { type: 'caution', id, title: data.title.trim() || listed?.title || 'Beware', words, source: listed?.source ?? null };
+  // the list's source stands behind the list's words only
+  return { type: 'caution', id, title: data.title.trim() || listed?.title || 'Beware', words, source: data.words.trim() === '' ? listed?.source ?? null : null };
 }
 
 function bodyOf(node: TopNode, pictures: ReadonlyMap<string, PictureView>): BodyNode | null {
