@@ -1,14 +1,15 @@
 import type { Server } from 'node:http';
-import express, { type ErrorRequestHandler, type Express } from 'express';
+import express, { type Express } from 'express';
 import helmet from 'helmet';
 import { pinoHttp } from 'pino-http';
 import { AppError } from '#contracts/errors.ts';
 import { apiRouter } from './http/api.ts';
 import type { Parts } from './http/context.ts';
 import type { EndpointTable } from './http/endpoint-table.ts';
-import { problemReply } from './http/error-reply.ts';
+import { pageFault } from './http/error-reply.ts';
 import { builtShell, viteShell, type PageShell } from './http/page-shell.ts';
 import { pageHandler } from './http/pages.ts';
+import { plainAddress } from './http/plain-address.ts';
 import { sameOrigin } from './http/same-origin.ts';
 import { sessions } from './http/sessions.ts';
 import { registerFeatures, featureRouters, featureLimits } from './features/index.ts';
@@ -46,19 +47,6 @@ function security(parts: Parts, dev: boolean) {
   });
 }
 
-/** The page a browser gets for a fault outside the page tree; the API answers problem details. */
-const pageFault: ErrorRequestHandler = (error: unknown, req, res, next) => {
-  if (req.path.startsWith('/api/') || !req.accepts('html') || res.headersSent) {
-    problemReply(error, req, res, next);
-    return;
-  }
-  const known = error instanceof AppError;
-  if (!known) req.log.error({ err: error }, 'unexpected fault');
-  const words = known ? error.message : 'Something went wrong here. It has been noted; go back and try again.';
-  const escaped = words.replace(/[&<>"]/g, (c) => `&#${c.charCodeAt(0)};`);
-  res.status(known ? error.status : 500).type('html').send(`<!doctype html><html lang="en"><meta charset="utf-8"><title>Tallywright</title><h1>That did not work</h1><p>${escaped}</p><p><a href="/">Back to the start</a></p></html>`);
-};
-
 /** Builds the Express app from its parts. Listens to nothing and starts nothing. */
 export async function createApp({ parts, pages, http, ready }: AppOptions): Promise<App> {
   const app = express();
@@ -69,6 +57,7 @@ export async function createApp({ parts, pages, http, ready }: AppOptions): Prom
   app.get('/readyz', (_req, res) => void res.status(ready?.() === false ? 503 : 200).type('text').send(ready?.() === false ? 'not yet\n' : 'ready\n'));
   app.use(pinoHttp({ logger: parts.log, autoLogging: false, quietReqLogger: true }));
   app.use(security(parts, pages === 'dev'));
+  app.use(plainAddress);
 
   let shell: PageShell | null = typeof pages === 'object' ? pages : null;
   if (pages === 'built') shell = await builtShell(app);

@@ -1,5 +1,5 @@
 import type { RequestHandler } from 'express';
-import { z } from 'zod';
+import type { z } from 'zod';
 import type { Endpoint, Method, ParsedOf } from '#contracts/endpoint.ts';
 import { AppError, type FieldProblems } from '#contracts/errors.ts';
 import type { Access, Role } from '#contracts/words.ts';

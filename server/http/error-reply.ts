@@ -1,12 +1,18 @@
 import type { ErrorRequestHandler, Request, Response } from 'express';
 import { AppError, type ErrorCode, type ProblemDetails } from '#contracts/errors.ts';
 
-/** Faults that Express and its parsers throw with a status of their own. */
+const statusMeans: Readonly<Record<number, { code: ErrorCode; words: string }>> = {
+  404: { code: 'not-found', words: 'There is nothing at this address.' },
+  413: { code: 'too-large', words: 'That is more than this address takes.' },
+  415: { code: 'wrong-type', words: 'The request could not be read.' },
+};
+
+/** Faults that Express, its parsers and its files throw with a status of their own. */
 function ofParser(error: unknown): AppError | null {
-  const fault = error as { status?: unknown; type?: unknown };
-  if (typeof fault.status !== 'number' || fault.status < 400 || fault.status >= 500) return null;
-  const code: ErrorCode = fault.status === 413 ? 'too-large' : fault.status === 415 ? 'wrong-type' : 'malformed';
-  return new AppError(code, code === 'too-large' ? 'That is more than this address takes.' : 'The request could not be read.');
+  const { status } = error as { status?: unknown };
+  if (typeof status !== 'number' || status < 400 || status >= 500) return null;
+  const { code, words } = statusMeans[status] ?? { code: 'malformed', words: 'The request could not be read.' };
+  return new AppError(code, words);
 }
 
 export function problemOf(error: AppError, requestId: string): ProblemDetails {
@@ -34,5 +40,16 @@ export const problemReply: ErrorRequestHandler = (error: unknown, req, res, next
     next(error);
     return;
   }
-  sendProblem(res, outcomeOf(error, req), String(req.id));
+  sendProblem(res, outcomeOf(error, req), typeof req.id === 'object' ? '' : String(req.id));
+};
+
+/** The page a browser gets for a fault outside the page tree; the API answers problem details. */
+export const pageFault: ErrorRequestHandler = (error: unknown, req, res, next) => {
+  if (req.path.startsWith('/api/') || !req.accepts('html') || res.headersSent) {
+    problemReply(error, req, res, next);
+    return;
+  }
+  const { status, message } = outcomeOf(error, req);
+  const escaped = message.replace(/[&<>"]/g, (c) => `&#${c.charCodeAt(0)};`);
+  res.status(status).type('html').set('Cache-Control', 'no-store').send(`<!doctype html><html lang="en"><meta charset="utf-8"><title>Tallywright</title><h1>That did not work</h1><p>${escaped}</p><p><a href="/">Back to the start</a></p></html>`);
 };

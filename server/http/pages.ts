@@ -21,6 +21,16 @@ function inPlace(table: EndpointTable, context: Context): Transport {
   return (method, path, input) => invoke(table, method, path, input, context);
 }
 
+/** The page, or nothing where the browser has gone meanwhile: that its drawing was broken off is no fault. */
+async function unlessGone<T>(drawn: Promise<T>, gone: AbortSignal): Promise<T | null> {
+  try {
+    return await drawn;
+  } catch (error) {
+    if (gone.aborted) return null;
+    throw error;
+  }
+}
+
 /** Public and signed-in pages, rendered here and hydrated in the browser. Forms post to their page's own address. */
 export function pageHandler(table: EndpointTable, parts: Parts, shell: PageShell): RequestHandler {
   return async (req, res) => {
@@ -28,7 +38,7 @@ export function pageHandler(table: EndpointTable, parts: Parts, shell: PageShell
     res.on('close', () => gone.abort());
     const context = await contextOf(req, parts);
     const { render } = await shell.entry();
-    const page = await render(pageRequest(req, parts.config.publicUrl, gone.signal), inPlace(table, context), {
+    const drawn = render(pageRequest(req, parts.config.publicUrl, gone.signal), inPlace(table, context), {
       publicUrl: parts.config.publicUrl,
       // a bug in a loader is logged here, once; its text stays here
       onFault: (error) => {
@@ -36,9 +46,11 @@ export function pageHandler(table: EndpointTable, parts: Parts, shell: PageShell
         req.log.error({ err: error }, 'page fault');
       },
     });
+    const page = await unlessGone(drawn, gone.signal);
+    if (!page) return;
     res.set('Cache-Control', context.viewer ? 'private, no-store' : 'no-cache').vary('Cookie');
     if (page instanceof Response) {
-      const code = req.method === 'GET' ? page.status : 303;
+      const code = req.method === 'POST' ? 303 : page.status;
       res.redirect(code, page.headers.get('location') ?? '/');
       return;
     }

@@ -7,7 +7,7 @@ import { storedId } from './session-store.ts';
 import { sessionCookie } from './sessions.ts';
 
 function settled(run: (done: (error: unknown) => void) => void): Promise<void> {
-  return new Promise((resolve, reject) => run((error) => (error ? reject(error instanceof Error ? error : new Error(String(error))) : resolve())));
+  return new Promise((resolve, reject) => run((error) => (error ? reject(error instanceof Error ? error : new Error('The session could not be kept', { cause: error })) : resolve())));
 }
 
 function sessionHandle(req: Request, parts: Parts): SessionHandle {
