@@ -5,13 +5,18 @@ import { wordsForQuantity } from '#domain/quantity-words.ts';
 import { materialOf, readAmount, typedAmount, type AmountLine } from './amount-line.ts';
 import { useBench } from './bench.ts';
 import { tall, useLineControl } from './line-fields.tsx';
-import { unitChoices } from './unit-choice.ts';
+import { unitChoices, unitIdOf } from './unit-choice.ts';
 
 export interface AmountInputProps<L extends AmountLine> {
   block: string;
   line: L;
   onLine: (change: Partial<AmountLine>) => void;
   onEnter: () => void;
+}
+
+/** Whether the typed amount says its own unit, so that the menu does not count. */
+function namesUnit(line: AmountLine): boolean {
+  return line.unit !== '' && line.amount.trim() !== '' && typedAmount(line) === line.amount.trim();
 }
 
 /** An amount as people write it, and its unit: the menu counts only where the amount names none. */
@@ -21,7 +26,7 @@ export function AmountInput<L extends AmountLine>({ block, line, onLine, onEnter
   const { control, leave } = useLineControl(name, 'Amount');
   const material = materialOf(line, context);
   const of = line.name.trim() || 'this line';
-  const named = typedAmount(line) === line.amount.trim() && line.amount.trim() !== '' && line.unit !== '';
+  const named = namesUnit(line);
   const onKeyDown = (event: KeyboardEvent) => {
     if (event.key !== 'Enter' || event.nativeEvent.isComposing) return;
     event.preventDefault();
@@ -55,9 +60,15 @@ export function useShownBack(line: AmountLine): string | null {
   return [same ? '' : reading.value.shownBack, reading.value.note ?? ''].filter(Boolean).join('; ') || null;
 }
 
-/** An exact amount of a line's material in the line's own words. */
+/** An exact amount of a line's material, in the unit of the line; where the typed amount names its own, in whole packs or shares of one, or as the material is usually said. */
 export function useAmountWords(line: AmountLine): (exact: string) => string {
   const { context } = useBench();
   const material = materialOf(line, context);
-  return (exact) => material ? wordsForQuantity(exact, material.dimension, { measures: context.measures, packs: material.packs, unit: material.unit }) : '';
+  return (exact) => {
+    if (!material) return '';
+    const words = (unit?: string) => wordsForQuantity(exact, material.dimension, { measures: context.measures, packs: material.packs, ...(unit ? { unit } : {}) });
+    if (!namesUnit(line)) return words(unitIdOf(line.unit));
+    const plain = words();
+    return material.packs.some(({ name }) => plain.includes(name)) ? plain : words(material.unit);
+  };
 }

@@ -42,7 +42,7 @@ export interface Bench {
   readonly touch: (path: string) => void;
   readonly addMaterial: (material: MaterialInput) => Promise<MaterialOutcome>;
   readonly lastTime: () => Promise<LastTime>;
-  /** Said aloud by a screen reader. */
+  /** Said and shown. */
   readonly say: (words: string) => void;
   /** Says what was taken out, and offers to put it back. */
   readonly tookOut: (words: string, putBack: () => void) => void;

@@ -9,6 +9,11 @@ export function unitWordOf(material: Pick<MaterialFacts, 'unit'>): string {
   return unitIds.has(material.unit) ? unitById(material.unit).one : material.unit;
 }
 
+/** The id of a unit by the word of a line's menu; a pack goes by its name. */
+export function unitIdOf(word: string): string {
+  return units.find(({ one }) => one === word)?.id ?? word;
+}
+
 /** What the unit menu of a line offers: the material's packs, the units it is measured in, and those of its ratio. */
 export function unitChoices(material: MaterialFacts | undefined, measures: Measures, current: string): Option[] {
   const offered = material

@@ -12,6 +12,8 @@ export function newId(): string {
 
 export interface LineActions<L extends Line> {
   readonly add: (lines?: L[]) => void;
+  /** Adds lines in place of those nothing was written on yet. */
+  readonly fill: (lines: L[], isBlank: (line: L) => boolean) => void;
   readonly change: (line: string, change: Partial<L>) => void;
   /** Enter in a line: on to the next, or a new one after the last. */
   readonly goOn: (line: string) => void;
@@ -45,6 +47,7 @@ export function useLines<L extends Line, D extends { lines: L[] }>(props: BlockD
     };
     return {
       add, goTo,
+      fill: (lines, isBlank) => withLines((now) => [...now.filter((line) => !isBlank(line)), ...lines]),
       change: (line, change) => withLines((now) => now.map((one) => (one.id === line ? { ...one, ...change } : one))),
       goOn: (line) => {
         const { lines } = latest.current.data;

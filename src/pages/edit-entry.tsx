@@ -19,6 +19,9 @@ export function makeLoader(client: QueryClient): LoaderFunction {
 function DeskShape() {
   return (
     <PageFrame>
+      <noscript>
+        <p className="mb-6 max-w-reading">The desk works out costs while you type, so it needs scripts. Turn them on for this site and load the page again; what was written before is kept.</p>
+      </noscript>
       <Loading label="Fetching the desk" shape="page" />
     </PageFrame>
   );

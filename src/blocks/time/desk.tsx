@@ -1,6 +1,6 @@
 import { useState } from 'react';
 import { readMinutes } from '#domain/duration.ts';
-import { formatMinutes } from '#domain/format.ts';
+import { formatMinutes, plural } from '#domain/format.ts';
 import { useBench } from '../bench.ts';
 import { BlockFrame, BlockSum, textButton } from '../block-frame.tsx';
 import { deskBlock, type BlockDeskProps } from '../desk-block.ts';
@@ -26,8 +26,8 @@ function TimeDesk(props: BlockDeskProps<TimeData>) {
       const last = await bench.lastTime();
       if (last.time.length === 0) bench.say('No time was written up before this day.');
       else {
-        lines.add(last.time.map((line) => ({ ...blankTimeLine(newId()), ...line })));
-        bench.say(`Filled in from “${last.title ?? 'the day before'}”: ${last.time.length} lines.`);
+        lines.fill(last.time.map((line) => ({ ...blankTimeLine(newId()), ...line })), (line) => line.name.trim() === '' && line.time.trim() === '');
+        bench.say(`Filled in from “${last.title ?? 'the day before'}”: ${plural(last.time.length, 'line', 'lines')}.`);
       }
     } catch (cause) {
       bench.say(cause instanceof Error ? cause.message : 'The last time could not be fetched.');

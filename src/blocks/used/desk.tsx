@@ -1,6 +1,6 @@
 import { useState } from 'react';
 import { exactFrom } from '#domain/quantity.ts';
-import { formatMoney } from '#domain/format.ts';
+import { formatMoney, plural } from '#domain/format.ts';
 import { typedAmount } from '../amount-line.ts';
 import { useBench, useFigure } from '../bench.ts';
 import { BlockFrame, BlockSum, textButton } from '../block-frame.tsx';
@@ -27,8 +27,8 @@ function UsedDesk(props: BlockDeskProps<UsedData>) {
       const last = await bench.lastTime();
       if (last.used.length === 0) bench.say('Nothing was written up as used before this day.');
       else {
-        lines.add(last.used.map((line) => ({ ...blankUsedLine(newId()), ...line })));
-        bench.say(`Filled in from “${last.title ?? 'the day before'}”: ${last.used.length} lines.`);
+        lines.fill(last.used.map((line) => ({ ...blankUsedLine(newId()), ...line })), (line) => line.name.trim() === '' && line.amount.trim() === '');
+        bench.say(`Filled in from “${last.title ?? 'the day before'}”: ${plural(last.used.length, 'line', 'lines')}.`);
       }
     } catch (cause) {
       bench.say(cause instanceof Error ? cause.message : 'The last time could not be fetched.');

@@ -99,6 +99,14 @@ export function putInBlock(editor: Editor, type: string, attrs: { id: string; ve
   });
 }
 
+/** A text that begins with a block would open with that block selected, and the first key typed would take its place: the cursor starts at the end. */
+export function startAtEnd(editor: Editor): void {
+  // the first change of any kind brings the line to write on
+  editor.view.dispatch(editor.state.tr.setMeta('addToHistory', false));
+  const { doc, tr } = editor.state;
+  editor.view.dispatch(tr.setSelection(TextSelection.atEnd(doc)).setMeta('addToHistory', false));
+}
+
 /** The cursor to the line at the end of the text. */
 export function goOnWriting(editor: Editor): void {
   const { doc, tr, schema } = editor.state;

@@ -13,7 +13,7 @@ import type { DeskStart } from './desk-start.ts';
 import { EntryHead } from './entry-head.tsx';
 import type { KeptAt, KeptHere } from './kept-here.ts';
 import { NewerTextDialog } from './newer-text.tsx';
-import { Notices, type TookOutNotice } from './notices.tsx';
+import { Notices, type Notice } from './notices.tsx';
 import { OpeningNotice } from './opening-notice.tsx';
 import { goneWords, type GoneBlock } from './took-out.ts';
 import { putIn, Tray } from './tray.tsx';
@@ -42,9 +42,9 @@ export function DeskOpen({ view, start, at, kept, onReopen }: DeskOpenProps) {
   const navigate = useNavigate();
   const settled = useEntrySettled(at);
   const { saver, state: save, calls } = useSaver(view, start, at, kept);
-  const [said, setSaid] = useState('');
-  const [notice, setNotice] = useState<TookOutNotice | null>(null);
+  const [notice, setNotice] = useState<Notice | null>(null);
   const [later, setLater] = useState(false);
+  const say = useCallback((words: string) => setNotice({ words }), []);
   const tookOut = useCallback((words: string, restore: () => void) => setNotice({ words, putBack: restore }), []);
 
   const onGone = (gone: GoneBlock[]) => tookOut(goneWords(gone), () => putBack(writing.editor, gone));
@@ -59,7 +59,7 @@ export function DeskOpen({ view, start, at, kept, onReopen }: DeskOpenProps) {
   useMissingHistory(view, reckoning, save);
   const signing = useSignOff({ at, kept, saver, calls, reckonNow: () => ledger.reckon(current.current, byId), uploads: uploads.state });
   const { touch, fault, shown } = useFaults(reckoning, signing.attempt > 0, signing.serverFaults);
-  const bench = useBenchOf({ view, document, materials, byId, addMaterial, touch, say: setSaid, tookOut }, useFiguresOf(view, reckoning, byId, fault));
+  const bench = useBenchOf({ view, document, materials, byId, addMaterial, touch, say, tookOut }, useFiguresOf(view, reckoning, byId, fault));
 
   const preview = async () => {
     await saver.flush();
@@ -126,7 +126,7 @@ export function DeskOpen({ view, start, at, kept, onReopen }: DeskOpenProps) {
             <Tray editor={editor} />
           </div>
         </PageColumns>
-        <Notices said={spokenState(save) || said} tookOut={notice} onClose={() => setNotice(null)} />
+        <Notices saving={spokenState(save)} notice={notice} onClose={() => setNotice(null)} />
         {newer && !later && (
           <NewerTextDialog view={view} context={{ measures: view.build.measures, currency: view.build.currency, materials: byId }} mine={document} newer={newer} onChoose={choose} onLater={() => setLater(true)} />
         )}

@@ -2,6 +2,7 @@ import { useEditor } from '@tiptap/react';
 import { useCallback, useEffect, useRef, useState } from 'react';
 import { fieldId } from '#src/components/field.tsx';
 import type { EntryDocument } from '#src/blocks/pure.ts';
+import { startAtEnd } from './block-commands.ts';
 import { BlockIds } from './block-ids.ts';
 import { blockExtensions } from './block-node.tsx';
 import { pastedWords } from './pasted-words.ts';
@@ -52,6 +53,7 @@ export function useWriting({ start, saver, onGone, onFiles }: WritingParts) {
     // what it would write into the page stands in desk.css: the page's policy lets no script write styles
     injectCSS: false,
     content: editorContent(start.document.content),
+    onCreate: ({ editor: now }) => startAtEnd(now),
     onUpdate: ({ editor: now, transaction }) => {
       edit((text) => ({ ...text, content: storedContent(now.getJSON()) }));
       const gone = goneIn(transaction, now.state.doc);

@@ -1,7 +1,7 @@
 import { Editor } from '@tiptap/core';
 import { afterEach, describe, expect, test, vi } from 'vitest';
 import { entryDocument, type EntryDocument } from '#src/blocks/pure.ts';
-import { moveBlock, putBack, putInBlock, takeOutBlock } from '#src/features/desk/block-commands.ts';
+import { moveBlock, putBack, putInBlock, startAtEnd, takeOutBlock } from '#src/features/desk/block-commands.ts';
 import { BlockIds, idsOf } from '#src/features/desk/block-ids.ts';
 import { blockExtensions } from '#src/features/desk/block-node.tsx';
 import { pastedWords } from '#src/features/desk/pasted-words.ts';
@@ -151,6 +151,13 @@ describe('blocks in the text', () => {
     expect(stored(now).map((node) => node.attrs.id)).toEqual(['used1', 'para1', 'para2']);
     expect(gone).toEqual([]);
     vi.unstubAllGlobals();
+  });
+
+  test('a text that begins with a block opens with the cursor at the end, not with the block selected', () => {
+    const now = open([usedNode('used1', [{ id: 'lineA' }])]);
+    startAtEnd(now);
+    now.commands.insertContent('x');
+    expect(stored(now).map((node) => node.type)).toEqual(['used', 'paragraph']);
   });
 
   test('what is put in stands at the end, before the line to write on', () => {

@@ -21,6 +21,10 @@ describe('pasted HTML is cut down to our own prose', () => {
     expect(pastedWords(html)).toBe(clean);
   });
 
+  test('words that only look like a handler stay as they are', () => {
+    expect(pastedWords('<p>each one = two, on load = off</p>')).toBe('<p>each one = two, on load = off</p>');
+  });
+
   test('https and mailto links stay', () => {
     expect(pastedWords('<p><a href="https://elsewhere.example/a?b=1" target="_blank" rel="x">one</a> <a href="mailto:a@b.example">two</a></p>'))
       .toBe('<p><a href="https://elsewhere.example/a?b=1">one</a> <a href="mailto:a@b.example">two</a></p>');
