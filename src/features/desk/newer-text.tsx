@@ -1,11 +1,11 @@
-import { useMemo, useState } from 'react';
+import { useMemo, useState, type ReactNode } from 'react';
 import type { DeskView } from '#contracts/entries.ts';
 import { Button } from '#src/components/button.tsx';
 import { Dialog } from '#src/components/dialog.tsx';
 import type { EntryContext } from '#src/blocks/derive-entry.ts';
 import type { EntryDocument } from '#src/blocks/pure.ts';
 import type { NewerText } from './saver.ts';
-import { differencesOf, mergedText, type Difference, type Side } from './two-texts.ts';
+import { differencesOf, mergedText, usualSide, type Difference, type Side } from './two-texts.ts';
 
 export interface NewerTextDialogProps {
   view: DeskView;
@@ -17,9 +17,10 @@ export interface NewerTextDialogProps {
   onLater: () => void;
 }
 
-/** What only they have comes along unless it is left out: nothing of either is lost by not looking. */
-function usualSide(difference: Difference): Side {
-  return difference.mine === null ? 'theirs' : 'mine';
+/** A piece of one text in words. */
+function shown(words: string | null): ReactNode {
+  if (words === null) return <em className="text-ink-soft">Not there</em>;
+  return words.trim() === '' ? <em className="text-ink-soft">Nothing in it yet</em> : words;
 }
 
 /** Two texts of one entry, side by side where they differ. */
@@ -59,7 +60,7 @@ function Piece({ difference, side, onSide }: { difference: Difference; side: Sid
         <input type="radio" name={difference.key} checked={side === of} onChange={() => onSide(of)} className="size-[18px] accent-scribe" />
         {title}
       </span>
-      <span className="mt-1.5 block whitespace-pre-wrap">{difference[of] ?? <em className="text-ink-soft">Not there</em>}</span>
+      <span className="mt-1.5 block whitespace-pre-wrap">{shown(difference[of])}</span>
     </label>
   );
   return (

@@ -41,8 +41,12 @@ function nodeLabel(node: TopNode): string {
 
 function nodeWords(node: TopNode | undefined, context: EntryContext): string | null {
   if (!node) return null;
-  const words = isProse(node) ? plainWords(node) : deskBlockOf(node.type)?.words(node.attrs.data, context) ?? '';
-  return words.trim() === '' ? 'Nothing in it yet' : words;
+  return isProse(node) ? plainWords(node) : deskBlockOf(node.type)?.words(node.attrs.data, context) ?? '';
+}
+
+/** The side to go on with unless the writer picks another: theirs where mine holds nothing, so that none of it is lost by not looking. */
+export function usualSide({ mine }: Difference): Side {
+  return (mine ?? '').trim() === '' ? 'theirs' : 'mine';
 }
 
 function byId(document: EntryDocument): Map<string, TopNode> {

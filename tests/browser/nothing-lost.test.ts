@@ -1,0 +1,117 @@
+import type { BrowserContext, Page } from 'playwright-core';
+import { expect, inject } from 'vitest';
+import { deskIsOpen, expectKept, expectWords, leadField, tally, titleField, wordsField, PATIENCE } from './support/desk-hand.ts';
+import { openDraft } from './support/draft.ts';
+import { journey } from './support/journey.ts';
+import { signIn } from './support/sign-in.ts';
+
+async function openedDesk(context: BrowserContext, desk: string): Promise<Page> {
+  const page = await context.newPage();
+  await page.goto(desk);
+  await deskIsOpen(page);
+  return page;
+}
+
+journey('an entry saved over a newer one offers both texts, and keeps what is picked of each', async ({ open }) => {
+  const { page: first, expectComplaint } = await open();
+  expectComplaint(/status of 409/);
+  await signIn(first, 'restorer');
+  const desk = await openDraft(first, 'Two tabs');
+  const second = await openedDesk(first.context(), desk);
+  await titleField(second).fill('Written in the second tab');
+  await wordsField(second).pressSequentially('The keel bolts came out whole.');
+  await expectKept(second);
+  await leadField(first).fill('Written in the first tab.');
+  await titleField(first).fill('Another title from the first tab');
+  const dialog = first.getByRole('dialog', { name: 'Somebody saved a newer text' });
+  await expectWords(dialog, 'Another title from the first tab', 'Written in the second tab', 'Written in the first tab.', 'The keel bolts came out whole.');
+  await dialog.getByRole('group', { name: 'Title' }).getByLabel('Theirs').check();
+  await dialog.getByRole('button', { name: 'Go on with what is picked' }).click();
+  await expectKept(first);
+  const after = await openedDesk(first.context(), desk);
+  expect(await titleField(after).inputValue()).toBe('Written in the second tab');
+  expect(await leadField(after).inputValue()).toBe('Written in the first tab.');
+  await expectWords(wordsField(after), 'The keel bolts came out whole.');
+});
+
+async function signOutElsewhere(context: BrowserContext): Promise<void> {
+  const other = await context.newPage();
+  await other.goto('/sign-out');
+  await other.getByRole('main').getByRole('button', { name: 'Sign out' }).click();
+  await other.waitForURL((url) => url.pathname === '/');
+  await other.close();
+}
+
+async function signInThroughForm(page: Page, address: string): Promise<void> {
+  await page.getByLabel('E-mail address').fill(address);
+  await page.getByLabel('Password').fill(inject('demoSite').password);
+  await page.getByRole('main').getByRole('button', { name: 'Sign in', exact: true }).click();
+}
+
+journey('a text typed while signed out waits for its own writer, and goes in once they are back', async ({ open }) => {
+  const { page, expectComplaint } = await open();
+  expectComplaint(/status of 401/);
+  await signIn(page, 'restorer');
+  const desk = await openDraft(page, 'Signed out');
+  await titleField(page).fill('Before signing out');
+  await expectKept(page);
+  await signOutElsewhere(page.context());
+  await titleField(page).fill('Typed after signing out');
+  await expectWords(tally(page), 'Kept here; you are signed out, so the server does not have it yet');
+  // Somebody else at the same browser finds nothing of it.
+  await signIn(page, 'reader');
+  expectComplaint(/status of 40[34]/);
+  await page.goto(desk);
+  expect(await page.getByRole('heading', { level: 1 }).innerText()).toMatch(/^(Not yours to do|Nothing at this address)$/);
+  expect(await page.content()).not.toContain('Typed after signing out');
+  await signOutElsewhere(page.context());
+  await page.goto(desk);
+  await page.waitForURL(/\/sign-in\?next=/);
+  await signInThroughForm(page, 'restorer@demo.example');
+  await page.waitForURL(`**${desk}`);
+  await deskIsOpen(page);
+  await expectWords(page.getByRole('status').filter({ hasText: 'taken up again' }), 'It was kept in this browser');
+  expect(await titleField(page).inputValue()).toBe('Typed after signing out');
+  await expectKept(page);
+});
+
+journey('the link beside a text that waits leads through the sign-in and back to it', async ({ open }) => {
+  const { page, expectComplaint } = await open();
+  expectComplaint(/status of 401/);
+  await signIn(page, 'restorer');
+  const desk = await openDraft(page, 'Sign in again');
+  await signOutElsewhere(page.context());
+  await titleField(page).fill('The title that waited');
+  await tally(page).getByRole('link', { name: 'Sign in' }).click();
+  await page.waitForURL(/\/sign-in\?next=/);
+  await signInThroughForm(page, 'restorer@demo.example');
+  await page.waitForURL(`**${desk}`);
+  await deskIsOpen(page);
+  await expectKept(page);
+  expect(await titleField(page).inputValue()).toBe('The title that waited');
+});
+
+journey('a connection lost while typing loses nothing, even when the tab is closed before it is back', async ({ open }) => {
+  const { page, expectComplaint } = await open();
+  expectComplaint(/ERR_INTERNET_DISCONNECTED/);
+  await signIn(page, 'restorer');
+  const context = page.context();
+  const desk = await openDraft(page, 'Out of reach');
+  await context.setOffline(true);
+  await titleField(page).fill('Typed without a connection');
+  await wordsField(page).pressSequentially('The planer took two passes.');
+  await expectWords(tally(page), 'Kept here; the server could not be reached, trying again');
+  await context.setOffline(false);
+  await expectKept(page);
+  await context.setOffline(true);
+  await titleField(page).fill('Typed before the tab was closed');
+  await expectWords(tally(page), 'Kept here; the server could not be reached, trying again');
+  await page.close();
+  await context.setOffline(false);
+  const again = await openedDesk(context, desk);
+  await expectWords(again.getByRole('status').filter({ hasText: 'taken up again' }), 'It was kept in this browser');
+  expect(await titleField(again).inputValue()).toBe('Typed before the tab was closed');
+  await expectWords(wordsField(again), 'The planer took two passes.');
+  await expectKept(again);
+  await expect.poll(async () => (await openedDesk(context, desk)).getByRole('status').filter({ hasText: 'taken up again' }).count(), PATIENCE).toBe(0);
+});
