@@ -31,8 +31,8 @@ const parts: Parts = { config, orm, log, now: () => new Date(), limits: true };
 let ready = false;
 
 const http = createServer();
-const { app, close } = await createApp({ parts, pages: dev ? 'dev' : 'built', http, ready: () => ready });
-http.on('request', app);
+const site = await createApp({ parts, pages: dev ? 'dev' : 'built', http, ready: () => ready });
+http.on('request', site.app);
 await new Promise<void>((resolve, reject) => http.once('error', reject).listen(config.port, config.host, resolve));
 const { port } = http.address() as AddressInfo;
 if (!config.publicUrlGiven && config.port === 0) config.publicUrl = config.publicUrl.replace(/:0$/, `:${port}`);
@@ -47,7 +47,7 @@ async function stop(): Promise<void> {
   http.close();
   http.closeIdleConnections();
   await jobs.stop();
-  await close();
+  await site.close();
   await orm.close(true);
   process.exit(0);
 }

@@ -1,4 +1,3 @@
-import type {} from 'multer';
 import type { Request } from 'express';
 import { Person } from '#server/entities/index.ts';
 import type { Caller, Context, Parts, SessionHandle, Viewer } from './context.ts';

@@ -6,8 +6,8 @@ export function addressOf(path: string, params: unknown, query: unknown): string
   const values = (params ?? {}) as Record<string, string | number>;
   const filled = path.replace(/:([A-Za-z]+)/g, (_, name: string) => encodeURIComponent(String(values[name] ?? '')));
   const search = new URLSearchParams();
-  for (const [name, value] of Object.entries((query ?? {}) as Record<string, unknown>)) {
-    if (value !== undefined && value !== null && value !== '') search.set(name, String(value));
+  for (const [name, value] of Object.entries((query ?? {}) as Record<string, string | number | undefined>)) {
+    if (value !== undefined && value !== '') search.set(name, String(value));
   }
   const text = search.toString();
   return text === '' ? filled : `${filled}?${text}`;

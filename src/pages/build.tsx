@@ -77,7 +77,7 @@ function BuildHead({ build }: { build: BuildPage }) {
         <>
           {build.may.write && <ButtonLink to={`/write?build=${build.slug}`}>Write up a day</ButtonLink>}
           {first && <ButtonLink kind="quiet" to={first.href}>Read from the start</ButtonLink>}
-          {build.may.settle && <ButtonLink kind="quiet" to={`${`/builds/${build.slug}`}/plan`}>Plan the stages</ButtonLink>}
+          {build.may.settle && <ButtonLink kind="quiet" to={`/builds/${build.slug}/plan`}>Plan the stages</ButtonLink>}
           {build.may.settle && <ButtonLink kind="quiet" to={`/builds/${build.slug}/settings`}>Settings</ButtonLink>}
         </>
       }

@@ -18,5 +18,5 @@ export async function listMyBuilds(em: Em, caller: Caller): Promise<MyBuilds['bu
       number: entry.number, title: entry.working?.title ?? entry.title, day: entry.working?.day ?? entry.day, savedAt: (entry.workingAt ?? entry.createdAt).toISOString(),
     })),
     latest: latest(build.id),
-  })).sort((a, b) => b.latest.localeCompare(a.latest));
+  })).toSorted((a, b) => b.latest.localeCompare(a.latest));
 }

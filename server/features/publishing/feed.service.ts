@@ -33,9 +33,14 @@ export interface Feed {
   readonly modified: Date | null;
 }
 
-/** Control characters that XML 1.0 has no place for (its section 2.2), and half surrogates. */
+// XML 1.0, section 2.2, the production of Char
+function allowedInXml(code: number): boolean {
+  return code === 0x9 || code === 0xa || code === 0xd || (code >= 0x20 && code !== 0xfffe && code !== 0xffff);
+}
+
+/** A text without the characters XML has no place for, and without half surrogates. */
 export function wellFormed(text: string): string {
-  return text.toWellFormed().replace(/[\u0000-\u0008\u000B\u000C\u000E-\u001F\uFFFE\uFFFF]/g, '');
+  return [...text.toWellFormed()].filter((letter) => allowedInXml(letter.codePointAt(0) ?? 0)).join('');
 }
 
 async function feedItem(em: Em, entry: Entry, publicUrl: string): Promise<FeedItem | null> {

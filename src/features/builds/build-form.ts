@@ -20,5 +20,5 @@ export function buildInput(form: FormData): BuildInput {
   }
   // an unticked box is not sent: the form says which boxes it holds
   for (const name of ticks) if (form.has(`${name}-asked`)) input[name] = form.has(name);
-  return input as BuildInput;
+  return input;
 }
