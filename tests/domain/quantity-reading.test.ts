@@ -110,6 +110,7 @@ test.each([
   ['half a tin', resin, 'half a tin, 1.25 l'],
   ['3 cups', resin, '3 US cups, 709.8 ml'],
   ['2 boxes', screws, '2 boxes of 500, 1,000'],
+  ['1 box', screws, '1 box of 500'],
   ['17', screws, '17'],
   ['3 ft 6 in', batten, '3 ft 6 in, 1.067 m'],
 ])('%s is shown back', (text, context, words) => {

@@ -56,6 +56,12 @@ test('an amount is said in the unit or pack asked for', () => {
   expect(wordsForQuantity('350/1', 'volume', { ...imperial, unit: 'l' })).toBe('350 ml');
 });
 
+test('a pack of one piece is said without its size', () => {
+  const lengths = { ...imperial, packs: [{ name: 'length', amount: '1/1' }], unit: 'length' };
+  expect(wordsForQuantity('3/1', 'count', lengths)).toBe('3 lengths');
+  expect(wordsForQuantity('1/1', 'count', lengths)).toBe('1 length');
+});
+
 test('text that is no exact amount is refused', () => {
   expect(() => wordsForQuantity('350', 'volume', imperial)).toThrow(RangeError);
 });
