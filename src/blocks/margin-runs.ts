@@ -39,10 +39,34 @@ export const mostGap = 150;
  * @returns for each row, the index of the run it belongs to
  */
 export function runsOf(rows: readonly RowView[], beside: number): number[] {
+  return laidOut(rows, beside).runs;
+}
+
+/**
+ * How many of the last row's slips are left hanging far below the end of the words, and stand better under them.
+ * Two abreast they take half their height there.
+ */
+export function hangingSlips(rows: readonly RowView[], beside: number): number {
+  let { text, margin } = laidOut(rows, beside);
+  const slips = rows.at(-1)?.slips ?? [];
+  let hanging = 0;
+  for (const { slip } of slips.toReversed()) {
+    const height = slipHeight(slip);
+    if (margin - text < mostGap + height / 2) break;
+    margin -= height;
+    text += height / 2;
+    hanging += 1;
+  }
+  return hanging;
+}
+
+interface Laid { runs: number[]; text: number; margin: number }
+
+function laidOut(rows: readonly RowView[], beside: number): Laid {
   let run = 0;
   let text = 0;
   let margin = beside;
-  return rows.map((row, index) => {
+  const runs = rows.map((row, index) => {
     const gap = margin - text;
     if (index > 0 && gap <= mostGap) {
       run += 1;
@@ -53,4 +77,5 @@ export function runsOf(rows: readonly RowView[], beside: number): number[] {
     margin += row.slips.reduce((sum, { slip }) => sum + slipHeight(slip), 0);
     return run;
   });
+  return { runs, text, margin };
 }

@@ -7,7 +7,7 @@ import type { PictureData } from '#src/components/picture.tsx';
 import { Prose } from '#src/components/prose.tsx';
 import { Slip } from '#src/components/slip.tsx';
 import type { TallyPart, TallyRun } from '#src/components/tally-margin.tsx';
-import { runsOf } from './margin-runs.ts';
+import { hangingSlips, runsOf } from './margin-runs.ts';
 import { ProseView } from './prose-view.tsx';
 
 type BodyNode = RowView['body'][number];
@@ -47,12 +47,14 @@ const tallyHeight = 300;
 export function readerRuns(rows: readonly RowView[], tally: ReactNode): TallyRun[] {
   const firstPhotos = rows.flatMap((row) => row.body).find((node) => node.type === 'photos');
   const firstId = firstPhotos?.type === 'photos' ? firstPhotos.id : null;
+  const hanging = hangingSlips(rows, tallyHeight);
+  const slipsOf = (row: RowView) => row.slips.map(({ id, slip }) => <Slip key={id} {...slip} />);
   const parts = rows.map((row, index) => ({
     key: row.body[0] ? keyOf(row.body[0]) : row.slips[0]?.id ?? String(index),
     prose: bodyViews(row.body, firstId),
-    slips: [...(index === 0 ? [tally] : []), ...row.slips.map(({ id, slip }) => <Slip key={id} {...slip} />)],
+    slips: [...(index === 0 ? [tally] : []), ...slipsOf(row).slice(0, index === rows.length - 1 ? row.slips.length - hanging : undefined)],
   }));
-  const runs: { key: string; parts: TallyPart[] }[] = [];
+  const runs: { key: string; parts: TallyPart[]; under?: ReactNode[] }[] = [];
   runsOf(rows, tallyHeight).forEach((run, index) => {
     const part = parts[index];
     if (!part) return;
@@ -60,6 +62,9 @@ export function readerRuns(rows: readonly RowView[], tally: ReactNode): TallyRun
     if (open) open.parts.push(part);
     else runs.push({ key: part.key, parts: [part] });
   });
+  const last = runs.at(-1);
+  const lastRow = rows.at(-1);
+  if (last && lastRow && hanging > 0) last.under = slipsOf(lastRow).slice(-hanging);
   return runs.length > 0 ? runs : [{ key: 'tally', parts: [{ key: 'tally', prose: null, slips: [tally] }] }];
 }
 

@@ -12,6 +12,8 @@ export interface TallyPart {
 export interface TallyRun {
   key: string;
   parts: readonly TallyPart[];
+  /** Slips that no words stand beside any more: laid two abreast under the words. */
+  under?: readonly ReactNode[];
 }
 
 /**
@@ -28,6 +30,11 @@ export function TallyMargin({ runs }: { runs: readonly TallyRun[] }) {
             {run.parts.map((part, at) => (
               <div key={part.key} style={{ order: at * 2 }} className="min-w-0 pb-6 [&>*+*]:mt-6">{part.prose}</div>
             ))}
+            {run.under && run.under.length > 0 && (
+              <div style={{ order: run.parts.length * 2 }} className="grid min-w-0 items-start gap-6 pb-[26px] wide:grid-cols-2">
+                {run.under.map((slip, index) => <div key={index}>{slip}</div>)}
+              </div>
+            )}
           </div>
           <div className="tally-slips contents min-w-0 wide:block wide:pt-1">
             {run.parts.map((part, at) => part.slips.length > 0 && (
