@@ -8,7 +8,7 @@ function clock(time: Date): string {
 export function keptWords({ phase, keptHere, onServer, savedAt }: SaveState): string {
   const here = keptHere ? 'Kept here' : 'Not kept in this browser';
   switch (phase.is) {
-    case 'still': return savedAt && onServer ? `Kept here and on the server, ${clock(savedAt)}` : 'Nothing to keep yet';
+    case 'still': return savedAt && onServer ? `Kept here and on the server, ${clock(savedAt)}` : 'Nothing changed yet';
     case 'waiting': return keptHere ? 'Kept here, on its way to the server' : 'Keeping it';
     case 'saving': return `${here}, going to the server`;
     case 'retrying': return `${here}; the server could not be reached, trying again`;
