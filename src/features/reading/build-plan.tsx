@@ -25,8 +25,8 @@ export function BuildPlan({ build }: { build: BuildPage }) {
   return (
     <PlanTable
       caption="Planned, used and finish at, by stage"
-      rows={plan.map((row) => ({
-        key: row.stage, stage: row.stage, done: row.done,
+      rows={plan.map((row, index) => ({
+        key: String(index), stage: row.stage, done: row.done,
         planned: row.planned === null ? '' : money(row.planned), used: money(row.used + row.wasted),
         ...(row.finishAt === null ? {} : { finishAt: money(row.finishAt) }), bar: barOf(row, money),
       }))}
@@ -43,7 +43,7 @@ function StageHours({ build }: { build: BuildPage }) {
       caption="Days and hours by stage"
       captionHidden
       columns={[{ key: 'stage', label: 'Stage' }, { key: 'days', label: 'Days', numeric: true }, { key: 'hours', label: 'Hands on', numeric: true }]}
-      rows={build.stages.map((stage) => ({ key: stage.stage, cells: [stage.done ? `${stage.stage}, done` : stage.stage, stage.days, formatMinutes(stage.minutes)] }))}
+      rows={build.stages.map((stage, index) => ({ key: String(index), cells: [stage.done ? `${stage.stage}, done` : stage.stage, stage.days, formatMinutes(stage.minutes)] }))}
     />
   );
 }
