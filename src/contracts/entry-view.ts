@@ -4,6 +4,7 @@ import { minor, personView, plainDay } from './fields.ts';
 import { pictureView } from './pictures.ts';
 import { slipView } from './slip.ts';
 import { tapeView } from './tape.ts';
+import { visibilities } from './words.ts';
 
 /** What stands in the reading column. */
 export const bodyNode = z.union([
@@ -37,7 +38,7 @@ export type TallyView = z.output<typeof tallyView>;
 
 const neighbour = z.object({ href: z.string(), title: z.string(), day: plainDay }).nullable();
 export const entryPage = z.object({
-  build: z.object({ slug: z.string(), title: z.string(), currency: z.string() }),
+  build: z.object({ slug: z.string(), title: z.string(), currency: z.string(), visibility: z.enum(visibilities) }),
   owner: personView, author: personView, withNames: z.array(z.string()),
   number: z.number().int(), slug: z.string(), title: z.string(), lead: z.string(),
   day: plainDay, dayTo: plainDay.nullable(), stage: z.string().nullable(),

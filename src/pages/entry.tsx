@@ -19,7 +19,7 @@ export function Component() {
   const address = `/builds/${data.build.slug}`;
   return (
     <>
-      <Head title={`${data.title}, ${data.build.title}`} description={data.lead} path={`${address}/${data.slug}`} feeds={{ title: data.build.title, rss: `${address}/feed.xml`, json: `${address}/feed.json` }} />
+      <Head title={`${data.title}, ${data.build.title}`} description={data.lead} {...(data.build.visibility === 'public' ? { path: `${address}/${data.slug}` } : {})} feeds={{ title: data.build.title, rss: `${address}/feed.xml`, json: `${address}/feed.json` }} />
       <EntryView page={data} />
     </>
   );

@@ -20,7 +20,7 @@ export function Component() {
       <Head title={`What readers will see: ${data.title}`} />
       <EntryView page={data} notice={
         <p className="mb-5 border-l-[5px] border-zinc bg-zinc-wash px-4 py-2.5 text-control text-zinc-ink">
-          This is what readers will see. Lines you changed since the last sign-off are priced when you sign off. <Link to={`/builds/${build}/edit/${number}`} className="text-zinc-ink">Back to the desk</Link>
+          This is what readers will see once the day is signed off. <Link to={`/builds/${build}/edit/${number}`} className="text-zinc-ink">Back to the desk</Link>
         </p>
       } />
     </>

@@ -3,7 +3,7 @@ import { isCurrency } from '#domain/currency.ts';
 import { AppError } from '#contracts/errors.ts';
 import type { BuildSettings, changeBuild, startBuild } from '#contracts/builds.ts';
 import type { ParsedOf } from '#contracts/endpoint.ts';
-import { Build, BuildAddress, CrewMember, Movement, Person, Receipt, Shelf, Cost } from '#server/entities/index.ts';
+import { Build, BuildAddress, Cost, CrewMember, Movement, Person, Receipt, Shelf, Stage } from '#server/entities/index.ts';
 import type { Caller, Em } from '#server/http/context.ts';
 import { requireOwnBuild } from './build-access.service.ts';
 import { freeBuildSlug, moveBuild } from './build-address.service.ts';
@@ -30,9 +30,13 @@ export async function startRestoration(em: Em, caller: Pick<Caller, 'id'>, input
   });
 }
 
+/** Whether money stands anywhere in the build's currency: spent, on the shelf, or planned. */
 async function moneyWritten(em: Em, build: Build): Promise<boolean> {
-  const [costs, receipts, movements] = [await em.count(Cost, { build: build.id }), await em.count(Receipt, { build: build.id }), await em.count(Movement, { shelf: { build: build.id } })];
-  return costs + receipts + movements > 0;
+  const counts = [
+    await em.count(Cost, { build: build.id }), await em.count(Receipt, { build: build.id }), await em.count(Movement, { shelf: { build: build.id } }),
+    await em.count(Stage, { build: build.id, plannedMoney: { $ne: null } }),
+  ];
+  return counts.some((count) => count > 0);
 }
 
 export async function readSettings(em: Em, caller: Caller, slug: string): Promise<BuildSettings> {

@@ -2,24 +2,22 @@ import type { changeStages, StageView } from '#contracts/builds.ts';
 import type { ParsedOf } from '#contracts/endpoint.ts';
 import { AppError } from '#contracts/errors.ts';
 import { readMinutes } from '#domain/duration.ts';
+import { exactFigure } from '#domain/figures.ts';
 import { readMoney } from '#domain/money.ts';
 import { exactFrom } from '#domain/quantity.ts';
 import { readAmountOfWork } from '#domain/work.ts';
-import { Cost, Entry, Movement, Stage, TimeLine, type Build } from '#server/entities/index.ts';
+import { Stage, type Build } from '#server/entities/index.ts';
 import type { Caller, Em } from '#server/http/context.ts';
 import { requireOwnBuild, requireWritableBuild } from './build-access.service.ts';
 import { workKindNamed } from './work-kinds.service.ts';
 
 type StageInput = ParsedOf<typeof changeStages>['body']['stages'][number];
 
+/** The stages that something of the ledger or a published day stands in. */
 async function usedStages(em: Em, build: Build): Promise<Set<number>> {
-  const stages = await em.find(Stage, { build: build.id });
-  const used = new Set<number>();
-  for (const { id } of stages) {
-    const count = (await em.count(Entry, { stage: id })) + (await em.count(Movement, { stage: id })) + (await em.count(Cost, { stage: id })) + (await em.count(TimeLine, { stage: id }));
-    if (count > 0) used.add(id);
-  }
-  return used;
+  const standsIn = ['entry', 'movement', 'cost', 'time_line'].map((table) => `exists (select 1 from ${table} t where t.stage_id = s.id)`).join(' or ');
+  const rows = await em.execute<{ id: number }[]>(`select s.id as id from stage s where s.build_id = ? and (${standsIn})`, [build.id]);
+  return new Set(rows.map(({ id }) => id));
 }
 
 export async function listStages(em: Em, caller: Caller, slug: string): Promise<{ currency: string; stages: StageView[] }> {
@@ -30,7 +28,7 @@ export async function listStages(em: Em, caller: Caller, slug: string): Promise<
     currency: build.currency,
     stages: stages.map((stage) => ({
       id: stage.id, title: stage.title, plannedMoney: stage.plannedMoney ?? null, plannedMinutes: stage.plannedMinutes ?? null,
-      plannedWork: stage.plannedWork ? exactFrom(stage.plannedWork).toString() : null, workUnit: stage.workUnit ?? null,
+      plannedWork: stage.plannedWork ? exactFigure(exactFrom(stage.plannedWork)) : null, workUnit: stage.workUnit ?? null,
       workKind: stage.workKind?.one ?? null, done: stage.done, used: used.has(stage.id),
     })),
   };

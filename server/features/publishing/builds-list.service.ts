@@ -1,35 +1,37 @@
 import type { BuildCard, BuildsView } from '#contracts/builds.ts';
 import { buildKinds, type BuildKind } from '#contracts/words.ts';
-import { Build, Entry } from '#server/entities/index.ts';
+import { Build } from '#server/entities/index.ts';
 import { usedOfBuilds } from '#server/features/shelf/figures.service.ts';
 import type { Em } from '#server/http/context.ts';
-import { groupedBy } from './grouping.ts';
+import { daysOfBuilds } from './build-days.service.ts';
 import { madeInWords } from './build-page.service.ts';
 import { coversOfBuilds } from './covers.service.ts';
 import { pageOf } from './paging.ts';
 
 const buildsAPage = 12;
-/** What lists show: public, not archived, with a day written up. */
+/** What lists show: public and not put away. */
 export const listedBuilds = { visibility: 'public' as const, archivedAt: null };
 
 /** How many listed builds there are of each kind, in the order of the list. */
 export async function countByKind(em: Em): Promise<{ kind: BuildKind; count: number }[]> {
-  const rows = await em.find(Build, listedBuilds, { fields: ['kind'] });
-  return buildKinds.map((kind) => ({ kind, count: rows.filter((row) => row.kind === kind).length })).filter((row) => row.count > 0);
+  const rows = await em.execute<{ kind: BuildKind; count: number }[]>(
+    `select kind, count(*) as count from build where visibility = 'public' and archived_at is null group by kind`,
+  );
+  const counts = new Map(rows.map(({ kind, count }) => [kind, count]));
+  return buildKinds.map((kind) => ({ kind, count: counts.get(kind) ?? 0 })).filter(({ count }) => count > 0);
 }
 
 /** Cards of builds; what was used in them only where costs are shown to everyone. */
 export async function buildCards(em: Em, builds: readonly Build[]): Promise<BuildCard[]> {
   const ids = builds.map((build) => build.id);
-  const entries = await em.find(Entry, { build: { $in: ids }, published: { $ne: null } }, { fields: ['build', 'day', 'dayTo'], orderBy: { day: 'desc' } });
-  const byBuild = groupedBy(entries, (entry) => entry.build.id);
+  const days = await daysOfBuilds(em, ids);
   const covers = await coversOfBuilds(em, ids);
   const used = await usedOfBuilds(em, builds.filter((build) => build.costsShown).map((build) => build.id));
   return builds.map((build) => {
-    const days = byBuild.get(build.id) ?? [];
+    const written = days.get(build.id);
     return {
       slug: build.slug, title: build.title, kind: build.kind, lead: build.lead, owner: { handle: build.owner.handle, name: build.owner.name },
-      stands: build.stands, standsNote: build.standsNote, madeIn: madeInWords(build), days: days.length, lastDay: days[0]?.dayTo ?? days[0]?.day ?? null,
+      stands: build.stands, standsNote: build.standsNote, madeIn: madeInWords(build), days: written?.days ?? 0, lastDay: written?.lastDay ?? null,
       picture: covers.get(build.id) ?? null,
       ...(build.costsShown ? { used: { minor: used.get(build.id) ?? 0, currency: build.currency } } : {}),
     };

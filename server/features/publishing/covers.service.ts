@@ -19,6 +19,17 @@ export async function picturesOfEntries(em: Em, entryIds: readonly number[]): Pr
   }));
 }
 
+/** The picture each build's latest published day opens with. Picked in SQL, one a build: a list of big builds has thousands. */
+async function latestShown(em: Em, buildIds: readonly number[]): Promise<PublishedPicture[]> {
+  if (buildIds.length === 0) return [];
+  const rows = await em.execute<{ shown: number | null }[]>(
+    `select (select s.id from published_picture s join entry e on e.id = s.entry_id where e.build_id = b.id
+       order by e.day desc, e.sequence desc, s.cover desc, s.position limit 1) as shown
+     from build b where b.id in (${buildIds.map(() => '?').join(', ')})`, [...buildIds],
+  );
+  return em.find(PublishedPicture, { id: { $in: rows.flatMap(({ shown }) => shown ?? []) } }, { populate: ['picture'] });
+}
+
 /** A picture for each build: how it stands now if the restorer picked one, else the cover of its latest published day. */
 export async function coversOfBuilds(em: Em, buildIds: readonly number[]): Promise<Map<number, PictureView>> {
   const builds = await em.find(Build, { id: { $in: [...buildIds] } }, { populate: ['afterPicture', 'beforePicture'] });
@@ -28,11 +39,6 @@ export async function coversOfBuilds(em: Em, buildIds: readonly number[]): Promi
     if (picked) covers.set(build.id, pictureView(picked, { alt: `${build.title}, how it stands`, caption: '' }));
   }
   const without = builds.filter((build) => !covers.has(build.id)).map((build) => build.id);
-  if (without.length === 0) return covers;
-  const rows = await em.find(PublishedPicture, { entry: { build: { $in: without } } }, { populate: ['picture', 'entry'], orderBy: { entry: { day: 'desc' }, cover: 'desc', position: 'asc' } });
-  for (const row of rows) {
-    const build = row.entry.build.id;
-    if (!covers.has(build)) covers.set(build, pictureView(row.picture, { alt: row.alt, caption: '' }));
-  }
+  for (const { picture, alt } of await latestShown(em, without)) covers.set(picture.build.id, pictureView(picture, { alt, caption: '' }));
   return covers;
 }

@@ -11,7 +11,9 @@ import type { Em, Viewer } from '#server/http/context.ts';
 import { entryHref } from './entry-cards.service.ts';
 import { entryTakes, takesOf } from './takes.service.ts';
 import { tapeOf } from './tape.service.ts';
-import { workWords } from './work-words.ts';
+import { oneOfWork, workWords } from './work-words.ts';
+
+type Materials = ProjectionContext['materials'];
 
 /** What a reader's page is made of, gathered once: from the published document, or from a working copy for its preview. */
 export interface EntrySource {
@@ -20,21 +22,25 @@ export interface EntrySource {
   readonly document: EntryDocument;
   readonly costsShown: boolean;
   readonly writes: boolean;
+  /** The owner's materials, where they were read already. */
+  readonly materials?: Materials;
   /** Figures of a working copy, which no stored row has. */
   readonly working?: WorkingFigures;
 }
+
+const noFigures: EntryFigures = { used: 0, wasted: 0, costs: 0, bought: 0, minutes: 0, waiting: 0, unsettled: false };
 
 async function namesAround(em: Em, build: Build): Promise<Map<string, string>> {
   const crew = await em.find(CrewMember, { build: build.id }, { populate: ['person'] });
   return new Map([[build.owner.handle, build.owner.name], ...crew.map(({ person }) => [person.handle, person.name] as const)]);
 }
 
-async function projectionContext(em: Em, source: EntrySource, derived: EntryDerivation, plural: ReadonlyMap<string, string>): Promise<ProjectionContext> {
+async function projectionContext(em: Em, source: EntrySource, materials: Materials, derived: EntryDerivation, plural: ReadonlyMap<string, string>): Promise<ProjectionContext> {
   const { build, entry, document, costsShown } = source;
   const figures = source.working?.lines ?? await lineFigures(em, entry.id);
   return {
     measures: build.measures, currency: build.currency, day: document.day, dayTo: document.dayTo, stage: document.stage,
-    materials: await materialFacts(em, build.owner.id), costsShown,
+    materials, costsShown,
     figures: new Map([...figures].map(([key, line]) => [key, { value: costsShown ? line.value : null, short: line.short }])),
     workWords: derived.work ? workWords(derived.work, plural) : null, names: await namesAround(em, build),
   };
@@ -46,10 +52,18 @@ async function pluralsOf(em: Em, derived: EntryDerivation): Promise<Map<string, 
   return new Map(kind ? [[kind.one, kind.many]] : []);
 }
 
+/** What the build used so far; with a working copy, in place of what is published of its entry. */
+async function usedSoFar(em: Em, { build, entry, working }: EntrySource, sums: EntryFigures): Promise<number> {
+  const stored = (await usedOfBuilds(em, [build.id])).get(build.id) ?? 0;
+  if (!working) return stored;
+  const published = (await figuresOfEntries(em, [entry.id])).get(entry.id) ?? noFigures;
+  return stored - published.used - published.costs + sums.used + sums.costs;
+}
+
 async function tallyOf(em: Em, source: EntrySource, derived: EntryDerivation, sums: EntryFigures, plural: ReadonlyMap<string, string>): Promise<TallyView> {
   const { build, entry, costsShown } = source;
   const takes = derived.work ? source.working ? takesOf(derived, derived.work.amount, source.working.lines) : await entryTakes(em, entry.id, derived.work.amount) : null;
-  const buildUsed = (await usedOfBuilds(em, [build.id])).get(build.id) ?? 0;
+  const buildUsed = await usedSoFar(em, source, sums);
   const people = new Set(derived.times.filter((time) => time.kind !== 'waiting').map((time) => time.handle ?? time.name)).size;
   return {
     currency: build.currency,
@@ -58,7 +72,7 @@ async function tallyOf(em: Em, source: EntrySource, derived: EntryDerivation, su
       one: takes?.money ?? null, unsettled: sums.unsettled,
     } } : {}),
     minutes: sums.minutes, waiting: sums.waiting, people,
-    work: derived.work ? { words: workWords(derived.work, plural), one: `One ${derived.work.unit === 'piece' ? derived.work.kind : workWords({ ...derived.work, amount: '1/1' }, plural).replace(/^1 /, '')}` } : null,
+    work: derived.work ? { words: workWords(derived.work, plural), one: `One ${oneOfWork(derived.work)}` } : null,
     oneMinutes: takes && takes.minutes > 0 ? takes.minutes : null,
   };
 }
@@ -75,16 +89,15 @@ async function neighboursOf(em: Em, build: Build, entry: Entry): Promise<Neighbo
   return { before: at > 0 ? link(at - 1) : null, after: link(at + 1), first: at > 0 ? link(0) : null };
 }
 
-const noFigures: EntryFigures = { used: 0, wasted: 0, costs: 0, bought: 0, minutes: 0, waiting: 0, unsettled: false };
-
 /** A source projected: the rows readers get, and what was learnt on the way. */
 export async function projectedEntry(em: Em, source: EntrySource) {
   const { build } = source;
   const document = currentDocument(source.document);
-  const derived = deriveEntry(document, { measures: build.measures, currency: build.currency, materials: await materialFacts(em, build.owner.id) });
+  const materials = source.materials ?? (await materialFacts(em, build.owner.id));
+  const derived = deriveEntry(document, { measures: build.measures, currency: build.currency, materials });
   const plural = await pluralsOf(em, derived);
   const pictures = await pictureViews(em, build.id, derived.pictures.map((picture) => picture.key));
-  const context = await projectionContext(em, source, derived, plural);
+  const context = await projectionContext(em, source, materials, derived, plural);
   return { derived, plural, pictures, names: context.names, rows: projectEntry(document, context, pictures).rows };
 }
 
@@ -98,11 +111,11 @@ export async function entryPageOf(em: Em, source: EntrySource, preview: boolean)
   const { build, entry, document, costsShown, writes } = source;
   const { derived, plural, pictures, names, rows } = await projectedEntry(em, source);
   const sums = source.working?.sums ?? (await figuresOfEntries(em, [entry.id])).get(entry.id) ?? noFigures;
-  const stage = document.stage === null ? null : await em.findOne(Stage, { id: document.stage });
+  const stage = document.stage === null ? null : await em.findOne(Stage, { id: document.stage, build: build.id });
   const cover = derived.pictures.find((picture) => picture.cover) ?? derived.pictures[0];
   const coverView = cover ? pictures.get(cover.key) : undefined;
   return {
-    build: { slug: build.slug, title: build.title, currency: build.currency },
+    build: { slug: build.slug, title: build.title, currency: build.currency, visibility: build.visibility },
     owner: { handle: build.owner.handle, name: build.owner.name }, author: { handle: entry.author.handle, name: entry.author.name },
     withNames: withNames(derived, names, entry.author),
     number: entry.number, slug: entry.slug ?? '', title: document.title, lead: document.lead, day: document.day, dayTo: document.dayTo, stage: stage?.title ?? null,

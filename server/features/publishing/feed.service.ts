@@ -2,10 +2,11 @@ import { createElement } from 'react';
 import { renderToStaticMarkup } from 'react-dom/server';
 import { FeedEntry } from '#src/blocks/views.ts';
 import { Entry, type Build } from '#server/entities/index.ts';
+import { materialFacts } from '#server/features/shelf/materials.service.ts';
 import { requireVisibleBuild } from '#server/features/builds/build-access.service.ts';
 import type { Em } from '#server/http/context.ts';
 import { entryHref } from './entry-cards.service.ts';
-import { projectedEntry } from './entry-page.service.ts';
+import { projectedEntry, type EntrySource } from './entry-page.service.ts';
 import { freshEntries } from './home.service.ts';
 
 const itemsAFeed = 20;
@@ -31,6 +32,8 @@ export interface Feed {
   readonly path: string;
   readonly items: readonly FeedItem[];
   readonly modified: Date | null;
+  /** Whether crawlers may list it: an unlisted build's feed stands at its own address and nowhere else. */
+  readonly listed: boolean;
 }
 
 // XML 1.0, section 2.2, the production of Char
@@ -43,11 +46,11 @@ export function wellFormed(text: string): string {
   return [...text.toWellFormed()].filter((letter) => allowedInXml(letter.codePointAt(0) ?? 0)).join('');
 }
 
-async function feedItem(em: Em, entry: Entry, publicUrl: string): Promise<FeedItem | null> {
+async function feedItem(em: Em, entry: Entry, publicUrl: string, materials: NonNullable<EntrySource['materials']>): Promise<FeedItem | null> {
   const build = entry.build;
   if (!entry.published || !entry.firstPublishedAt) return null;
   // a feed has no reader it knows: costs kept to the crew are absent from it whoever asks
-  const { rows, pictures, derived } = await projectedEntry(em, { build, entry, document: entry.published, costsShown: build.costsShown, writes: false });
+  const { rows, pictures, derived } = await projectedEntry(em, { build, entry, document: entry.published, costsShown: build.costsShown, writes: false, materials });
   const cover = derived.pictures.find((picture) => picture.cover) ?? derived.pictures[0];
   const src = cover ? pictures.get(cover.key)?.src : undefined;
   return {
@@ -60,8 +63,12 @@ async function feedItem(em: Em, entry: Entry, publicUrl: string): Promise<FeedIt
 
 async function feedOf(em: Em, entries: readonly Entry[], publicUrl: string, about: Omit<Feed, 'items' | 'modified'>): Promise<Feed> {
   const items: FeedItem[] = [];
+  const owners = new Map<number, Awaited<ReturnType<typeof materialFacts>>>();
   for (const entry of entries) {
-    const item = await feedItem(em, entry, publicUrl);
+    const owner = entry.build.owner.id;
+    const materials = owners.get(owner) ?? (await materialFacts(em, owner));
+    owners.set(owner, materials);
+    const item = await feedItem(em, entry, publicUrl, materials);
     if (item) items.push(item);
   }
   const modified = items.reduce<Date | null>((latest, item) => (latest && latest > item.modified ? latest : item.modified), null);
@@ -71,7 +78,7 @@ async function feedOf(em: Em, entries: readonly Entry[], publicUrl: string, abou
 /** Everything fresh, by first publication. */
 export async function siteFeed(em: Em, publicUrl: string): Promise<Feed> {
   return feedOf(em, await freshEntries(em, itemsAFeed), publicUrl, {
-    title: 'Tallywright, everything fresh', description: 'Write up the work. Know what it cost.', homeUrl: `${publicUrl}/`, path: '/feed',
+    title: 'Tallywright, everything fresh', description: 'Write up the work. Know what it cost.', homeUrl: `${publicUrl}/`, path: '/feed', listed: true,
   });
 }
 
@@ -80,6 +87,7 @@ export async function buildFeed(em: Em, slug: string, publicUrl: string): Promis
   const { build } = await requireVisibleBuild(em, null, slug);
   return feedOf(em, await publishedOf(em, build), publicUrl, {
     title: wellFormed(build.title), description: wellFormed(build.lead) || `${wellFormed(build.title)}, day by day.`, homeUrl: `${publicUrl}/builds/${build.slug}`, path: `/builds/${build.slug}/feed`,
+    listed: build.visibility === 'public',
   });
 }
 

@@ -14,6 +14,7 @@ function sendFeed(res: Response, feed: Feed, format: keyof typeof formats, publi
   const { type, write } = formats[format];
   res.set({ 'Cache-Control': 'public, max-age=300', 'Cross-Origin-Resource-Policy': 'cross-origin', 'Access-Control-Allow-Origin': '*' });
   if (feed.modified) res.set('Last-Modified', feed.modified.toUTCString());
+  if (!feed.listed) res.set('X-Robots-Tag', 'noindex');
   res.set('Content-Type', type).send(Buffer.from(write(feed, publicUrl)));
 }
 

@@ -6,9 +6,9 @@ import { Entry } from '#server/entities/index.ts';
 import type { Em } from '#server/http/context.ts';
 import { countByKind, listedBuilds } from './builds-list.service.ts';
 import { entryCards, entryHref } from './entry-cards.service.ts';
-import { entryPageOf } from './entry-page.service.ts';
+import { projectedEntry } from './entry-page.service.ts';
 import { entryTakes } from './takes.service.ts';
-import { workWords } from './work-words.ts';
+import { oneOfWork } from './work-words.ts';
 
 const freshCount = 12;
 const takesCount = 6;
@@ -23,11 +23,14 @@ export async function freshEntries(em: Em, limit: number, offset = 0): Promise<E
 /** The slip of the opening day: its Used block, with what one took as the last word. */
 async function openingSlip(em: Em, entry: Entry): Promise<SlipView | null> {
   if (!entry.published) return null;
-  const page = await entryPageOf(em, { build: entry.build, entry, document: entry.published, costsShown: entry.build.costsShown, writes: false }, false);
-  const slip = page.rows.flatMap((row) => row.slips).find((one) => one.type === 'used')?.slip;
+  const { build } = entry;
+  const { rows, derived } = await projectedEntry(em, { build, entry, document: entry.published, costsShown: build.costsShown, writes: false });
+  const slip = rows.flatMap((row) => row.slips).find((one) => one.type === 'used')?.slip;
   if (!slip) return null;
-  const one = [page.tally.money?.one != null ? formatMoney(page.tally.money.one, page.tally.currency) : '', page.tally.oneMinutes != null ? formatMinutes(page.tally.oneMinutes) : ''].filter(Boolean).join(', ');
-  return page.tally.work && one !== '' ? { ...slip, footnote: undefined, sum: { label: `${page.tally.work.one} takes`, value: one } } : slip;
+  const takes = derived.work && (await entryTakes(em, entry.id, derived.work.amount));
+  if (!derived.work || !takes) return slip;
+  const figures = [build.costsShown ? formatMoney(takes.money, build.currency) : '', takes.minutes > 0 ? formatMinutes(takes.minutes) : ''].filter(Boolean);
+  return figures.length > 0 ? { ...slip, footnote: undefined, sum: { label: `One ${oneOfWork(derived.work)} takes`, value: figures.join(', ') } } : slip;
 }
 
 async function latestTakes(em: Em, entries: readonly Entry[]): Promise<HomeView['takes']> {
@@ -36,13 +39,16 @@ async function latestTakes(em: Em, entries: readonly Entry[]): Promise<HomeView[
   for (const entry of entries) {
     if (takes.length === takesCount || !entry.workKind || !entry.workAmount || seen.has(entry.workKind.id)) continue;
     const one = await entryTakes(em, entry.id, entry.workAmount);
-    if (!one || (one.money === 0 && one.minutes === 0)) continue;
+    // where costs are kept to the crew, that there was money says nothing either
+    const money = one && entry.build.costsShown ? one.money : null;
+    const minutes = one && one.minutes > 0 ? one.minutes : null;
+    if (!money && minutes === null) continue;
     seen.add(entry.workKind.id);
-    const work = { amount: '1/1', unit: entry.workUnit ?? 'piece', kind: entry.workKind.one };
-    const words = workWords(work, new Map()).replace(/^1 /, '');
+    const unit = entry.workUnit ?? 'piece';
+    const words = oneOfWork({ unit, kind: entry.workKind.one });
     takes.push({
-      one: work.unit === 'piece' ? `${words.charAt(0).toUpperCase()}${words.slice(1)}` : words, href: entryHref(entry.build, entry), build: entry.build.title, currency: entry.build.currency,
-      money: entry.build.costsShown ? one.money : null, minutes: one.minutes > 0 ? one.minutes : null,
+      one: unit === 'piece' ? `${words.charAt(0).toUpperCase()}${words.slice(1)}` : words, href: entryHref(entry.build, entry), build: entry.build.title, currency: entry.build.currency,
+      money, minutes,
     });
   }
   return takes;

@@ -4,7 +4,7 @@ import { figuresOfEntries } from '#server/features/shelf/figures.service.ts';
 import type { Em } from '#server/http/context.ts';
 import { entryHref } from './entry-cards.service.ts';
 
-/** A build's whole life: a bar for each published day of work. Without money where costs are hidden. */
+/** A build's whole life: a bar for each published entry, on the last day of its work. Without money where costs are hidden. */
 export async function tapeOf(em: Em, build: Build, showsCosts: boolean): Promise<TapeView> {
   const entries = await em.find(Entry, { build: build.id, firstPublishedAt: { $ne: null }, published: { $ne: null } }, {
     fields: ['id', 'number', 'slug', 'title', 'day', 'dayTo'], orderBy: { day: 'asc', number: 'asc' },
@@ -17,6 +17,8 @@ export async function tapeOf(em: Em, build: Build, showsCosts: boolean): Promise
       ...(showsCosts ? { money: (sums?.used ?? 0) + (sums?.wasted ?? 0) + (sums?.costs ?? 0) } : {}),
     };
   });
+  // a day of several weeks is begun before others and ends after them
+  days.sort((a, b) => (a.day === b.day ? a.number - b.number : a.day < b.day ? -1 : 1));
   const first = days[0]?.day;
   const last = days.at(-1)?.day;
   return { from: first && first < build.startedOn ? first : build.startedOn, to: last && last > build.startedOn ? last : build.startedOn, days };
