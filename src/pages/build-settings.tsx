@@ -33,7 +33,8 @@ export function makeAction(client: QueryClient) {
       return redirect(`/builds/${build}/settings`);
     }
     const { slug } = await call<typeof changeBuild>(client, 'PATCH', '/api/builds/:build/settings', { params: { build }, body: { ...buildInput(form), version: Number(textOf(form, 'version')) } });
-    await client.invalidateQueries();
+    // what this page shows stands at the old address, if the build was renamed: nothing is asked for there again
+    await client.invalidateQueries({ refetchType: 'none' });
     return redirect(`/builds/${slug}`);
   });
 }

@@ -1,26 +1,9 @@
 import type { Page } from 'playwright-core';
 import { expect } from 'vitest';
 import { expectAccessible } from './support/accessibility.ts';
+import { BUILD, linkOn, longestBuild } from './support/addresses.ts';
 import { journey } from './support/journey.ts';
 import { signIn } from './support/sign-in.ts';
-
-const BUILD = /^\/builds\/(?!new$)[a-z0-9-]+$/;
-const ENTRY = /^\/builds\/(?!new\/)[a-z0-9-]+\/(?!edit|plan|settings)[a-z0-9-]+$/;
-
-/** The first link of a page whose address has this form. */
-async function linkOn(page: Page, form: RegExp): Promise<string> {
-  const paths = await page.locator('a[href]').evaluateAll((links) => links.map((link) => new URL(link.getAttribute('href') ?? '', document.baseURI).pathname));
-  const found = paths.find((path) => form.test(path));
-  if (found === undefined) throw new Error(`${page.url()} has no link of the form ${form}: ${paths.join(', ')}`);
-  return found;
-}
-
-async function addressesFromHome(page: Page): Promise<{ build: string; entry: string }> {
-  await page.goto('/builds');
-  const build = await linkOn(page, BUILD);
-  await page.goto(build);
-  return { build, entry: await linkOn(page, ENTRY) };
-}
 
 async function expectOneHeading(page: Page): Promise<void> {
   expect(await page.locator('h1').count(), `headings of the first rank on ${page.url()}`).toBe(1);
@@ -29,7 +12,7 @@ async function expectOneHeading(page: Page): Promise<void> {
 
 journey('every page open to readers is accessible, wide and narrow, light and dark', async ({ open }) => {
   const { page } = await open();
-  const { build, entry } = await addressesFromHome(page);
+  const { build, entry } = await longestBuild(page);
   for (const path of ['/', '/builds', build, entry, '/sign-in', '/sign-up']) {
     const response = await page.goto(path);
     expect(response?.status(), path).toBe(200);
@@ -54,7 +37,7 @@ journey('every page of a restorer is accessible, wide and narrow, light and dark
 journey('public pages read the same with scripts off', async ({ open }) => {
   const reader = await open();
   const plain = await open({ scripts: false });
-  const { build, entry } = await addressesFromHome(reader.page);
+  const { build, entry } = await longestBuild(reader.page);
   for (const path of ['/', '/builds', build, entry]) {
     await reader.page.goto(path, { waitUntil: 'networkidle' });
     await plain.page.goto(path);
@@ -73,7 +56,7 @@ journey('a page that is not there says so, with status 404', async ({ open }) =>
 
 journey('readers walk from home to a build and its entry without a page being loaded anew', async ({ open }) => {
   const { page } = await open();
-  const { build, entry } = await addressesFromHome(page);
+  const { build, entry } = await longestBuild(page);
   await page.goto('/builds');
   await page.evaluate(() => document.documentElement.setAttribute('data-kept', 'yes'));
   await page.locator(`a[href="${build}"]`).first().click();

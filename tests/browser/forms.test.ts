@@ -64,7 +64,7 @@ for (const scripts of [true, false]) {
     const { page, expectComplaint } = await open({ scripts });
     expectComplaint(/status of 422/);
     await signIn(page, 'restorer');
-    const { slug } = await ask(page, '/api/builds', { kind: 'boat', title: `A plan ${how}`, currency: 'GBP', measures: 'imperial' }, z.object({ slug: z.string() }));
+    const { slug } = await ask(page, '/api/builds', { kind: 'boat', title: `A plan ${how}`, currency: 'GBP', measures: 'imperial', visibility: 'private' }, z.object({ slug: z.string() }));
     await page.goto(`/builds/${slug}/plan`);
     const stage = page.getByRole('group', { name: 'New stage 1', exact: true });
     const typed = { 'New stage': 'Ribs', Planned: '1,5', Hours: 'soon', 'Work to count': 'steamed rib', 'How many': '-4' } as const;

@@ -13,9 +13,9 @@ export async function ask<T>(page: Page, path: string, body: unknown, reply: z.Z
   return reply.parse(await response.json());
 }
 
-/** Starts a build and the write-up of yesterday without going through the forms, and opens its desk. Gives the desk's address. */
+/** Starts a private build and the write-up of yesterday without going through the forms, and opens its desk. Gives the desk's address. */
 export async function openDraft(page: Page, title: string): Promise<string> {
-  const { slug } = await ask(page, '/api/builds', { kind: 'boat', title, currency: 'GBP', measures: 'imperial' }, z.object({ slug: z.string() }));
+  const { slug } = await ask(page, '/api/builds', { kind: 'boat', title, currency: 'GBP', measures: 'imperial', visibility: 'private' }, z.object({ slug: z.string() }));
   const day = new Date(Date.now() - DAY_MS).toISOString().slice(0, 10);
   const { number } = await ask(page, `/api/builds/${slug}/entries`, { day }, z.object({ number: z.number() }));
   const desk = `/builds/${slug}/edit/${number}`;
