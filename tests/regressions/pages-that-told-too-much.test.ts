@@ -60,6 +60,16 @@ test('the days and feeds of an unlisted build say that they are nobody’s to fi
   await site.close();
 });
 
+test('the currency stays once something was drawn from the shed', async () => {
+  const buyer = await shop.build(owner, { title: 'Buyer' });
+  const build = await shop.build(owner, { title: 'Draws on the shed' });
+  const screws = await shop.material(owner, build, 'Screws');
+  await shop.signOff(owner, buyer, dayOf('2026-03-01', [boughtBlock([{ of: screws, amount: '10', money: '10.00', goes: 'shed' }])]));
+  expect((await readSettings(shop.em(), owner, build)).currencyFixed).toBe(false);
+  await shop.signOff(owner, build, dayOf('2026-03-02', [usedBlock([{ of: screws, amount: '3', from: 'shed' }])]));
+  expect((await readSettings(shop.em(), owner, build)).currencyFixed).toBe(true);
+});
+
 test('the currency stays once money is planned in it', async () => {
   const build = await shop.build(owner, { title: 'Planned' });
   await replaceStages(shop.em(), owner, build, [{ ...noStage, title: 'Ribs', plannedMoney: '123.45' }]);

@@ -30,10 +30,10 @@ export async function startRestoration(em: Em, caller: Pick<Caller, 'id'>, input
   });
 }
 
-/** Whether money stands anywhere in the build's currency: spent, on the shelf, or planned. */
+/** Whether money stands anywhere in the build's currency: spent, on the shelf, drawn from the shed, or planned. */
 async function moneyWritten(em: Em, build: Build): Promise<boolean> {
   const counts = [
-    await em.count(Cost, { build: build.id }), await em.count(Receipt, { build: build.id }), await em.count(Movement, { shelf: { build: build.id } }),
+    await em.count(Cost, { build: build.id }), await em.count(Receipt, { build: build.id }), await em.count(Movement, { $or: [{ build: build.id }, { shelf: { build: build.id } }] }),
     await em.count(Stage, { build: build.id, plannedMoney: { $ne: null } }),
   ];
   return counts.some((count) => count > 0);
