@@ -182,7 +182,7 @@ test('nobody is sent on to another site afterwards', async () => {
 
 describe('a site that is open to the world', () => {
   test('has no stand-in, and no button without GitHub of its own', async () => {
-    const open = await startTestServer({ env: { PUBLIC_URL: 'https://log.example' } });
+    const open = await startTestServer({ env: { PUBLIC_URL: 'https://log.example', TRUST_PROXY: '1' } });
     try {
       expect(await open.visitor().ask(readSession)).toEqual({ viewer: null, demo: false, github: false });
       for (const path of ['/sign-in/github', '/sign-in/github/callback', '/fake-github/login/oauth/authorize', '/fake-github/user']) {

@@ -62,7 +62,7 @@ describe('the sign-in page', () => {
     const page = await site.visitor().get('/sign-in');
     for (const who of ['restorer', 'crew', 'reader', 'moderator', 'administrator']) expect(page.text).toContain(`${who}@demo.example`);
     expect(page.text).toContain('href="/sign-in/github"');
-    const open = await startTestServer({ pages: 'source', env: { PUBLIC_URL: 'https://log.example' } });
+    const open = await startTestServer({ pages: 'source', env: { PUBLIC_URL: 'https://log.example', TRUST_PROXY: '1' } });
     try {
       const { text } = await open.visitor().get('/sign-in');
       expect(text).toContain('Sign in');
