@@ -2,18 +2,36 @@ import { existsSync } from 'node:fs';
 import { rm, writeFile } from 'node:fs/promises';
 import { join } from 'node:path';
 import type { Config } from './config.ts';
+import { openDatabase } from './database.ts';
 import { Person } from './entities/index.ts';
+import { demoAddress, demoPeople } from './features/accounts/demo-people.ts';
 import type { Parts } from './http/context.ts';
 import { DemoSeeder } from './seeders/demo-seeder.ts';
 
 const markerOf = (config: Config) => join(config.dataDir, 'demo-loading');
 
-/** Clears a data folder whose demo was interrupted half-way: it was empty before, so nothing of anybody's is lost but what was typed meanwhile. */
+async function holdsMoreThanTheDemo(file: string): Promise<boolean> {
+  if (!existsSync(file)) return false;
+  const orm = await openDatabase(file);
+  try {
+    return (await orm.em.fork().count(Person, { email: { $nin: demoPeople.map(({ key }) => demoAddress(key)) } })) > 0;
+  } finally {
+    await orm.close(true);
+  }
+}
+
+/**
+ * Clears a data folder whose demo was interrupted half-way, so that it starts over.
+ * A folder that has become somebody's in the meantime is left as it is.
+ */
 export async function clearInterruptedDemo(config: Config): Promise<void> {
   if (!existsSync(markerOf(config))) return;
-  console.log('The demo was interrupted while it went in; it starts over.');
-  const leftovers = ['tallywright.sqlite', 'tallywright.sqlite-wal', 'tallywright.sqlite-shm', 'pictures', 'quarantine'];
-  for (const name of leftovers) await rm(join(config.dataDir, name), { recursive: true, force: true });
+  const database = join(config.dataDir, 'tallywright.sqlite');
+  if (config.local && !(await holdsMoreThanTheDemo(database))) {
+    console.log('The demo was interrupted while it went in; it starts over.');
+    const leftovers = [database, `${database}-wal`, `${database}-shm`, join(config.dataDir, 'pictures'), join(config.dataDir, 'quarantine')];
+    for (const path of leftovers) await rm(path, { recursive: true, force: true });
+  }
   await rm(markerOf(config));
 }
 

@@ -25,7 +25,7 @@ function configOrExit(): Config {
 const config = configOrExit();
 const dev = process.argv.includes('--dev');
 const log = pino({ level: config.logLevel, redact: ['req.headers.cookie', 'req.headers.authorization'] });
-if (config.local) await clearInterruptedDemo(config);
+await clearInterruptedDemo(config);
 const orm = await openDatabase(join(config.dataDir, 'tallywright.sqlite'));
 const parts: Parts = { config, orm, log, now: () => new Date(), limits: true };
 let ready = false;
@@ -54,5 +54,10 @@ async function stop(): Promise<void> {
 process.on('SIGTERM', () => void stop());
 process.on('SIGINT', () => void stop());
 
-if (config.local) await loadDemo(parts);
-ready = true;
+try {
+  if (config.local) await loadDemo(parts);
+  ready = true;
+} catch (error) {
+  // stopped while the demo went in: the database was closed under it, and the next start begins it anew
+  if (!stopping) throw error;
+}
