@@ -16,6 +16,8 @@ export interface RenderOptions {
 }
 export interface RenderedPage {
   readonly status: number;
+  /** Page modules drawn, by their names in `src/pages`. */
+  readonly pages: readonly string[];
   readonly head: string;
   readonly html: string;
   /** JSON that is safe inside a script element. */
@@ -53,6 +55,7 @@ function markup(routes: Parameters<typeof createStaticRouter>[0], context: Stati
   const head = leadingRun.exec(html)?.[0] ?? '';
   return {
     status: context.statusCode,
+    pages: context.matches.flatMap(({ route }) => (route.handle as { page?: string } | undefined)?.page ?? []),
     head,
     html: html.slice(head.length),
     state: safeJson({

@@ -57,7 +57,7 @@ export function pageHandler(table: EndpointTable, parts: Parts, shell: PageShell
     const template = await shell.template(req.originalUrl);
     // functions as replacers: "$&" in somebody's text must not be read as a pattern
     res.status(page.status).type('html').send(template
-      .replace('<!--app-head-->', () => page.head)
+      .replace('<!--app-head-->', () => page.head + shell.preloads(page.pages))
       .replace('<!--app-html-->', () => page.html)
       .replace('<!--app-state-->', () => `<script id="state" type="application/json">${page.state}</script>`));
   };

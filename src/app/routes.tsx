@@ -42,8 +42,10 @@ function guarded<F extends LoaderFunction | ActionFunction>(run: F, options: Rou
 const empty: LoaderFunction = () => null;
 
 export function makeRoutes(client: QueryClient, options: RouteOptions): RouteObject[] {
-  const page = (path: string, load: () => Promise<PageModule>): RouteObject => ({
+  /** `name` is the page's file in `src/pages`, by which the server finds what to have fetched ahead. */
+  const page = (path: string, name: string, load: () => Promise<PageModule>): RouteObject => ({
     path,
+    handle: { page: name },
     lazy: async () => {
       const { Component, makeLoader, makeAction } = await load();
       return {
@@ -65,22 +67,22 @@ export function makeRoutes(client: QueryClient, options: RouteOptions): RouteObj
     children: [{
       ErrorBoundary: ErrorPage,
       children: [
-        page('', () => import('#src/pages/home.tsx')),
-        page('builds', () => import('#src/pages/builds.tsx')),
-        page('builds/new', () => import('#src/pages/start-build.tsx')),
-        page('builds/:build', () => import('#src/pages/build.tsx')),
-        page('builds/:build/settings', () => import('#src/pages/build-settings.tsx')),
-        page('builds/:build/plan', () => import('#src/pages/build-plan.tsx')),
-        page('builds/:build/edit/:number', () => import('#src/pages/edit-entry.tsx')),
-        page('builds/:build/edit/:number/preview', () => import('#src/pages/preview-entry.tsx')),
-        page('builds/:build/:entry', () => import('#src/pages/entry.tsx')),
-        page('write', () => import('#src/pages/write.tsx')),
-        page('my-builds', () => import('#src/pages/my-builds.tsx')),
-        page('sign-in', () => import('#src/pages/sign-in.tsx')),
-        page('sign-up', () => import('#src/pages/sign-up.tsx')),
-        page('sign-out', () => import('#src/pages/sign-out.tsx')),
-        page('settings', () => import('#src/pages/settings.tsx')),
-        page('*', () => import('#src/pages/not-found.tsx')),
+        page('', 'home', () => import('#src/pages/home.tsx')),
+        page('builds', 'builds', () => import('#src/pages/builds.tsx')),
+        page('builds/new', 'start-build', () => import('#src/pages/start-build.tsx')),
+        page('builds/:build', 'build', () => import('#src/pages/build.tsx')),
+        page('builds/:build/settings', 'build-settings', () => import('#src/pages/build-settings.tsx')),
+        page('builds/:build/plan', 'build-plan', () => import('#src/pages/build-plan.tsx')),
+        page('builds/:build/edit/:number', 'edit-entry', () => import('#src/pages/edit-entry.tsx')),
+        page('builds/:build/edit/:number/preview', 'preview-entry', () => import('#src/pages/preview-entry.tsx')),
+        page('builds/:build/:entry', 'entry', () => import('#src/pages/entry.tsx')),
+        page('write', 'write', () => import('#src/pages/write.tsx')),
+        page('my-builds', 'my-builds', () => import('#src/pages/my-builds.tsx')),
+        page('sign-in', 'sign-in', () => import('#src/pages/sign-in.tsx')),
+        page('sign-up', 'sign-up', () => import('#src/pages/sign-up.tsx')),
+        page('sign-out', 'sign-out', () => import('#src/pages/sign-out.tsx')),
+        page('settings', 'settings', () => import('#src/pages/settings.tsx')),
+        page('*', 'not-found', () => import('#src/pages/not-found.tsx')),
       ],
     }],
   }];

@@ -5,6 +5,6 @@ import type { PageShell } from '#server/http/page-shell.ts';
 export const sourceShell: PageShell = {
   template: () => readFile('index.html', 'utf8'),
   entry: () => import('#src/entry-server.tsx'),
-  explain: () => undefined,
+  preloads: () => '', explain: () => undefined,
   close: () => Promise.resolve(),
 };
