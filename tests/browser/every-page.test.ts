@@ -1,7 +1,8 @@
 import type { Page } from 'playwright-core';
 import { expect } from 'vitest';
 import { expectAccessible } from './support/accessibility.ts';
-import { BUILD, linkOn, longestBuild } from './support/addresses.ts';
+import { BUILD, DESK, linkOn, longestBuild } from './support/addresses.ts';
+import { deskIsOpen } from './support/desk-hand.ts';
 import { journey } from './support/journey.ts';
 import { signIn } from './support/sign-in.ts';
 
@@ -32,6 +33,21 @@ journey('every page of a restorer is accessible, wide and narrow, light and dark
     await expectOneHeading(page);
     await expectAccessible(page);
   }
+});
+
+journey('the desk with a draft on it, and its preview, are accessible, wide and narrow, light and dark', async ({ open }) => {
+  const { page } = await open();
+  await signIn(page, 'restorer');
+  await page.goto('/write');
+  const desk = await linkOn(page, DESK);
+  await page.goto(desk);
+  await deskIsOpen(page);
+  await page.waitForLoadState('networkidle');
+  await expectOneHeading(page);
+  await expectAccessible(page);
+  await page.goto(`${desk}/preview`);
+  await expectOneHeading(page);
+  await expectAccessible(page);
 });
 
 journey('public pages read the same with scripts off', async ({ open }) => {
