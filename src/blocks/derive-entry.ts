@@ -1,3 +1,4 @@
+import { mostOfDay } from '#domain/money.ts';
 import { readAmountOfWork } from '#domain/work.ts';
 import type { BlockContext, BlockDerivation, DerivedCost, DerivedReceipt, DerivedTime, DerivedUse, PureBlock, ShownPicture } from './block.ts';
 import { isProse, type BlockNode, type EntryDocument, type TopNode } from './entry-document.ts';
@@ -47,6 +48,22 @@ function workOf(document: EntryDocument, faults: Record<string, string>): EntryD
   return amount.ok && work.kind.trim() !== '' ? { amount: amount.value, unit: work.unit, kind: work.kind.trim().toLowerCase() } : null;
 }
 
+/** What each block brings in and spends, minor units of the build's currency. */
+function moneyByBlock({ receipts, costs }: EntryDerivation): Map<string, number> {
+  const sums = new Map<string, number>();
+  for (const { block, money } of costs) sums.set(block, (sums.get(block) ?? 0) + money);
+  for (const { block, total, notSorted } of receipts) sums.set(block, (sums.get(block) ?? 0) + total + notSorted);
+  return sums;
+}
+
+/** A day of more money than a day can hold is a slip of the finger: said beside the block that holds the most, and none of it is counted. */
+function withMoneyThatFits(derived: EntryDerivation): EntryDerivation {
+  const sums = moneyByBlock(derived);
+  if ([...sums.values()].reduce((sum, money) => sum + money, 0) <= mostOfDay) return derived;
+  const [[block] = ['content']] = [...sums].toSorted(([, a], [, b]) => b - a);
+  return { ...derived, faults: { ...derived.faults, [block]: 'That is more money than a day can hold: look at these figures again.' }, receipts: [], costs: [] };
+}
+
 /** Everything an entry says to the ledger, as one pure function of its document: movements, receipts, costs, time, work, pictures, and what bars signing off. */
 export function deriveEntry(document: EntryDocument, context: EntryContext): EntryDerivation {
   const around = contextOf(document, context);
@@ -69,7 +86,7 @@ export function deriveEntry(document: EntryDocument, context: EntryContext): Ent
       place += derived.receipt.lines.length;
     }
   }
-  return result;
+  return withMoneyThatFits(result);
 }
 
 /** Reads every typed amount that is new or changed; words that stood in `kept` keep the amount they had. */

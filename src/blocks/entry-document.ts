@@ -31,6 +31,15 @@ export const workDone = z.object({
 });
 export type WorkDone = z.output<typeof workDone>;
 
+const mostLines = 2000;
+function linesOf(node: TopNode): number {
+  if (isProse(node)) return 0;
+  return Object.values(node.attrs.data).reduce((sum: number, value: unknown) => sum + (Array.isArray(value) ? value.length : 0), 0);
+}
+function holdsSoManyLines(content: readonly TopNode[]): boolean {
+  return content.reduce((sum, node) => sum + linesOf(node), 0) <= mostLines;
+}
+
 /** One write-up as the desk holds it: the words, the blocks, and the few facts above them. */
 export const entryDocument = z.object({
   title: z.string().max(140),
@@ -39,7 +48,7 @@ export const entryDocument = z.object({
   dayTo: plainDay.nullable(),
   stage: z.number().int().positive().nullable(),
   work: workDone.nullable(),
-  content: z.array(topNode).max(600),
+  content: z.array(topNode).max(600).refine(holdsSoManyLines, 'A day holds 2,000 lines at most: write the rest up as another day.'),
 });
 export type EntryDocument = z.output<typeof entryDocument>;
 

@@ -1,5 +1,5 @@
 import Fraction from 'fraction.js';
-import { roundHalfEven } from './rounding.ts';
+import { roundedWithin } from './rounding.ts';
 
 export interface StageFigures {
   /** minor units; null when the stage has no plan */
@@ -15,15 +15,18 @@ export interface StageFigures {
   readonly done: boolean;
 }
 
-function byWork(soFar: number, forEach: number, planned: Fraction, done: Fraction): number {
+// Minor units. A forecast beyond it comes of a slip in the work planned or done; under it, those of all stages still add up exactly.
+const mostForecast = 1e14;
+
+function byWork(soFar: number, forEach: number, planned: Fraction, done: Fraction): number | null {
   const remaining = planned.gt(done) ? planned.sub(done) : new Fraction(0);
-  return roundHalfEven(remaining.mul(forEach).div(done).add(soFar));
+  return roundedWithin(remaining.mul(forEach).div(done).add(soFar), mostForecast);
 }
 
 // Planned ÷ (earned ÷ so far), the estimate at completion of earned value, where earned is planned × percent.
-function byPercent(soFar: number, planned: number, percent: Fraction): number {
+function byPercent(soFar: number, planned: number, percent: Fraction): number | null {
   const earned = percent.mul(planned).div(100);
-  return roundHalfEven(new Fraction(planned).div(earned.div(soFar)));
+  return roundedWithin(new Fraction(planned).div(earned.div(soFar)), mostForecast);
 }
 
 /**

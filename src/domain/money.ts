@@ -14,6 +14,9 @@ export interface Money<C extends string = string> {
 
 // A typed amount goes up to this many minor units, so that thousands of them still add up exactly.
 const mostTyped = 1e12;
+/** What one day, and one build, may come to in minor units: every sum over them stays exact (2^53 − 1 is 9e15). */
+export const mostOfDay = 1e13;
+export const mostOfBuild = 1e15;
 
 /**
  * An amount of money.

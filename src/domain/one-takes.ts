@@ -1,5 +1,5 @@
 import Fraction from 'fraction.js';
-import { roundHalfEven } from './rounding.ts';
+import { roundedWithin } from './rounding.ts';
 
 export interface UseForOne {
   readonly material: string;
@@ -51,6 +51,8 @@ interface Sums {
 }
 
 const nought = new Fraction(0);
+// Minor units or minutes for one: more comes of a slip in the work done.
+const mostForOne = 1e13;
 
 function share(wasted: Fraction, used: Fraction): Fraction | null {
   return used.n === 0n ? null : wasted.div(used);
@@ -71,24 +73,28 @@ function sumsByMaterial(uses: readonly UseForOne[]): Map<string, Sums> {
  * What one unit of work really took: material (exact base units), money (minor units, half to
  * even once, of the sum) and hands-on minutes (nearest whole, half to even). Only *for each*
  * lines and times count; what was wasted is kept apart and given as a share of what was used.
- * @returns null when no work was done
+ * @returns null when no work was done, or so little that what one takes is no figure
  */
 export function whatOneTakes({ work, uses, times }: WorkForOne): OneTakes | null {
   if (work.n === 0n) return null;
   const each = uses.filter(({ counts }) => counts === 'each');
   const moneyOf = (kind: UseForOne['kind']) =>
     each.reduce((sum, use) => (use.kind === kind ? sum + use.value : sum), 0);
-  const forOne = (sum: number) => roundHalfEven(new Fraction(sum).div(work));
-  const materials = [...sumsByMaterial(each)].map(([material, { used, wasted, money }]) => ({
+  const forOne = (sum: number) => roundedWithin(new Fraction(sum).div(work), mostForOne);
+  const money = forOne(moneyOf('used'));
+  const minutes = forOne(times.reduce((sum, time) => (time.kind === 'each' ? sum + time.minutes : sum), 0));
+  if (money === null || minutes === null) return null;
+  const materials = [...sumsByMaterial(each)].map(([material, own]) => ({
     material,
-    amount: used.div(work),
-    money: forOne(money),
-    wastedShare: share(wasted, used),
+    amount: own.used.div(work),
+    // no material takes more than all of them
+    money: forOne(own.money) ?? money,
+    wastedShare: share(own.wasted, own.used),
   }));
   return {
     materials,
-    money: forOne(moneyOf('used')),
-    minutes: forOne(times.reduce((sum, { minutes, kind }) => (kind === 'each' ? sum + minutes : sum), 0)),
+    money,
+    minutes,
     wastedShare: share(new Fraction(moneyOf('wasted')), new Fraction(moneyOf('used'))),
   };
 }

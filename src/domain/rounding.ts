@@ -38,6 +38,11 @@ export function roundHalfEven(value: Fraction): number {
   return safeNumber(halfEvenQuotient(value.s * value.n, value.d));
 }
 
+/** The nearest whole number, half to even; nothing beyond `most`, where it would be no figure anybody can use. */
+export function roundedWithin(value: Fraction, most: number): number | null {
+  return value.abs().gt(most) ? null : roundHalfEven(value);
+}
+
 function weightsAsWhole(weights: readonly (number | Fraction)[]): bigint[] {
   const exact = weights.map((weight) => {
     const fraction = typeof weight === 'number' ? new Fraction(wholeNumber(weight, 'A weight')) : weight;

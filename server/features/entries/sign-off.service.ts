@@ -3,6 +3,7 @@ import { AppError } from '#contracts/errors.ts';
 import { deriveEntry, readEntry, withUniqueIds, type EntryDerivation, type EntryDocument } from '#src/blocks/pure.ts';
 import type { Build, Entry, Stage } from '#server/entities/index.ts';
 import { workKindNamed } from '#server/features/builds/work-kinds.service.ts';
+import { requireMoneyThatFits } from '#server/features/shelf/money-that-fits.service.ts';
 import type { Caller, Em } from '#server/http/context.ts';
 import { requireEntry, requireStage, requireVersion } from './entry-access.ts';
 import { giveAddress } from './entry-address.ts';
@@ -42,6 +43,7 @@ async function publish(em: Em, build: Build, entry: Entry, document: EntryDocume
   await replaceRows(em, { build, entry, stage, derived });
   setPublished(entry, document, stage, now);
   await em.flush();
+  await requireMoneyThatFits(em, build);
   return { version: entry.version, href: `/builds/${build.slug}/${entry.slug ?? ''}` };
 }
 
