@@ -37,8 +37,8 @@ export const Build = defineEntity({
     archivedAt: p.datetime().nullable(),
     beforePicture: () => p.manyToOne(Picture).nullable().deleteRule('set null'),
     afterPicture: () => p.manyToOne(Picture).nullable().deleteRule('set null'),
-    /** Last number given out to an entry, receipt or shelf act of this build: one sequence for all. */
-    sequence: p.integer().default(0),
+    /** Last number given to an entry: none is given again, whatever became of the entry. */
+    lastNumber: p.integer().default(0),
     startedOn: p.string(),
     version: p.integer().version(),
     createdAt: p.datetime().onCreate(() => new Date()),

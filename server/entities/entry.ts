@@ -5,7 +5,7 @@ import { Person } from './person.ts';
 import { Stage } from './stage.ts';
 import { WorkKind } from './work-kind.ts';
 
-/** One write-up: one published document and at most one working copy. The columns below `published` are derived at sign-off. */
+/** One write-up: one published document and at most one working copy. Title, days, stage and work are derived at sign-off. */
 export const Entry = defineEntity({
   name: 'Entry',
   tableName: 'entry',
@@ -17,15 +17,13 @@ export const Entry = defineEntity({
     guid: p.uuid().unique(),
     build: () => p.manyToOne(Build).deleteRule('cascade'),
     author: () => p.manyToOne(Person),
-    /** Number in the build's one sequence, by creation. */
+    /** Number in the one sequence of the build's owner, by creation. */
     sequence: p.integer(),
     /** Entry number shown to readers, by creation among entries. */
     number: p.integer(),
     /** Given at first sign-off. */
     slug: p.string().nullable(),
-    working: p.json<EntryDocument | null>().nullable(),
     workingAt: p.datetime().nullable(),
-    published: p.json<EntryDocument | null>().nullable(),
     title: p.string().default(''),
     day: p.string(),
     dayTo: p.string().nullable(),
@@ -40,6 +38,11 @@ export const Entry = defineEntity({
     /** Checked on every save: a save over somebody's newer one is refused. */
     version: p.integer().version(),
     createdAt: p.datetime().onCreate(() => new Date()),
+    /** Digest of the words taken back: signed off again unchanged, they are no edit. */
+    takenBack: p.string().nullable(),
+    // last, since long columns are walked by whoever wants one behind them
+    working: p.json<EntryDocument | null>().nullable(),
+    published: p.json<EntryDocument | null>().nullable(),
   },
 });
 export type Entry = InferEntity<typeof Entry>;

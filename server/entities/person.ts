@@ -18,6 +18,8 @@ export const Person = defineEntity({
     role: p.string().$type<Role>().default('member'),
     suspendedUntil: p.datetime().nullable(),
     suspendedReason: p.text().nullable(),
+    /** Last number given out to an entry, receipt or shelf act of their builds and shed: one sequence for all, since builds share the shed. */
+    sequence: p.integer().default(0),
     createdAt: p.datetime().onCreate(() => new Date()),
   },
 });

@@ -13,7 +13,7 @@ export const Receipt = defineEntity({
     build: () => p.manyToOne(Build).deleteRule('cascade').index(),
     entry: () => p.manyToOne(Entry).nullable().deleteRule('cascade'),
     block: p.string().nullable(),
-    /** Number in the build's one sequence; a Bought block takes its entry's. */
+    /** Number in the owner's one sequence; a Bought block takes its entry's. */
     sequence: p.integer(),
     day: p.string(),
     supplier: p.string(),

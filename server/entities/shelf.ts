@@ -16,8 +16,6 @@ export const Shelf = defineEntity({
     person: () => p.manyToOne(Person).nullable().deleteRule('cascade'),
     currency: p.string(),
     method: p.string().$type<PricingMethod>().default('fifo'),
-    /** Sequence of acts on the shed itself (a build's shelf uses the build's). */
-    sequence: p.integer().default(0),
   },
 });
 export type Shelf = InferEntity<typeof Shelf>;

@@ -39,9 +39,9 @@ export const deskView = z.object({
   build: z.object({ slug: z.string(), title: z.string(), currency: z.string(), measures: z.enum(measuresList), method: z.enum(pricingMethods), costsShown: z.boolean(), visibility: z.string() }),
   shedMethod: z.enum(pricingMethods),
   entry: z.object({
-    number: z.number().int(), version: z.number().int(), document: entryDocument, hasWorking: z.boolean(), savedAt: z.string().nullable(),
+    number: z.number().int(), guid: z.string(), version: z.number().int(), document: entryDocument, hasWorking: z.boolean(), savedAt: z.string().nullable(),
     published: z.boolean(), href: z.string().nullable(),
-    /** Number of the build's one sequence: the place of its movements among those of a day. */
+    /** Number of the owner's one sequence: the place of its movements among those of a day. */
     sequence: z.number().int(),
   }),
   stages: z.array(z.object({

@@ -43,7 +43,7 @@ async function peopleOf(em: Em, build: Build): Promise<DeskView['people']> {
 
 function entryView(build: Build, entry: Entry): DeskView['entry'] {
   return {
-    number: entry.number, version: entry.version, sequence: entry.sequence, document: standingDocument(entry), hasWorking: entry.working != null,
+    number: entry.number, guid: entry.guid, version: entry.version, sequence: entry.sequence, document: standingDocument(entry), hasWorking: entry.working != null,
     savedAt: entry.workingAt?.toISOString() ?? null, published: entry.published != null, href: entry.published && entry.slug ? `/builds/${build.slug}/${entry.slug}` : null,
   };
 }

@@ -5,16 +5,20 @@ import type { Caller, Em } from '#server/http/context.ts';
 import { requireStage } from './entry-access.ts';
 import { blankDocument } from './stored-document.ts';
 
-/** The next number of the build's one sequence. Counted up in one statement, first in its transaction, so that no two get the same. */
-async function nextSequence(em: Em, build: number): Promise<number> {
-  const [row] = await em.execute<{ sequence: number }[]>('update build set sequence = sequence + 1 where id = ? returning sequence', [build]);
-  if (!row) throw new Error(`Build ${build} has no sequence`);
+// Both are counted up in one statement each, first in their transaction, so that no two get the same.
+
+/** The next number of a restorer's one sequence. Their builds share a shed, and its order is that of all their entries. */
+async function nextSequence(em: Em, owner: number): Promise<number> {
+  const [row] = await em.execute<{ sequence: number }[]>('update person set sequence = sequence + 1 where id = ? returning sequence', [owner]);
+  if (!row) throw new Error(`Person ${owner} has no sequence`);
   return row.sequence;
 }
 
+/** The next entry number of a build; that of a discarded entry is not given again. */
 async function nextNumber(em: Em, build: number): Promise<number> {
-  const [row] = await em.execute<{ number: number }[]>('select ifnull(max(number), 0) + 1 as number from entry where build_id = ?', [build]);
-  return row?.number ?? 1;
+  const [row] = await em.execute<{ number: number }[]>('update build set last_number = last_number + 1 where id = ? returning last_number as number', [build]);
+  if (!row) throw new Error(`Build ${build} has no numbers`);
+  return row.number;
 }
 
 /** Opens a new write-up of a day of work, with its numbers and an empty working copy. */
@@ -22,7 +26,7 @@ export async function startDay(em: Em, caller: Caller, slug: string, input: { da
   const build = await requireWritableBuild(em, caller, slug);
   const stage = await requireStage(em, build, input.stage);
   return em.transactional(async (inner) => {
-    const sequence = await nextSequence(inner, build.id);
+    const sequence = await nextSequence(inner, build.owner.id);
     const number = await nextNumber(inner, build.id);
     inner.persist(inner.create(Entry, {
       guid: randomUUID(), build: inner.getReference(Build, build.id), author: inner.getReference(Person, caller.id), sequence, number,

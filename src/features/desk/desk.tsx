@@ -34,7 +34,7 @@ export function Desk({ build, number }: DeskProps) {
     await client.fetchQuery(deskQuery({ build, number }));
     setOpening((count) => count + 1);
   };
-  return <DeskOfPerson key={`${handle} ${opening}`} handle={handle} build={build} number={number} onReopen={reopen} />;
+  return <DeskOfPerson key={`${handle} ${opening}`} handle={handle} guid={view.data.entry.guid} build={build} number={number} onReopen={reopen} />;
 }
 
 function DeskShape() {
@@ -45,10 +45,10 @@ function DeskShape() {
   );
 }
 
-function DeskOfPerson({ handle, build, number, onReopen }: KeptAt & { onReopen: () => Promise<void> }) {
+function DeskOfPerson({ handle, guid, build, number, onReopen }: KeptAt & { guid: string; onReopen: () => Promise<void> }) {
   const { data: view } = useQuery(deskQuery({ build, number }));
   const at = useMemo(() => ({ handle, build, number }), [handle, build, number]);
-  const kept = useMemo(() => keptHere(at), [at]);
+  const kept = useMemo(() => keptHere({ handle, guid }), [handle, guid]);
   const start = useDeskStart(view, kept);
   if (!view || !start) return <DeskShape />;
   return <DeskOpen view={view} start={start} at={at} kept={kept} onReopen={onReopen} />;

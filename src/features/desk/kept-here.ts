@@ -1,11 +1,16 @@
 import { openDB, type DBSchema, type IDBPDatabase } from 'idb';
 import { entryDocument, steppedUp, type EntryDocument } from '#src/blocks/pure.ts';
 
-/** Whose text, of which build and entry. */
+/** Whose desk, on which entry of which build. */
 export interface KeptAt {
   readonly handle: string;
   readonly build: string;
   readonly number: number;
+}
+/** Whose text, of which entry: its guid is no other entry's ever, and stays through a new name of the build. */
+export interface KeptKey {
+  readonly handle: string;
+  readonly guid: string;
 }
 
 export interface KeptText {
@@ -42,13 +47,13 @@ function store(): Promise<IDBPDatabase<DeskStore>> {
   return opened;
 }
 
-function keyOf({ handle, build, number }: KeptAt): string {
-  return `${handle}/${build}/${number}`;
+function keyOf({ handle, guid }: KeptKey): string {
+  return `${handle}/${guid}`;
 }
 
 /** What this browser keeps of a desk, by account: the text not yet on the server, and the pictures not yet gone up. */
-export function keptHere(at: KeptAt) {
-  const entry = keyOf(at);
+export function keptHere(of: KeptKey) {
+  const entry = keyOf(of);
   return {
     read: async (): Promise<KeptText | null> => {
       const kept = await (await store()).get('texts', entry);

@@ -31,7 +31,7 @@ export function viewOf(part: Partial<DeskView> = {}): DeskView {
   return {
     build: { slug: 'curlew', title: 'Curlew, a dinghy', currency: 'USD', measures: 'us', method: 'fifo', costsShown: true, visibility: 'public' },
     shedMethod: 'fifo',
-    entry: { number: 7, version: 3, document: documentOf(), hasWorking: true, savedAt: null, published: false, href: null, sequence: 20 },
+    entry: { number: 7, guid: '0b8f3a52-6a2f-4a7e-9d0e-0a9b6d3c1f10', version: 3, document: documentOf(), hasWorking: true, savedAt: null, published: false, href: null, sequence: 20 },
     stages: [], workKinds: [], people: [{ handle: 'marlow', name: 'Marlow' }], materials: materials.map((one) => ({ ...one, packs: [...one.packs], ratio: null, hazards: [...one.hazards] })) as DeskView['materials'],
     shelf: [], history: [], buildUsed: 0, ...part,
   };
