@@ -78,9 +78,10 @@ export const takeBackEntry = endpoint({
   method: 'POST', path: '/api/builds/:build/entries/:number/take-back', access: 'member', params: entryParams, query: nothing,
   body: z.object({ version: z.number().int() }), reply: z.object({ version: z.number().int() }),
 });
-/** Throws away the working copy: of a published entry the changes, of a draft the whole entry. */
+/** Throws away the working copy of that version: of a published entry the changes, of a draft the whole entry, of one taken back all but its address. */
 export const discardWorking = endpoint({
-  method: 'DELETE', path: '/api/builds/:build/entries/:number/working', access: 'member', params: entryParams, query: nothing, body: noBody, reply: ok,
+  method: 'DELETE', path: '/api/builds/:build/entries/:number/working', access: 'member', params: entryParams, query: nothing,
+  body: z.object({ version: z.number().int() }), reply: ok,
 });
 /** What readers will see of the working copy. */
 export const previewEntry = endpoint({

@@ -37,7 +37,7 @@ export function useEntryCalls({ build, number }: EntryAt) {
     saveWorking: (body: InputOf<typeof saveWorking>['body']) => send<typeof saveWorking>('PUT', '/api/builds/:build/entries/:number/working', { params, body }),
     signOff: (body: InputOf<typeof signOffEntry>['body']) => send<typeof signOffEntry>('POST', '/api/builds/:build/entries/:number/sign-off', { params, body }),
     takeBack: (version: number) => send<typeof takeBackEntry>('POST', '/api/builds/:build/entries/:number/take-back', { params, body: { version } }),
-    discard: () => send<typeof discardWorking>('DELETE', '/api/builds/:build/entries/:number/working', { params }),
+    discard: (version: number) => send<typeof discardWorking>('DELETE', '/api/builds/:build/entries/:number/working', { params, body: { version } }),
   };
 }
 

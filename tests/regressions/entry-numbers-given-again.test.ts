@@ -1,5 +1,4 @@
 import { afterAll, beforeAll, expect, test } from 'vitest';
-import { discardTyped } from '#server/features/entries/discard-working.service.ts';
 import { readDeskOf } from '#server/features/entries/desk.service.ts';
 import { Workshop } from '#tests/support/workshop.ts';
 
@@ -15,7 +14,7 @@ test('a number once given is given to no other entry of the build', async () => 
   const build = await shop.build(owner);
   const first = await shop.start(owner, build, '2026-03-01');
   const thrownAway = await shop.start(owner, build, '2026-03-02');
-  await discardTyped(shop.em(), owner, build, thrownAway);
+  await shop.discard(owner, build, thrownAway);
   expect([first, thrownAway, await shop.start(owner, build, '2026-03-03')]).toEqual([1, 2, 3]);
 });
 

@@ -3,7 +3,6 @@ import { AppError } from '#contracts/errors.ts';
 import type { EntryDocument } from '#src/blocks/pure.ts';
 import { Build, Material, Movement } from '#server/entities/index.ts';
 import { readDeskOf } from '#server/features/entries/desk.service.ts';
-import { discardTyped } from '#server/features/entries/discard-working.service.ts';
 import { verifyLedger } from '#server/features/entries/ledger-check.service.ts';
 import { saveTyped } from '#server/features/entries/save-working.service.ts';
 import { buildFigures } from '#server/features/shelf/figures.service.ts';
@@ -75,7 +74,7 @@ test('the changes to a published entry are a draft too: until it is signed off a
   await shop.signOff(owner, build, changed, entry);
   expect(await figures()).toMatchObject({ used: 400 });
   await shop.save(owner, build, entry, dayOf('2026-02-03', []));
-  await discardTyped(shop.em(), owner, build, entry);
+  await shop.discard(owner, build, entry);
   expect(await shop.entry(build, entry)).toMatchObject({ working: null, workingAt: null, title: 'Day of 2026-02-03' });
   expect(await figures()).toMatchObject({ used: 400 });
 });
@@ -139,7 +138,7 @@ test('what cannot be read is kept as it was typed', async () => {
 test('a draft that is thrown away is gone, with its place in the lists', async () => {
   const number = await shop.start(owner, build, '2026-02-01');
   await shop.save(owner, build, number, dayOf('2026-02-01', [timeBlock([{ time: '1 h' }])]));
-  await discardTyped(shop.em(), owner, build, number);
+  await shop.discard(owner, build, number);
   await expect(shop.entry(build, number)).rejects.toThrow(/Entry not found/);
 });
 

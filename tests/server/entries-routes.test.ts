@@ -40,7 +40,7 @@ test('a day from start to sign-off and back, over the wire, by the crew on the r
   expect(await site.visitor().ask(readBuild, { params: { build } })).toMatchObject({ days: 1, minutes: 450, figures: { spent: 4150, used: 1693, left: 2457, receipts: 1, materialsLeft: 1 } });
   const { number: next } = await owner.ask(startEntry, { params: { build }, body: { day: '2026-05-03', stage: null } });
   expect(await owner.ask(readLastTime, { params: { build, number: next } })).toMatchObject({ title: 'Nails driven', used: [{ amount: '204' }], time: [{ time: '7 h 30' }] });
-  await owner.ask(discardWorking, { params: { build, number: next } });
+  await owner.ask(discardWorking, { params: { build, number: next }, body: { version: 1 } });
   await owner.ask(takeBackEntry, { params, body: { version } });
   expect(await site.visitor().ask(readBuild, { params: { build } })).toMatchObject({ days: 0, figures: { spent: 0, left: 0, receipts: 0 } });
   expect((await owner.ask(readDesk, { params })).entry).toMatchObject({ published: false, hasWorking: true, document: { title: 'Nails driven' } });

@@ -3,7 +3,6 @@ import { AppError } from '#contracts/errors.ts';
 import { putStages } from '#server/features/builds/stages.service.ts';
 import { Build, Cost, Entry, EntryAddress, Movement, Receipt, Shelf, Stage, TimeLine, WorkKind } from '#server/entities/index.ts';
 import { readDeskOf } from '#server/features/entries/desk.service.ts';
-import { discardTyped } from '#server/features/entries/discard-working.service.ts';
 import { verifyLedger } from '#server/features/entries/ledger-check.service.ts';
 import { readLastLines } from '#server/features/entries/last-time.service.ts';
 import { signOffDay } from '#server/features/entries/sign-off.service.ts';
@@ -138,7 +137,7 @@ test('an entry has its address from its title, keeps every one it had, and none 
   expect(addresses.map(({ slug }) => slug)).toEqual(['ribs-in', 'ribs-in-2', 'plan-2', `day-${empty}`, 'ribs-out']);
   // taken back and thrown away: the address stays nobody's
   await shop.takeBack(owner, build, first);
-  await discardTyped(shop.em(), owner, build, first);
+  await shop.discard(owner, build, first);
   const again = await shop.signOff(owner, build, titled('Ribs in'));
   expect((await shop.entry(build, again)).slug).toBe('ribs-in-3');
 });

@@ -12,6 +12,7 @@ import { openDatabase, type Orm } from '#server/database.ts';
 import { Build, Entry } from '#server/entities/index.ts';
 import { createPerson } from '#server/features/accounts/people.ts';
 import { joinCrew, startRestoration } from '#server/features/builds/builds.service.ts';
+import { discardTyped } from '#server/features/entries/discard-working.service.ts';
 import { signOffDay } from '#server/features/entries/sign-off.service.ts';
 import { startDay } from '#server/features/entries/start-entry.service.ts';
 import { saveTyped } from '#server/features/entries/save-working.service.ts';
@@ -96,6 +97,12 @@ export class Workshop {
     const { version } = await this.entry(build, of);
     await signOffDay(this.em(), caller, build, of, { version, document }, now);
     return of;
+  }
+
+  /** Throws the working copy away, whatever version stands there. */
+  async discard(caller: Caller, build: string, number: number): Promise<void> {
+    const { version } = await this.entry(build, number);
+    await discardTyped(this.em(), caller, build, number, version);
   }
 
   async takeBack(caller: Caller, build: string, number: number): Promise<void> {

@@ -19,8 +19,8 @@ export function entryRoutes(table: EndpointTable): void {
   handle(table, takeBackEntry, async ({ em, viewer, parts }, { params, body }) => ({
     version: await takeBack(em, viewer, params.build, params.number, body.version, parts.now()),
   }));
-  handle(table, discardWorking, async ({ em, viewer }, { params }) => {
-    await discardTyped(em, viewer, params.build, params.number);
+  handle(table, discardWorking, async ({ em, viewer }, { params, body }) => {
+    await discardTyped(em, viewer, params.build, params.number, body.version);
     return done;
   });
   handle(table, readLastTime, ({ em, viewer }, { params, query }) => readLastLines(em, viewer, params.build, params.number, query.stage ?? null));

@@ -1,6 +1,7 @@
 import { useCallback, useMemo, useState } from 'react';
 import { useNavigate } from 'react-router-dom';
 import type { DeskView } from '#contracts/entries.ts';
+import { AppError } from '#contracts/errors.ts';
 import { ErrorSummary } from '#src/components/error-summary.tsx';
 import { PageColumns } from '#src/components/page-columns.tsx';
 import { PageFrame } from '#src/components/page-frame.tsx';
@@ -25,6 +26,7 @@ import { useSaver } from './use-saver.ts';
 import { useSignOff } from './use-sign-off.ts';
 import { useUploads } from './use-uploads.ts';
 import { filesOf, useWriting } from './use-writing.ts';
+import type { NewerText } from './saver.ts';
 import { spokenState } from './what-is-kept.ts';
 import { WordsEditor } from './words-editor.tsx';
 
@@ -77,15 +79,17 @@ export function DeskOpen({ view, start, at, kept, onReopen }: DeskOpenProps) {
     }
   };
   const throwAway = async () => {
-    await saver.hold();
+    const version = await saver.hold();
     try {
-      await calls.discard();
+      await calls.discard(version);
       await kept.forget();
       await settled();
       await navigate(view.entry.href ?? `/builds/${at.build}`);
     } catch (cause) {
       saver.release();
-      throw cause;
+      if (!(cause instanceof AppError) || cause.code !== 'newer-exists') throw cause;
+      // somebody's newer text stands there: it is shown beside this one instead
+      saver.meetNewer(cause.newer as NewerText);
     }
   };
   const newer = save.phase.is === 'newer' ? save.phase.newer : null;

@@ -50,7 +50,7 @@ export function PublishedActions({ view, onTakeBack, onThrowAway }: PublishedAct
       >
         <p className="text-control">
           {asked === 'take-back' && 'Readers no longer see the entry, and what it used, bought and cost leaves the build’s figures until it is signed off again. Its text stays here as a draft.'}
-          {asked === 'throw-away' && (published ? 'The text goes back to what readers see now. What was changed since is gone.' : 'The whole entry goes, with its words, blocks and photos. It was never signed off, so no figures change.')}
+          {asked === 'throw-away' && (published ? 'The text goes back to what readers see now. What was changed since is gone.' : 'The entry goes, with its words, blocks and photos. It is not signed off, so no figures change.')}
         </p>
         {problem && <p role="alert" className="mt-3 text-small font-semibold text-lead">{problem}</p>}
       </Dialog>
