@@ -85,3 +85,22 @@ export function decimalCommaProblem(text: string): string | null {
   }
   return null;
 }
+
+const mostBelowLine = 128;
+const mostDecimals = 6;
+
+/**
+ * The words that mend a figure finer than anybody measures, or null where there is none. Amounts of one material are added
+ * in their smallest common part, which unlike figures below the line would make endless.
+ */
+export function finenessProblem(text: string): string | null {
+  for (const [, below] of text.matchAll(/\/ ?(\d+)/g)) {
+    if (Number(below) > mostBelowLine) return `A fraction has ${mostBelowLine} at most below the line: write a rounder figure, like 1/64`;
+  }
+  return /\.\d{7}/.test(text) ? 'A figure has six decimals at most: write a rounder one' : null;
+}
+
+/** Whether a number is one that could be written: figures multiplied together may come to something finer. */
+export function fineAsWritten(value: Fraction): boolean {
+  return value.mul(10 ** mostDecimals).d <= BigInt(mostBelowLine);
+}

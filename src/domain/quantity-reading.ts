@@ -1,5 +1,5 @@
 import Fraction from 'fraction.js';
-import { decimalCommaProblem, plainText } from './numbers-written.ts';
+import { decimalCommaProblem, finenessProblem, plainText } from './numbers-written.ts';
 import type { Pack } from './pack.ts';
 import { exampleOf, readTerms } from './quantity-terms.ts';
 import type { Terms } from './quantity-terms.ts';
@@ -63,7 +63,7 @@ function textProblem(typed: string, { dimension }: ReadingContext): string | nul
   if (typed.length > longestText) return `Write one amount, like ${exampleOf(dimension)}`;
   if (/^-|[^\w'")]-\d/.test(typed)) return 'An amount is never below nought: leave the minus out';
   if (/\d ?\/ ?0+(?!\d)/.test(typed)) return 'A fraction needs a figure below the line, like 1/2';
-  return decimalCommaProblem(typed);
+  return decimalCommaProblem(typed) ?? finenessProblem(typed);
 }
 
 function otherDimension({ dimension, words }: Terms, context: ReadingContext): string {

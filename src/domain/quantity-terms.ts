@@ -1,6 +1,6 @@
 import Fraction from 'fraction.js';
 import { exactFigure } from './figures.ts';
-import { numberAtStart } from './numbers-written.ts';
+import { fineAsWritten, numberAtStart } from './numbers-written.ts';
 import { packWords, pluralOf } from './pack.ts';
 import type { Pack } from './pack.ts';
 import { wordsForQuantity } from './quantity-words.ts';
@@ -32,6 +32,8 @@ export interface Terms {
 
 interface TermFound {
   readonly term: Terms;
+  /** what was counted, multiplied out */
+  readonly count: Fraction;
   /** base units in one of what was counted; the next term must be of a smaller one */
   readonly size: Fraction;
   readonly rest: string;
@@ -58,23 +60,23 @@ function unitTerm(count: Fraction, unit: Unit, note: string | undefined): Omit<T
   const name = unit.id === 'piece' ? '' : ` ${count.gt(1) ? unit.many : unit.one}`;
   const words = `${exactFigure(count)}${name}`;
   const term = { dimension: unit.dimension, amount: count.mul(unit.factor), words, plain: plainUnits.has(unit.id) };
-  return { term: note === undefined ? term : { ...term, note }, size: unit.factor };
+  return { term: note === undefined ? term : { ...term, note }, count, size: unit.factor };
 }
 
 function packTerm(count: Fraction, pack: Pack, { dimension, measures }: TermContext): Omit<TermFound, 'rest'> {
   const size = exactFrom(pack.amount);
   const words = packWords(count, pack, wordsForQuantity(pack.amount, dimension, { measures }));
-  return { term: { dimension, amount: count.mul(size), words, plain: false }, size };
+  return { term: { dimension, amount: count.mul(size), words, plain: false }, count, size };
 }
 
 function countedTerm(count: Fraction, word: string): Omit<TermFound, 'rest'> {
   const words = `${exactFigure(count)} ${count.gt(1) ? pluralOf(word) : word}`;
   const note = `A ${word} counts as one: add it as a pack if it holds several`;
-  return { term: { dimension: 'count', amount: count, words, plain: false, note }, size: new Fraction(1) };
+  return { term: { dimension: 'count', amount: count, words, plain: false, note }, count, size: new Fraction(1) };
 }
 
 function bareTerm(count: Fraction): Omit<TermFound, 'rest'> {
-  return { term: { dimension: 'count', amount: count, words: exactFigure(count), plain: true }, size: new Fraction(1) };
+  return { term: { dimension: 'count', amount: count, words: exactFigure(count), plain: true }, count, size: new Fraction(1) };
 }
 
 function unknownPack(word: string, count: Fraction, { dimension }: TermContext): string {
@@ -104,10 +106,12 @@ function meant(count: Fraction, meaning: Meaning, context: TermContext): Reading
   }
 }
 
-function times(count: Fraction, inner: TermFound, joined: string): TermFound {
+function times(count: Fraction, inner: TermFound, joined: string): Reading<TermFound> {
   const { term, rest } = inner;
+  const counted = count.mul(inner.count);
+  if (!fineAsWritten(counted)) return unread('That is finer than one line can hold: write a rounder figure');
   const amount = count.mul(term.amount);
-  return { term: { ...term, amount, words: `${exactFigure(count)} ${joined} ${term.words}`, plain: false }, size: amount, rest };
+  return read({ term: { ...term, amount, words: `${exactFigure(count)} ${joined} ${term.words}`, plain: false }, count: counted, size: amount, rest });
 }
 
 /** `2 tins of 2.5 l`: the word only counts, the amount of each follows. */
@@ -115,7 +119,7 @@ function ofEach(count: Fraction, { meaning, word, rest }: WordFound, context: Te
   const each = /^ of (?=[\d.])/.exec(rest);
   if (!each || meaning.as === 'unit' || meaning.as === 'refused') return null;
   const inner = oneTerm(rest.slice(each[0].length), context);
-  return inner.ok ? read(times(count, inner.value, `${word} of`)) : inner;
+  return inner.ok ? times(count, inner.value, `${word} of`) : inner;
 }
 
 function noUnit(typed: string, context: TermContext): string {
@@ -132,7 +136,7 @@ function oneTerm(text: string, context: TermContext): Reading<TermFound> {
   const multiplied = /^ ?(?:x|\*|off|of) ?(?=[\d.])/.exec(number.rest);
   if (multiplied) {
     const inner = oneTerm(number.rest.slice(multiplied[0].length), context);
-    return inner.ok ? read(times(number.value, inner.value, '×')) : inner;
+    return inner.ok ? times(number.value, inner.value, '×') : inner;
   }
   const typed = number.rest.replace(/^ ?(?:of )?(?:an? )?(?:the )?/, '');
   const word = wordAtStart(typed, context.measures, context.packs);
@@ -161,7 +165,7 @@ function joinedTerms(before: TermFound, next: TermFound): Reading<TermFound> {
     plain: false,
     ...(note === undefined ? {} : { note }),
   };
-  return read({ term, size: next.size, rest: next.rest });
+  return read({ term, count: next.count, size: next.size, rest: next.rest });
 }
 
 /**
@@ -172,7 +176,10 @@ export function readTerms(text: string, context: TermContext): Reading<Terms> {
   let so = oneTerm(text, context);
   while (so.ok && so.value.rest.trim() !== '') {
     const again = /^ ?x ?(\d+)$/.exec(so.value.rest);
-    if (again) return read(times(new Fraction(BigInt(again[1] ?? 1)), { ...so.value, rest: '' }, '×').term);
+    if (again) {
+      const all = times(new Fraction(BigInt(again[1] ?? 1)), { ...so.value, rest: '' }, '×');
+      return all.ok ? read(all.value.term) : all;
+    }
     const more = so.value.rest.replace(/^ ?(?:,|and |\+)? ?/, '');
     if (!numberAtStart(more)) return unread(`Write the amount alone, like ${so.value.term.words}`);
     const next = oneTerm(more, context);

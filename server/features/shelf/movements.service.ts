@@ -1,5 +1,7 @@
+import { AppError } from '#contracts/errors.ts';
+import { haveCommonParts } from '#domain/ledger/parts.ts';
 import { priceMaterial } from '#domain/ledger/price.ts';
-import { exactText } from '#domain/quantity.ts';
+import { exactFrom, exactText } from '#domain/quantity.ts';
 import { Material, Movement, type Build, type Entry, type ReceiptLine, type Shelf, type Stage } from '#server/entities/index.ts';
 import type { Em } from '#server/http/context.ts';
 import { fallsShort } from './falls-short.ts';
@@ -30,14 +32,20 @@ function byMaterial(rows: readonly Movement[]): Map<number, Movement[]> {
   return groups;
 }
 
+async function tooFine(em: Em, material: number): Promise<AppError> {
+  const { name } = await em.findOneOrFail(Material, { id: material });
+  return new AppError('bad-input', `${name}: its amounts are too fine to be added up. Write rounder figures, like 0.25 or 1/3.`);
+}
+
 /**
  * Prices all movements of some materials of one shelf from nothing, and puts value and shortfall on their rows;
  * the flush that follows writes those that changed.
- * @throws AppError `falls-short` where a return or sale would be of more than there is
+ * @throws AppError `falls-short` where a return or sale would be of more than there is, `bad-input` for amounts too fine to add up
  */
 async function price(em: Em, shelf: Shelf, rows: readonly Movement[]): Promise<void> {
   const byKey = new Map(rows.map((row) => [row.key, row]));
   for (const [material, own] of byMaterial(rows)) {
+    if (!haveCommonParts(own.map(({ amount }) => exactFrom(amount)))) throw await tooFine(em, material);
     const ledger = priceMaterial(String(material), own.map((row) => ledgerMovement(row, material)), shelf.method);
     const [refusal] = ledger.refusals;
     const refused = refusal && byKey.get(refusal.key);

@@ -17,12 +17,27 @@ function greatestCommonDivisor(a: bigint, b: bigint): bigint {
   return larger;
 }
 
+/** Below the line of a common part, in bits. What people can type of one material stays under it; beyond it, pricing would hold everybody up. */
+const mostBits = 512n;
+
+function withBelow(part: bigint, d: bigint): bigint {
+  return part % d === 0n ? part : part * (d / greatestCommonDivisor(part, d));
+}
+
+/** Whether some amounts have a common part of a size to work with; stops at the first that is too much. */
+export function haveCommonParts(amounts: Iterable<Fraction>): boolean {
+  let part = 1n;
+  for (const { d } of amounts) {
+    part = withBelow(part, d);
+    if (part >> mostBits > 0n) return false;
+  }
+  return true;
+}
+
 /** The smallest common part of some amounts, and the way into it and back, both exact. */
 export function commonParts(amounts: readonly Fraction[]): Parts {
   let part = 1n;
-  for (const { d } of amounts) {
-    if (part % d !== 0n) part *= d / greatestCommonDivisor(part, d);
-  }
+  for (const { d } of amounts) part = withBelow(part, d);
   return {
     of: ({ s, n, d }) => s * n * (part / d),
     back: (parts) => (parts === 0n ? nought : new Fraction(parts, part)),
