@@ -59,12 +59,13 @@ describe('a build', () => {
     expect(await listed()).toBe(true);
   });
 
-  test('is its restorer\u2019s to settle: others get 403, of a private one 404', async () => {
+  test('is its restorer\u2019s to settle: others get 403 for what they would change, and 404 for what they may not see', async () => {
     const { slug } = await start('Settled');
     const hidden = await start('Settled in private', { visibility: 'private' });
     expect((await other.call(changeBuild, { params: { build: slug }, body: { lead: 'Mine now.', version: 1 } })).status).toBe(403);
     expect((await other.call(readBuildSettings, { params: { build: hidden.slug } })).status).toBe(404);
     expect((await other.call(changeStages, { params: { build: slug }, body: { stages: [] } })).status).toBe(403);
+    for (const endpoint of [readBuildSettings, readStages] as const) expect((await other.call(endpoint, { params: { build: slug } })).status).toBe(404);
     expect((await other.ask(readMyBuilds)).builds).toEqual([]);
   });
 });

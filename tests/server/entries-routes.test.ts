@@ -1,6 +1,6 @@
 import { afterAll, beforeAll, expect, test } from 'vitest';
 import { readBuild, startBuild } from '#contracts/builds.ts';
-import { discardWorking, readDesk, readLastTime, saveWorking, signOffEntry, startEntry, takeBackEntry } from '#contracts/entries.ts';
+import { discardWorking, previewEntry, readDesk, readLastTime, saveWorking, signOffEntry, startEntry, takeBackEntry } from '#contracts/entries.ts';
 import { addMaterial, readMyMaterials } from '#contracts/materials.ts';
 import { Build } from '#server/entities/index.ts';
 import { joinCrew } from '#server/features/builds/builds.service.ts';
@@ -76,6 +76,7 @@ test('a signed-out save, a stranger and a day that is none are told so', async (
   const body = { version: 1, document: dayOf('2026-05-06', []) };
   expect(await site.visitor().refused(saveWorking, { params, body })).toMatchObject({ status: 401, code: 'sign-in-needed' });
   expect(await (await site.as({ handle: 'gull' })).refused(saveWorking, { params, body })).toMatchObject({ status: 403 });
+  for (const endpoint of [readDesk, readLastTime, previewEntry] as const) expect(await (await site.as({ handle: 'gull' })).refused(endpoint, { params })).toMatchObject({ status: 404 });
   expect(await owner.refused(readDesk, { params: { build, number: 9999 } })).toMatchObject({ status: 404 });
   expect(await owner.refused(startEntry, { params: { build }, body: { day: '2026-02-30' } })).toMatchObject({ status: 422, fields: { day: expect.any(String) } });
   expect(await owner.refused(startEntry, { params: { build }, body: { day: '2026-05-06', stage: 77 } })).toMatchObject({ status: 422, fields: { stage: 'Pick a stage of this build.' } });
@@ -107,5 +108,5 @@ test('packs are read as typed, in the build’s measures, and faults stand besid
   const seen = await crew.ask(readMyMaterials, { query: { build } });
   expect(seen.materials.map(({ name }) => name)).toContain('Topside paint');
   expect((await crew.ask(readMyMaterials)).materials).toEqual([]);
-  expect(await (await site.as({ handle: 'gull' })).refused(readMyMaterials, { query: { build } })).toMatchObject({ status: 403 });
+  expect(await (await site.as({ handle: 'gull' })).refused(readMyMaterials, { query: { build } })).toMatchObject({ status: 404 });
 });

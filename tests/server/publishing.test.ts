@@ -133,7 +133,7 @@ describe('who may see a build', () => {
     const { entry } = await owner.ask(readDesk, { params: { build: slug, number } });
     await owner.ask(saveWorking, { params: { build: slug, number }, body: { version: entry.version, document: dayOf('2026-06-14', [], { title: 'Secret so far' }) } });
     expect(JSON.stringify([await buildAt(visitor, slug), await visitor.ask(readHome)])).not.toContain('Secret so far');
-    expect((await other.call(readDesk, { params: { build: slug, number } })).status).toBe(403);
+    expect((await other.call(readDesk, { params: { build: slug, number } })).status).toBe(404);
   });
 
   test('private numbers are for the restorer until they are shown', async () => {

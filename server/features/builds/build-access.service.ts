@@ -27,7 +27,14 @@ export async function requireVisibleBuild(em: Em, viewer: Viewer, slug: string):
   return { build, writes, owns: viewer !== null && build.owner.id === viewer.id };
 }
 
-/** A build this person may write entries, receipts and time in. */
+/** A build this person may look behind: its drafts, desk, stages, settings and private pictures are there for those who write in it, and for nobody else. */
+export async function requireCrewBuild(em: Em, viewer: Viewer, slug: string): Promise<Build> {
+  const { build, writes } = await requireVisibleBuild(em, viewer, slug);
+  if (!writes) throw nothingHere();
+  return build;
+}
+
+/** A build this person may write entries, receipts and time in: others may read it, so they are told that they may not. */
 export async function requireWritableBuild(em: Em, caller: Caller, slug: string): Promise<Build> {
   const { build, writes } = await requireVisibleBuild(em, caller, slug);
   if (!writes) throw new AppError('not-allowed', 'Only the restorer and the crew write in this build.');

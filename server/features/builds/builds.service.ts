@@ -5,7 +5,7 @@ import type { BuildSettings, changeBuild, startBuild } from '#contracts/builds.t
 import type { ParsedOf } from '#contracts/endpoint.ts';
 import { Build, BuildAddress, Cost, CrewMember, Movement, Person, Receipt, Shelf, Stage } from '#server/entities/index.ts';
 import type { Caller, Em } from '#server/http/context.ts';
-import { requireOwnBuild } from './build-access.service.ts';
+import { requireCrewBuild, requireOwnBuild } from './build-access.service.ts';
 import { freeBuildSlug, moveBuild } from './build-address.service.ts';
 
 type StartInput = ParsedOf<typeof startBuild>['body'];
@@ -40,6 +40,7 @@ async function moneyWritten(em: Em, build: Build): Promise<boolean> {
 }
 
 export async function readSettings(em: Em, caller: Caller, slug: string): Promise<BuildSettings> {
+  await requireCrewBuild(em, caller, slug);
   const build = await requireOwnBuild(em, caller, slug);
   const shelf = await em.findOneOrFail(Shelf, { build: build.id });
   const { kind, title, lead, maker, model, year, yearAbout, frameNumber, engineNumber, hullNumber, serialNumber, registration, numbersShown, stands, standsNote, startedOn, currency, measures, visibility, costsShown, version } = build;

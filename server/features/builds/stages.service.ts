@@ -8,7 +8,7 @@ import { exactFrom } from '#domain/quantity.ts';
 import { readAmountOfWork } from '#domain/work.ts';
 import { Stage, type Build } from '#server/entities/index.ts';
 import type { Caller, Em } from '#server/http/context.ts';
-import { requireOwnBuild, requireWritableBuild } from './build-access.service.ts';
+import { requireCrewBuild, requireOwnBuild } from './build-access.service.ts';
 import { workKindNamed } from './work-kinds.service.ts';
 
 type StageInput = ParsedOf<typeof changeStages>['body']['stages'][number];
@@ -21,7 +21,7 @@ async function usedStages(em: Em, build: Build): Promise<Set<number>> {
 }
 
 export async function listStages(em: Em, caller: Caller, slug: string): Promise<{ currency: string; stages: StageView[] }> {
-  const build = await requireWritableBuild(em, caller, slug);
+  const build = await requireCrewBuild(em, caller, slug);
   const used = await usedStages(em, build);
   const stages = await em.find(Stage, { build: build.id }, { orderBy: { position: 'asc', id: 'asc' }, populate: ['workKind'] });
   return {

@@ -6,7 +6,7 @@ import { figuresOfStages, usedOfBuilds } from '#server/features/shelf/figures.se
 import { materialsOf } from '#server/features/shelf/materials.service.ts';
 import type { Caller, Em } from '#server/http/context.ts';
 import { deskShelves, materialHistories, shelfRows } from './desk-shelves.ts';
-import { requireEntry } from './entry-access.ts';
+import { requireOpenEntry } from './entry-access.ts';
 import { keptDocuments, standingDocument } from './stored-document.ts';
 
 const mostWorkKinds = 300;
@@ -54,7 +54,7 @@ export function readDeskOf(em: Em, caller: Caller, slug: string, number: number)
 }
 
 async function deskOf(em: Em, caller: Caller, slug: string, number: number): Promise<DeskView> {
-  const { build, entry } = await requireEntry(em, caller, slug, number);
+  const { build, entry } = await requireOpenEntry(em, caller, slug, number);
   const shelves = await deskShelves(em, caller, build, entry);
   const { title, currency, measures, costsShown, visibility } = build;
   return {

@@ -1,6 +1,6 @@
 import { AppError } from '#contracts/errors.ts';
 import { Entry, Stage, type Build } from '#server/entities/index.ts';
-import { requireWritableBuild } from '#server/features/builds/build-access.service.ts';
+import { requireCrewBuild, requireWritableBuild } from '#server/features/builds/build-access.service.ts';
 import type { Caller, Em } from '#server/http/context.ts';
 import { standingDocument } from './stored-document.ts';
 
@@ -9,12 +9,20 @@ export interface OpenEntry {
   readonly entry: Entry;
 }
 
-/** An entry this person may write in. */
-export async function requireEntry(em: Em, caller: Caller, slug: string, number: number): Promise<OpenEntry> {
-  const build = await requireWritableBuild(em, caller, slug);
+async function entryOf(em: Em, build: Build, number: number): Promise<OpenEntry> {
   const entry = await em.findOne(Entry, { build: build.id, number }, { populate: ['build', 'stage'] });
   if (!entry) throw new AppError('not-found', 'There is no such entry in this build.');
   return { build, entry };
+}
+
+/** An entry this person may write in. */
+export async function requireEntry(em: Em, caller: Caller, slug: string, number: number): Promise<OpenEntry> {
+  return entryOf(em, await requireWritableBuild(em, caller, slug), number);
+}
+
+/** An entry whose working copy this person may see. */
+export async function requireOpenEntry(em: Em, caller: Caller, slug: string, number: number): Promise<OpenEntry> {
+  return entryOf(em, await requireCrewBuild(em, caller, slug), number);
 }
 
 /** @throws AppError `newer-exists`, with what stands there now, when somebody saved since `version` was read */

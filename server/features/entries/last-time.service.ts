@@ -2,7 +2,7 @@ import type { LastTime } from '#contracts/entries.ts';
 import type { BlockData, EntryDocument } from '#src/blocks/pure.ts';
 import { Entry, type Build } from '#server/entities/index.ts';
 import type { Caller, Em } from '#server/http/context.ts';
-import { requireEntry } from './entry-access.ts';
+import { requireOpenEntry } from './entry-access.ts';
 import { standingDocument } from './stored-document.ts';
 
 // Far enough back to find the last time, without reading a whole log.
@@ -31,7 +31,7 @@ function before(em: Em, build: Build, entry: Entry): Promise<Entry[]> {
 
 /** Lines of the last Used and Time blocks before an entry: of the same stage where there are any, else of the last day that has them. */
 export async function readLastLines(em: Em, caller: Caller, slug: string, number: number, stage: number | null): Promise<LastTime> {
-  const { build, entry } = await requireEntry(em, caller, slug, number);
+  const { build, entry } = await requireOpenEntry(em, caller, slug, number);
   const documents = (await before(em, build, entry)).map(standingDocument);
   const inStage = stage === null ? [] : documents.filter((document) => document.stage === stage);
   const ordered = [...inStage, ...documents];

@@ -3,7 +3,7 @@ import { basename, join } from 'node:path';
 import { AppError } from '#contracts/errors.ts';
 import type { DeskPicture, PictureView } from '#contracts/pictures.ts';
 import { Person, Picture, PublishedPicture, type Build, type Entry } from '#server/entities/index.ts';
-import { mayWrite, requireWritableBuild } from '#server/features/builds/build-access.service.ts';
+import { mayWrite, requireCrewBuild, requireWritableBuild } from '#server/features/builds/build-access.service.ts';
 import type { Caller, Em, Parts, Viewer } from '#server/http/context.ts';
 import { pictureMaker } from './picture-maker.ts';
 import { RefusedPicture, type MadePicture } from './picture-messages.ts';
@@ -70,7 +70,7 @@ export async function addPictureToBuild(parts: Parts, em: Em, caller: Caller, sl
 }
 
 export async function pictureOfBuild(em: Em, caller: Caller, slug: string, key: string): Promise<Picture> {
-  const build = await requireWritableBuild(em, caller, slug);
+  const build = await requireCrewBuild(em, caller, slug);
   const picture = await em.findOne(Picture, { key, build: build.id });
   if (!picture) throw new AppError('not-found', 'There is no such picture in this build.');
   return picture;

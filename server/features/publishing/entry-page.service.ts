@@ -2,7 +2,7 @@ import type { EntryPage, TallyView } from '#contracts/entry-view.ts';
 import { currentDocument, deriveEntry, projectEntry, type EntryDerivation, type EntryDocument, type ProjectionContext } from '#src/blocks/pure.ts';
 import { AppError } from '#contracts/errors.ts';
 import { CrewMember, Entry, EntryAddress, Stage, WorkKind, type Build } from '#server/entities/index.ts';
-import { mayWrite, movedBuild, requireVisibleBuild, seesCosts } from '#server/features/builds/build-access.service.ts';
+import { movedBuild, requireCrewBuild, requireVisibleBuild, seesCosts } from '#server/features/builds/build-access.service.ts';
 import { workingFigures, type WorkingFigures } from '#server/features/entries/working-figures.service.ts';
 import { pictureViews } from '#server/features/media/pictures.service.ts';
 import { lineFigures, figuresOfEntries, usedOfBuilds, type EntryFigures } from '#server/features/shelf/figures.service.ts';
@@ -141,8 +141,7 @@ export async function readEntryBySlug(em: Em, viewer: Viewer, buildSlug: string,
 
 /** What readers will see of the working copy; for those who may write it. */
 export async function previewWorking(em: Em, viewer: Viewer, buildSlug: string, number: number): Promise<EntryPage> {
-  const { build } = await requireVisibleBuild(em, viewer, buildSlug);
-  if (!viewer || !(await mayWrite(em, viewer, build))) throw new AppError('not-allowed', 'Only the restorer and the crew see a working copy.');
+  const build = await requireCrewBuild(em, viewer, buildSlug);
   const entry = await em.findOne(Entry, { build: build.id, number }, { populate: ['author'] });
   const document = entry?.working ?? entry?.published;
   if (!entry || !document) throw new AppError('not-found', 'There is nothing at this address.');

@@ -7,7 +7,7 @@ import { readQuantity, type Pack, type Ratio } from '#domain/quantity-reading.ts
 import { unitsFor, type Dimension, type Measures } from '#domain/units.ts';
 import type { MaterialFacts } from '#src/blocks/pure.ts';
 import { Build, Material, Person } from '#server/entities/index.ts';
-import { requireWritableBuild } from '#server/features/builds/build-access.service.ts';
+import { requireCrewBuild, requireWritableBuild } from '#server/features/builds/build-access.service.ts';
 import type { Caller, Em } from '#server/http/context.ts';
 
 export type NewMaterial = Omit<ParsedOf<typeof addMaterial>['body'], 'build'>;
@@ -47,7 +47,7 @@ export async function materialFacts(em: Em, ownerId: number): Promise<Map<number
 
 interface Bench { readonly ownerId: number; readonly measures: Measures }
 
-/** Whose list is meant, and by what measures it is read: the build's, else those of one's own newest build. */
+/** Whose list is added to, and by what measures it is read: the build's, else those of one's own newest build. */
 async function benchOf(em: Em, caller: Caller, slug: string | undefined): Promise<Bench> {
   if (slug !== undefined) {
     const build = await requireWritableBuild(em, caller, slug);
@@ -58,7 +58,8 @@ async function benchOf(em: Em, caller: Caller, slug: string | undefined): Promis
 }
 
 export async function listMaterials(em: Em, caller: Caller, slug: string | undefined): Promise<MaterialView[]> {
-  return materialsOf(em, (await benchOf(em, caller, slug)).ownerId);
+  if (slug === undefined) return materialsOf(em, caller.id);
+  return materialsOf(em, (await requireCrewBuild(em, caller, slug)).owner.id);
 }
 
 function readPacks(input: NewMaterial, measures: Measures, fields: Record<string, string>): Pack[] {

@@ -109,7 +109,7 @@ test('a picture can be asked for again, by those who write in the build', async 
   const { key } = await site.taken(await quadrants().jpeg().toBuffer());
   const input = { params: { build: site.build, key } };
   expect(await site.crew.ask(readPicture, input)).toMatchObject({ key, state: 'ready', problem: null });
-  expect((await site.stranger.refused(readPicture, input)).code).toBe('not-allowed');
+  expect((await site.stranger.refused(readPicture, input)).code).toBe('not-found');
   expect((await site.restorer.refused(readPicture, { params: { build: site.build, key: 'none' } })).code).toBe('not-found');
 });
 
