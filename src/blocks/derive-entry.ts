@@ -1,3 +1,4 @@
+import { dayProblem } from '#domain/day.ts';
 import { mostOfDay } from '#domain/money.ts';
 import { readAmountOfWork } from '#domain/work.ts';
 import type { BlockContext, BlockDerivation, DerivedCost, DerivedReceipt, DerivedTime, DerivedUse, PureBlock, ShownPicture } from './block.ts';
@@ -34,6 +35,10 @@ function pureOf(type: BlockType): PureBlock<BlockType> {
 function entryFaults(document: EntryDocument): Record<string, string> {
   const faults: Record<string, string> = {};
   if (document.title.trim() === '') faults['title'] = 'Give the day a title.';
+  for (const field of ['day', 'dayTo'] as const) {
+    const problem = dayProblem(document[field] ?? document.day);
+    if (problem !== null) faults[field] = problem;
+  }
   if (document.dayTo !== null && document.dayTo < document.day) faults['dayTo'] = 'The last day comes before the first.';
   if (document.content.every((node) => isProse(node) && plainWords(node).trim() === '')) faults['content'] = 'Write a few words, or put in a block.';
   return faults;

@@ -1,4 +1,5 @@
 import { z } from 'zod';
+import { plainDay } from '#contracts/fields.ts';
 import { nodeId, proseNode, proseTypes, type ProseNode } from './prose.ts';
 import { pureBlocks, type BlockType } from './pure-list.ts';
 
@@ -20,7 +21,6 @@ const blockNodes = z.union([
 ]);
 const topNode: z.ZodType<TopNode> = z.union([proseNode, blockNodes]);
 
-const plainDay = z.iso.date('Give a day, such as 2026-11-14.');
 export const workUnits = ['piece', 'm', 'm2', 'ft', 'ft2', 'h'] as const;
 export const workDone = z.object({
   /** As typed: "17", "3.2", "4 1/2". */

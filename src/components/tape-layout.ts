@@ -34,6 +34,8 @@ export interface Fold {
 export interface Strip {
   /** The year, where there is a tape for each. */
   year: number | null;
+  /** Years without work just before it, folded away. */
+  idle: { from: number; to: number } | null;
   width: number;
   months: { x: number; label: string }[];
   ticks: { day: number[]; week: number[]; month: number[] };
@@ -82,17 +84,28 @@ function oneStrip(slots: readonly Slot[], first: number, last: number): Strip {
   return drawToFit(slots, pieces, Math.max(1, (frameWidth - folds * foldWidth) / days));
 }
 
-/** Every year at one scale from its first Monday, so that the months of one stand under those of the other. */
+/**
+ * Every year of work at one scale from its first Monday, so that the months of one stand under those of the other.
+ * Years without work are folded away, and those after the last are left out.
+ */
 function yearStrips(slots: readonly Slot[], first: number, last: number): Strip[] {
   const gaps = longGaps(slots, last);
-  const firstYear = dateParts(first).year;
-  const years = Array.from({ length: dateParts(last).year - firstYear + 1 }, (_, index) => firstYear + index);
   const perDay = Math.max(frameWidth / 371, targetWidth / 7);
-  return years.map((year) => {
+  const worked = [...new Set(slots.map((slot) => tapeYear(slot.first)))];
+  const years = worked.length > 0 ? worked : [tapeYear(last)];
+  return years.map((year, index) => {
     const piece = { first: firstMonday(year), last: firstMonday(year + 1) - 1, folded: false, weeks: 0 };
     const own = slots.filter((slot) => slot.first >= piece.first && slot.first <= piece.last);
-    return { ...drawToFit(own, [piece], perDay), year, folds: openFolds(gaps, piece, scaleOf([piece], perDay).at) };
+    const before = years[index - 1];
+    const from = before === undefined ? tapeYear(first) : before + 1;
+    return { ...drawToFit(own, [piece], perDay), year, idle: from < year ? { from, to: year - 1 } : null, folds: openFolds(gaps, piece, scaleOf([piece], perDay).at) };
   });
+}
+
+/** The year on whose tape a day stands: the days before its first Monday are on the one before. */
+function tapeYear(day: number): number {
+  const { year } = dateParts(day);
+  return day < firstMonday(year) ? year - 1 : year;
 }
 
 function firstMonday(year: number): number {
@@ -137,6 +150,7 @@ function drawnStrip(slots: readonly Slot[], bars: readonly Extent[], targets: re
   const opening = laid.find((bar) => bar.current) ?? laid.at(-1);
   return {
     year: null,
+    idle: null,
     width: Math.round(scale.width),
     months: monthLabels(pieces, scale),
     ticks: ticksOf(pieces, scale, perDay),

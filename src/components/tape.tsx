@@ -77,6 +77,7 @@ function TapeLength({ strip, title, size, show }: TapeLengthProps) {
   const name = strip.year === null ? title : `${title}, ${strip.year}`;
   return (
     <>
+      {strip.idle && <p className="num mt-4 text-note text-ink-soft">Nothing written up in {strip.idle.from === strip.idle.to ? strip.idle.from : `${strip.idle.from} to ${strip.idle.to}`}</p>}
       {strip.year !== null && <p className="lettering-name num mt-4 mb-1 text-control">{strip.year}</p>}
       {/* oxlint-disable-next-line jsx-a11y/no-noninteractive-tabindex -- what slides sideways must be reached and slid by keyboard */}
       <section ref={box} aria-label={name} tabIndex={0} className="tape">

@@ -1,11 +1,12 @@
 import { z } from 'zod';
+import { dayProblem } from '#domain/day.ts';
 
 // Shapes that many contracts share.
 export const nothing = z.object({}).strict();
 /** For endpoints without a body: absent or empty. */
 export const noBody = z.undefined().or(z.object({}).strict()).or(z.null());
 export const slug = z.string().regex(/^[a-z0-9]+(-[a-z0-9]+)*$/).max(80);
-export const plainDay = z.iso.date('Give a day, such as 2026-11-14.');
+export const plainDay = z.iso.date('Give a day, such as 2026-11-14.').refine((day) => dayProblem(day) === null, 'Give a day between 1900 and 2100: look at the year again.');
 export const currencyCode = z.string().regex(/^[A-Z]{3}$/);
 export const minor = z.number().int();
 export const handleText = z.string().trim().toLowerCase()

@@ -1,18 +1,19 @@
 import { z } from 'zod';
 import Fraction from 'fraction.js';
 import { exponentOf, isCurrency } from '#domain/currency.ts';
+import { dayProblem } from '#domain/day.ts';
 import { formatDay, formatMoney } from '#domain/format.ts';
 import { readMoney } from '#domain/money.ts';
 import { exactText } from '#domain/quantity.ts';
 import { wordsForQuantity } from '#domain/quantity-words.ts';
 import { costsToTheDoor, type DoorCosts } from '#domain/receipt.ts';
+import { plainDay } from '#contracts/fields.ts';
 import type { SlipView } from '#contracts/slip.ts';
 import { bases, costCategories, lineGoesList, lineGoesWords } from '#contracts/words.ts';
 import { amountFaults, amountLineShape, materialOf, readLine, typedAmount } from '../amount-line.ts';
 import { pureBlock, type BlockContext, type BlockDerivation, type BlockFault, type ProjectionContext } from '../block.ts';
 
 const money = z.string().max(40);
-const plainDay = z.iso.date('Give a day, such as 2026-11-14.');
 export const boughtLine = z.object({
   ...amountLineShape,
   /** What the line came to on the paper, in the receipt's currency. */
@@ -104,7 +105,8 @@ export function readBought(data: BoughtData, context: BlockContext): BoughtReadi
 }
 
 function lineFaults(line: BoughtLine, context: BlockContext): BlockFault[] {
-  if (stocked(line)) return amountFaults(line, context);
+  const came = line.arrivedOn === null ? null : dayProblem(line.arrivedOn);
+  if (stocked(line)) return [...amountFaults(line, context), ...(came === null ? [] : [{ path: `${line.id}.arrivedOn`, problem: came }])];
   return line.name.trim() === '' ? [{ path: `${line.id}.name`, problem: 'Say what was bought.' }] : [];
 }
 
@@ -112,6 +114,8 @@ function deriveBought(data: BoughtData, context: BlockContext): BlockDerivation 
   const reading = readBought(data, context);
   const day = data.day ?? context.day;
   const faults = [...reading.faults, ...data.lines.flatMap((line) => lineFaults(line, context))];
+  const dayFault = data.day === null ? null : dayProblem(data.day);
+  if (dayFault !== null) faults.push({ path: 'day', problem: dayFault });
   if (data.lines.length === 0 && reading.paperTotal === null) faults.push({ path: '', problem: 'Add a line or the total on the paper, or take this block out.' });
   const difference = reading.door.paperDifference;
   return {

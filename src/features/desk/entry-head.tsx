@@ -54,11 +54,11 @@ function DayField({ document, onHead }: Omit<EntryHeadProps, 'view'>) {
     <div>
       <div className="flex items-start gap-1.5">
         <Field name="day" label={shown ? 'From' : 'Day of work'} error={faults.day}>
-          {(control) => <input {...control} type="date" required value={document.day} onChange={(event) => event.target.value !== '' && onHead({ day: event.target.value })} className={`${compact} w-auto!`} />}
+          {(control) => <input {...control} type="date" required min="1900-01-01" max="2100-12-31" value={document.day} onChange={(event) => event.target.value !== '' && onHead({ day: event.target.value })} className={`${compact} w-auto!`} />}
         </Field>
         {shown && (
           <Field name="dayTo" label="To" error={faults.dayTo}>
-            {(control) => <input {...control} type="date" min={document.day} value={document.dayTo ?? ''} onChange={(event) => onHead({ dayTo: event.target.value || null })} onBlur={() => bench.touch('dayTo')} className={`${compact} w-auto!`} />}
+            {(control) => <input {...control} type="date" min={document.day} max="2100-12-31" value={document.dayTo ?? ''} onChange={(event) => onHead({ dayTo: event.target.value || null })} onBlur={() => bench.touch('dayTo')} className={`${compact} w-auto!`} />}
           </Field>
         )}
       </div>
