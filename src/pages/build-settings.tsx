@@ -73,7 +73,7 @@ function BuildPlaces({ build }: { build: BuildSettings }) {
     <nav aria-label="This build">
       <SectionHeading>This build</SectionHeading>
       <ul>{places.map((place) => <li key={place.to} className="border-b border-rule px-3 py-[11px] text-control"><Link to={place.to}>{place.label}</Link></li>)}</ul>
-      <p className="mt-3 text-small text-ink-soft">A new name gives the build a new address. The old one leads to it, so links that people kept go on working.</p>
+      <p className="mt-3 text-small text-ink-soft">A new name gives the build a new address. {build.visibility === 'public' ? 'The old one leads to it, so links that people kept go on working.' : 'The old one leads to it for you and the crew, and for nobody else.'}</p>
     </nav>
   );
 }

@@ -48,11 +48,11 @@ export async function requireOwnBuild(em: Em, caller: Caller, slug: string): Pro
   return build;
 }
 
-/** The address of today for an old one, for those who may see the build. */
+/** The address of today for an old one. An unlisted build's cannot be guessed, as its old ones may: like a private one's it is told to the crew only. */
 export async function movedBuild(em: Em, viewer: Viewer, slug: string): Promise<string | null> {
   const old = await em.findOne(BuildAddress, { slug }, { populate: ['build.owner'] });
   if (!old || old.build.slug === slug) return null;
-  if (old.build.visibility === 'private' && !(await mayWrite(em, viewer, old.build))) return null;
+  if (old.build.visibility !== 'public' && !(await mayWrite(em, viewer, old.build))) return null;
   return old.build.slug;
 }
 
