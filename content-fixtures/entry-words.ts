@@ -114,7 +114,7 @@ export function fromShed(line: Use): Use {
 }
 export function used(...lines: Use[]): EntryPart {
   return (id, bench) => block(id, 'used', {
-    lines: numbered(id, lines, ({ material, amount, counts, fate, from }, line) => ({ id: line, ...materialLine(material, amount, bench), counts, fate, from })),
+    day: null, lines: numbered(id, lines, ({ material, amount, counts, fate, from }, line) => ({ id: line, ...materialLine(material, amount, bench), counts, fate, from })),
   });
 }
 
@@ -166,7 +166,7 @@ export function bought({ supplier, daysAgo, currency = '', rate = '', basis = 'p
 
 /** Label, category, money. */
 export function cost(...lines: [label: string, category: CostCategory, money: string][]): EntryPart {
-  return (id) => block(id, 'cost', { lines: numbered(id, lines, ([label, category, money], line) => ({ id: line, label, category, money })) });
+  return (id) => block(id, 'cost', { day: null, lines: numbered(id, lines, ([label, category, money], line) => ({ id: line, label, category, money })) });
 }
 
 interface Spell {
@@ -186,7 +186,7 @@ export function waited(long: string, what: string): Spell {
   return { handle: null, name: '', time: long, what, kind: 'waiting' };
 }
 export function time(...lines: Spell[]): EntryPart {
-  return (id) => block(id, 'time', { lines: numbered(id, lines, (spell, line) => ({ id: line, ...spell })) });
+  return (id) => block(id, 'time', { day: null, lines: numbered(id, lines, (spell, line) => ({ id: line, ...spell })) });
 }
 
 /** The document of an entry, as the desk would hand it in. */

@@ -126,8 +126,8 @@ export function dayOf(day: string, blocks: readonly TopNode[], facts: Partial<En
 
 type MaterialName = Pick<MaterialView, 'id' | 'name'>;
 export type UseInput = Partial<UsedLine> & { readonly of: MaterialName };
-export function usedBlock(lines: readonly UseInput[], id = freshId()): TopNode {
-  return { type: 'used', attrs: { id, version: 1, data: { lines: lines.map(({ of, ...line }) => ({ ...blankUsedLine(freshId()), material: of.id, name: of.name, ...line })) } } };
+export function usedBlock(lines: readonly UseInput[], id = freshId(), day: string | null = null): TopNode {
+  return { type: 'used', attrs: { id, version: 1, data: { day, lines: lines.map(({ of, ...line }) => ({ ...blankUsedLine(freshId()), material: of.id, name: of.name, ...line })) } } };
 }
 
 export type BuyInput = Partial<BoughtLine> & { readonly of?: MaterialName };
@@ -136,10 +136,10 @@ export function boughtBlock(lines: readonly BuyInput[], facts: Partial<BoughtDat
   return { type: 'bought', attrs: { id, version: 1, data: { ...blankBought(), supplier: 'Chandler', ...facts, lines: written } } };
 }
 
-export function costBlock(lines: readonly Partial<CostLine>[]): TopNode {
-  return { type: 'cost', attrs: { id: freshId(), version: 1, data: { lines: lines.map((line) => ({ ...blankCostLine(freshId()), label: 'Hire', ...line })) } } };
+export function costBlock(lines: readonly Partial<CostLine>[], day: string | null = null): TopNode {
+  return { type: 'cost', attrs: { id: freshId(), version: 1, data: { day, lines: lines.map((line) => ({ ...blankCostLine(freshId()), label: 'Hire', ...line })) } } };
 }
 
-export function timeBlock(lines: readonly Partial<TimeLineData>[], id = freshId()): TopNode {
-  return { type: 'time', attrs: { id, version: 1, data: { lines: lines.map((line) => ({ ...blankTimeLine(freshId()), name: 'Wren', ...line })) } } };
+export function timeBlock(lines: readonly Partial<TimeLineData>[], id = freshId(), day: string | null = null): TopNode {
+  return { type: 'time', attrs: { id, version: 1, data: { day, lines: lines.map((line) => ({ ...blankTimeLine(freshId()), name: 'Wren', ...line })) } } };
 }

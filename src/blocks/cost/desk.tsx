@@ -6,6 +6,7 @@ import { deskBlock, type BlockDeskProps } from '../desk-block.ts';
 import { FigureInput, LineFaults, LineInput, optionsOf, QuietSelect } from '../line-fields.tsx';
 import { moneySum } from '../money-sum.ts';
 import { TakeOutLine } from '../take-out-line.tsx';
+import { OwnDaySelect } from '../own-day-select.tsx';
 import { newId, useLines } from '../use-lines.ts';
 import { blankCostLine, cost, type CostData, type CostLine } from './cost.ts';
 
@@ -20,6 +21,7 @@ function CostDesk(props: BlockDeskProps<CostData>) {
   const lines = useLines<CostLine, CostData>(props, blankCostLine, 'label');
   return (
     <BlockFrame kind="cost" word="Cost" note="hire, carriage, a service, a tool: never on the shelf">
+      <OwnDaySelect block={id} word="Cost" day={data.day} onDay={(day) => props.onChange((now) => ({ ...now, day }))} />
       <ol className="list-none! p-0!">
         {data.lines.map((line) => {
           const path = (field: string) => `${id}.${line.id}.${field}`;
@@ -47,6 +49,6 @@ function CostDesk(props: BlockDeskProps<CostData>) {
 
 export const costDesk = deskBlock<CostData>({
   word: 'Cost', kind: () => 'cost', version: cost.version, Desk: CostDesk,
-  blank: () => ({ lines: [blankCostLine(newId())] }),
-  words: (data) => data.lines.map((line) => `${line.label} ${line.money}`.trim()).join('; '),
+  blank: () => ({ day: null, lines: [blankCostLine(newId())] }),
+  words: (data) => [data.day ?? '', data.lines.map((line) => `${line.label} ${line.money}`.trim()).join('; ')].filter(Boolean).join('; '),
 });

@@ -4,6 +4,7 @@ import { formatMinutes, plural } from '#domain/format.ts';
 import { useBench } from '../bench.ts';
 import { BlockFrame, BlockSum, textButton } from '../block-frame.tsx';
 import { deskBlock, type BlockDeskProps } from '../desk-block.ts';
+import { OwnDaySelect } from '../own-day-select.tsx';
 import { newId, useLines } from '../use-lines.ts';
 import { TimeLineDesk } from './line-desk.tsx';
 import { blankTimeLine, time, type TimeData, type TimeLineData } from './time.ts';
@@ -37,6 +38,7 @@ function TimeDesk(props: BlockDeskProps<TimeData>) {
   };
   return (
     <BlockFrame kind="time" word="Time" end={<button type="button" onClick={() => void sameAsLastTime()} aria-disabled={asking} className={textButton}>Same as last time</button>}>
+      <OwnDaySelect block={id} word="Time" day={data.day} onDay={(day) => props.onChange((now) => ({ ...now, day }))} />
       <ol className="list-none! p-0!">
         {data.lines.map((line) => <TimeLineDesk key={line.id} block={id} line={line} lines={lines} />)}
       </ol>
@@ -48,6 +50,6 @@ function TimeDesk(props: BlockDeskProps<TimeData>) {
 
 export const timeDesk = deskBlock<TimeData>({
   word: 'Time', kind: () => 'time', version: time.version, Desk: TimeDesk,
-  blank: () => ({ lines: [blankTimeLine(newId())] }),
-  words: (data) => data.lines.map((line) => [line.kind === 'waiting' ? 'waiting' : line.name, line.time, line.what].filter(Boolean).join(', ')).join('; '),
+  blank: () => ({ day: null, lines: [blankTimeLine(newId())] }),
+  words: (data) => [data.day ?? '', data.lines.map((line) => [line.kind === 'waiting' ? 'waiting' : line.name, line.time, line.what].filter(Boolean).join(', ')).join('; ')].filter(Boolean).join('; '),
 });

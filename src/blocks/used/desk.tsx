@@ -7,6 +7,7 @@ import { BlockFrame, BlockSum, textButton } from '../block-frame.tsx';
 import { deskBlock, type BlockDeskProps } from '../desk-block.ts';
 import type { Figures } from '../figures-store.ts';
 import { shortTitle } from '../short-title.ts';
+import { OwnDaySelect } from '../own-day-select.tsx';
 import { newId, useLines } from '../use-lines.ts';
 import { UsedLineDesk } from './line-desk.tsx';
 import { blankUsedLine, used, type UsedData, type UsedLine } from './used.ts';
@@ -42,6 +43,7 @@ function UsedDesk(props: BlockDeskProps<UsedData>) {
       kind="used" word="Used" note={`off ${shortTitle(bench.buildTitle)}’s shelf`}
       end={<button type="button" onClick={() => void sameAsLastTime()} aria-disabled={asking} className={textButton}>Same as last time</button>}
     >
+      <OwnDaySelect block={id} word="Used" day={data.day} onDay={(day) => props.onChange((now) => ({ ...now, day }))} />
       <ol className="list-none! p-0!">
         {data.lines.map((line) => <UsedLineDesk key={line.id} block={id} line={line} lines={lines} />)}
       </ol>
@@ -55,6 +57,6 @@ function UsedDesk(props: BlockDeskProps<UsedData>) {
 
 export const usedDesk = deskBlock<UsedData>({
   word: 'Used', kind: () => 'used', version: used.version, Desk: UsedDesk,
-  blank: () => ({ lines: [blankUsedLine(newId())] }),
-  words: (data) => data.lines.map((line) => [line.name, typedAmount(line), line.fate === 'wasted' ? 'wasted' : ''].filter(Boolean).join(', ')).join('; '),
+  blank: () => ({ day: null, lines: [blankUsedLine(newId())] }),
+  words: (data) => [data.day ?? '', data.lines.map((line) => [line.name, typedAmount(line), line.fate === 'wasted' ? 'wasted' : ''].filter(Boolean).join(', ')).join('; ')].filter(Boolean).join('; '),
 });

@@ -5,6 +5,7 @@ import { wordsForQuantity } from '#domain/quantity-words.ts';
 import type { SlipView } from '#contracts/slip.ts';
 import { countsList } from '#contracts/words.ts';
 import { amountFaults, amountLineShape, materialOf, readLine, typedAmount } from '../amount-line.ts';
+import { ownDay, ownDayFaults, ownDayWords, standsOn } from '../own-day.ts';
 import { pureBlock, type BlockContext, type ProjectionContext } from '../block.ts';
 
 export const usedLine = z.object({
@@ -15,7 +16,7 @@ export const usedLine = z.object({
 });
 export type UsedLine = z.output<typeof usedLine>;
 /** Materials drawn from the build's shelf or the shed, used or wasted. */
-export const usedData = z.object({ lines: z.array(usedLine).max(200) });
+export const usedData = z.object({ day: ownDay, lines: z.array(usedLine).max(200) });
 export type UsedData = z.output<typeof usedData>;
 
 export function blankUsedLine(id: string): UsedLine {
@@ -23,10 +24,11 @@ export function blankUsedLine(id: string): UsedLine {
 }
 
 function deriveUsed(data: UsedData, context: BlockContext) {
-  const faults = data.lines.length === 0 ? [{ path: '', problem: 'Add a line, or take this block out.' }] : data.lines.flatMap((line) => amountFaults(line, context));
+  const lineFaults = data.lines.length === 0 ? [{ path: '', problem: 'Add a line, or take this block out.' }] : data.lines.flatMap((line) => amountFaults(line, context));
+  const faults = [...ownDayFaults(data.day, context), ...lineFaults];
   const uses = data.lines.flatMap((line) => line.exact === null || line.material === null ? [] : [{
     line: line.id, material: line.material, kind: line.fate, from: line.from, counts: line.counts,
-    typed: typedAmount(line), amount: line.exact, day: context.dayTo ?? context.day,
+    typed: typedAmount(line), amount: line.exact, day: standsOn(data.day, context),
   }]);
   return { faults, uses };
 }
@@ -53,9 +55,10 @@ function usedSlip(id: string, data: UsedData, context: ProjectionContext): SlipV
   const wasted = data.lines.filter((line) => line.fate === 'wasted');
   const used = data.lines.filter((line) => line.fate === 'used');
   const wastedWords = wasted.length > 0 && context.costsShown ? `${formatMoney(sumOf(id, wasted, context), context.currency)} wasted beside it` : undefined;
+  const note = [context.workWords ? `for ${context.workWords}` : '', ownDayWords(data.day, context)].filter(Boolean).join(', ');
   return {
     kind: 'used', word: used.length > 0 ? 'Used' : 'Wasted',
-    ...(context.workWords ? { note: `for ${context.workWords}` } : {}),
+    ...(note ? { note } : {}),
     lines: data.lines.map((line) => lineView(id, line, context)),
     sum: context.costsShown ? { label: used.length > 0 ? 'Used' : 'Wasted', value: formatMoney(sumOf(id, used.length > 0 ? used : wasted, context), context.currency) } : null,
     ...(wastedWords && used.length > 0 ? { footnote: wastedWords } : {}),
@@ -64,7 +67,7 @@ function usedSlip(id: string, data: UsedData, context: ProjectionContext): SlipV
 
 export const used = pureBlock({
   type: 'used', version: 1, schema: usedData, stepsUp: {},
-  read: (data: UsedData, kept, context) => ({ lines: data.lines.map((line) => readLine(line, kept?.lines.find((old) => old.id === line.id), context)) }),
+  read: (data: UsedData, kept, context) => ({ ...data, lines: data.lines.map((line) => readLine(line, kept?.lines.find((old) => old.id === line.id), context)) }),
   derive: deriveUsed,
   slip: usedSlip,
 });

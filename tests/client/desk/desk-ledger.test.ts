@@ -96,7 +96,7 @@ describe('figures while somebody types', () => {
       stage: 5, work: { amount: '8', unit: 'piece', kind: 'Board' },
       content: [
         usedNode('used1', [line('lineA', brushes.id, '8', 'piece')]),
-        { type: 'cost', attrs: { id: 'cost1', version: 1, data: { lines: [{ id: 'lineC', label: 'Hire of a planer', category: 'hire', money: '20' }] } } },
+        { type: 'cost', attrs: { id: 'cost1', version: 1, data: { day: null, lines: [{ id: 'lineC', label: 'Hire of a planer', category: 'hire', money: '20' }] } } },
       ],
     }), byId);
     // 10.00 + 8.00 + 20.00 so far; 12 boards to go at (10.00 + 8.00) ÷ 12 = 1.50 each

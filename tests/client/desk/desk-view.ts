@@ -20,7 +20,7 @@ export function documentOf(part: Partial<EntryDocument> = {}): EntryDocument {
 }
 
 export function usedNode(id: string, lines: readonly (Partial<UsedLine> & { id: string })[]): EntryDocument['content'][number] {
-  return { type: 'used', attrs: { id, version: 1, data: { lines: lines.map((line) => ({ ...blankUsedLine(line.id), ...line })) } } };
+  return { type: 'used', attrs: { id, version: 1, data: { day: null, lines: lines.map((line) => ({ ...blankUsedLine(line.id), ...line })) } } };
 }
 
 export function boughtNode(id: string, lines: readonly (Partial<BoughtLine> & { id: string })[]): EntryDocument['content'][number] {

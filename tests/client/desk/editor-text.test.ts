@@ -163,8 +163,8 @@ describe('blocks in the text', () => {
   test('what is put in stands at the end, before the line to write on', () => {
     vi.stubGlobal('requestAnimationFrame', () => 0);
     const now = open([paragraph('para1', 'Before')]);
-    putInBlock(now, 'used', { id: 'used1', version: 1, data: { lines: [] } }, false);
-    putInBlock(now, 'used', { id: 'used2', version: 1, data: { lines: [] } }, false);
+    putInBlock(now, 'used', { id: 'used1', version: 1, data: { day: null, lines: [] } }, false);
+    putInBlock(now, 'used', { id: 'used2', version: 1, data: { day: null, lines: [] } }, false);
     expect(stored(now).map((node) => node.attrs.id)).toEqual(['para1', 'used1', 'used2']);
     expect(now.state.doc.lastChild?.type.name).toBe('paragraph');
     vi.unstubAllGlobals();

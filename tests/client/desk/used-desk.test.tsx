@@ -75,14 +75,14 @@ describe('the Used block', () => {
     let putBack: () => void = () => undefined;
     const tookOut = vi.fn<Bench['tookOut']>((_words, restore) => { putBack = restore; });
     const lastTime = () => Promise.resolve({ title: 'Before', time: [], used: [{ material: 2, name: brushes.name, amount: '8', unit: 'piece', fate: 'used' as const, counts: 'each' as const, from: 'shelf' as const }] });
-    const { rerender } = render(<Bare bench={{ lastTime, tookOut }} start={{ lines: [] }} />);
+    const { rerender } = render(<Bare bench={{ lastTime, tookOut }} start={{ day: null, lines: [] }} />);
     await user.click(screen.getByRole('button', { name: 'Same as last time' }));
     expect(await screen.findAllByText('$5.33')).toHaveLength(2);
     await user.click(screen.getByRole('button', { name: 'Take out Laminating brushes' }));
     expect(screen.queryByRole('listitem')).toBeNull();
     expect(tookOut.mock.calls[0]?.[0]).toBe('Laminating brushes taken out');
     putBack();
-    rerender(<Bare bench={{ lastTime, tookOut }} start={{ lines: [] }} />);
+    rerender(<Bare bench={{ lastTime, tookOut }} start={{ day: null, lines: [] }} />);
     expect(await screen.findByRole('listitem')).toBeTruthy();
   });
 });
