@@ -41,3 +41,9 @@ export function exponentOf(code: string): number {
   if (exponent === undefined) throw new RangeError(`${code} is not a currency of ISO 4217`);
   return exponent;
 }
+
+/** What money of a currency is written with where it is not its code and a space: `£1,234.50`, `EC$8.00`. */
+export const currencySigns: Readonly<Record<string, string>> = {
+  GBP: '£', USD: '$', EUR: '€', JPY: '¥',
+  AUD: 'A$', CAD: 'CA$', HKD: 'HK$', NZD: 'NZ$', SGD: 'S$', TWD: 'NT$', XCD: 'EC$',
+};

@@ -1,15 +1,9 @@
-import { exponentOf } from './currency.ts';
+import { currencySigns, exponentOf } from './currency.ts';
 
 const months = [
   'January', 'February', 'March', 'April', 'May', 'June',
   'July', 'August', 'September', 'October', 'November', 'December',
 ] as const;
-
-// Currencies written with a sign; every other one is written with its code and a space.
-const signs: Readonly<Record<string, string>> = {
-  GBP: '£', USD: '$', EUR: '€', JPY: '¥',
-  AUD: 'A$', CAD: 'CA$', HKD: 'HK$', NZD: 'NZ$', SGD: 'S$', TWD: 'NT$', XCD: 'EC$',
-};
 
 const noBreakSpace = '\u00a0';
 const minusSign = '\u2212';
@@ -35,7 +29,7 @@ export function formatMoney(minor: number, currency: string): string {
   const digits = String(Math.abs(whole(minor, 'Money'))).padStart(exponent + 1, '0');
   const units = grouped(digits.slice(0, digits.length - exponent));
   const figure = exponent === 0 ? units : `${units}.${digits.slice(-exponent)}`;
-  const sign = Object.hasOwn(signs, currency) ? signs[currency] : undefined;
+  const sign = Object.hasOwn(currencySigns, currency) ? currencySigns[currency] : undefined;
   return `${minor < 0 ? minusSign : ''}${sign ?? currency + noBreakSpace}${figure}`;
 }
 

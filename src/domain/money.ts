@@ -1,4 +1,4 @@
-import { exponentOf, isCurrency } from './currency.ts';
+import { currencySigns, exponentOf, isCurrency } from './currency.ts';
 import { read, unread } from './reading.ts';
 import type { Reading } from './reading.ts';
 import { wholeNumber } from './rounding.ts';
@@ -44,13 +44,17 @@ export function subtractMoney<C extends string>(a: Money<C>, b: Money<NoInfer<C>
   return money(a.minor - b.minor, a.currency);
 }
 
-const signs: Readonly<Record<string, readonly string[]>> = {
-  GBP: ['£'], USD: ['US$', '$'], EUR: ['€'], JPY: ['¥'],
-  AUD: ['A$', '$'], CAD: ['CA$', 'C$', '$'], HKD: ['HK$', '$'], NZD: ['NZ$', '$'], SGD: ['S$', '$'], TWD: ['NT$', '$'],
-};
+// Beside the sign it is shown with, what people write who use no other dollar.
+const otherSigns: Readonly<Record<string, readonly string[]>> = { USD: ['US$'], CAD: ['C$'] };
+
+function signsOf(currency: string): string[] {
+  const sign = currencySigns[currency];
+  const all = [currency, ...(sign === undefined ? [] : [sign]), ...(otherSigns[currency] ?? []), ...(sign?.endsWith('$') ? ['$'] : [])];
+  return all.toSorted((a, b) => b.length - a.length);
+}
 
 function withoutSign(text: string, currency: string): string {
-  for (const sign of [currency, ...(signs[currency] ?? [])]) {
+  for (const sign of signsOf(currency)) {
     if (text.toUpperCase().startsWith(sign)) return text.slice(sign.length).trim();
     if (text.toUpperCase().endsWith(sign)) return text.slice(0, -sign.length).trim();
   }

@@ -1,4 +1,6 @@
 import { expect, test } from 'vitest';
+import { currencyExponents } from '#domain/currency.ts';
+import { formatMoney } from '#domain/format.ts';
 import { addMoney, money, readMoney, subtractMoney } from '#domain/money.ts';
 import type { Money } from '#domain/money.ts';
 
@@ -58,4 +60,14 @@ test.each([
   ['99999999999999', 'GBP', 'That is more money than one line can hold'],
 ])('%s in %s is answered beside its field', (text, currency, problem) => {
   expect(readMoney(text, currency)).toEqual({ ok: false, problem: `${problem}.` });
+});
+
+test.each(Object.keys(currencyExponents))('money in %s reads back as it is shown', (code) => {
+  for (const minor of [0, 7, 123_456, 1_234_567]) expect(readMoney(formatMoney(minor, code), code)).toEqual({ ok: true, value: { currency: code, minor } });
+});
+
+test('the dollar of the Eastern Caribbean is read with its own sign, with a bare one, and with no other', () => {
+  expect(readMoney('EC$8.00', 'XCD')).toMatchObject({ ok: true, value: { minor: 800 } });
+  expect(readMoney('$8.00', 'XCD')).toMatchObject({ ok: true, value: { minor: 800 } });
+  expect(readMoney('EC$8.00', 'USD').ok).toBe(false);
 });
