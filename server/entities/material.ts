@@ -2,6 +2,7 @@ import { defineEntity, p, type InferEntity } from '@mikro-orm/core';
 import type { Pack, Ratio } from '#domain/quantity-reading.ts';
 import type { Dimension } from '#domain/units.ts';
 import type { HazardTag } from '#contracts/words.ts';
+import { Build } from './build.ts';
 import { Person } from './person.ts';
 
 /** A material of one restorer; it serves all their builds. */
@@ -12,6 +13,8 @@ export const Material = defineEntity({
   properties: {
     id: p.integer().primary(),
     owner: () => p.manyToOne(Person).deleteRule('cascade'),
+    /** The build it was added at, whose crew may use it; nothing where it was added to the restorer's own list. */
+    addedFor: () => p.manyToOne(Build).nullable().deleteRule('set null'),
     name: p.string(),
     /** The name lower-cased with runs of space folded: one material a name. */
     nameKey: p.string(),

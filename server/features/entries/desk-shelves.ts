@@ -3,6 +3,7 @@ import { priceShelf } from '#domain/ledger/price.ts';
 import { exactText } from '#domain/quantity.ts';
 import type { EntryDocument } from '#src/blocks/pure.ts';
 import type { Build, Entry, Shelf } from '#server/entities/index.ts';
+import { materialsSeen, sees } from '#server/features/shelf/build-materials.service.ts';
 import { ledgerMovement } from '#server/features/shelf/ledger-movement.service.ts';
 import { findShed, shelfOfBuild } from '#server/features/shelf/shelves.service.ts';
 import type { Caller, Em } from '#server/http/context.ts';
@@ -11,8 +12,10 @@ import { draftMovements, draftsAround, storedMovements, type LaidMovement } from
 // So many rows of history go to the desk beside those of the entry's own materials: the next material picked is priced at once.
 const rowsBeside = 2000;
 
-/** The build's shelf and its owner's shed as crew see them: the stored ledger without one entry, with all other working copies laid over. */
+/** The build's shelf and its owner's shed as those who write see them: the stored ledger without one entry, with all other working copies laid over. Of the shed, crew see only what the build has to do with. */
 export interface DeskShelves {
+  /** The materials the caller may see, or null for all of them. */
+  readonly seen: ReadonlySet<number> | null;
   readonly shelf: Shelf;
   readonly shed: Shelf | null;
   readonly onShelf: readonly LaidMovement[];
@@ -22,12 +25,13 @@ export interface DeskShelves {
 export async function deskShelves(em: Em, caller: Caller, build: Build, entry: Entry): Promise<DeskShelves> {
   const drafts = await draftsAround(em, caller, build, entry);
   const replaced = new Set([entry.id, ...drafts.map((draft) => draft.entry)]);
+  const seen = await materialsSeen(em, caller, build);
   const shelf = await shelfOfBuild(em, build);
   const shed = await findShed(em, build.owner, build.currency);
   return {
-    shelf, shed,
+    seen, shelf, shed,
     onShelf: [...await storedMovements(em, shelf, replaced), ...draftMovements(drafts, 'shelf', build)],
-    inShed: [...(shed ? await storedMovements(em, shed, replaced) : []), ...draftMovements(drafts, 'shed', build)],
+    inShed: [...(shed ? await storedMovements(em, shed, replaced) : []), ...draftMovements(drafts, 'shed', build)].filter(({ material }) => sees(seen, material)),
   };
 }
 

@@ -24,15 +24,15 @@ async function stagesOf(em: Em, build: Build, entry: Entry): Promise<DeskView['s
   });
 }
 
-/** Kinds of work to suggest: the owner's own first, then those the public may read of. What only private builds name is nobody else's. */
-async function workKindsFor(em: Em, build: Build): Promise<DeskView['workKinds']> {
+/** Kinds of work to suggest: this build's and the caller's own first, then those the public may read of. What only private builds name is nobody else's. */
+async function workKindsFor(em: Em, caller: Caller, build: Build): Promise<DeskView['workKinds']> {
   return em.execute<DeskView['workKinds']>(
     `select k.one as one, k.many as many from work_kind k join (
-       select e.work_kind_id as kind, b.owner_id = ? as own from entry e join build b on b.id = e.build_id
-         where e.work_kind_id is not null and (b.owner_id = ? or (b.visibility = 'public' and e.published is not null))
-       union all select s.work_kind_id as kind, 1 as own from stage s join build b on b.id = s.build_id where s.work_kind_id is not null and b.owner_id = ?
+       select e.work_kind_id as kind, (b.owner_id = ? or b.id = ?) as own from entry e join build b on b.id = e.build_id
+         where e.work_kind_id is not null and (b.owner_id = ? or b.id = ? or (b.visibility = 'public' and e.published is not null))
+       union all select s.work_kind_id as kind, 1 as own from stage s join build b on b.id = s.build_id where s.work_kind_id is not null and (b.owner_id = ? or b.id = ?)
      ) at on at.kind = k.id group by k.id order by max(at.own) desc, count(*) desc, k.one limit ${mostWorkKinds}`,
-    [build.owner.id, build.owner.id, build.owner.id],
+    [caller.id, build.id, caller.id, build.id, caller.id, build.id],
   );
 }
 
@@ -61,8 +61,8 @@ async function deskOf(em: Em, caller: Caller, slug: string, number: number): Pro
     build: { slug: build.slug, title, currency, measures, method: shelves.shelf.method, costsShown, visibility },
     shedMethod: shelves.shed?.method ?? 'fifo',
     entry: entryView(build, entry),
-    stages: await stagesOf(em, build, entry), workKinds: await workKindsFor(em, build), people: await peopleOf(em, build),
-    materials: await materialsOf(em, build.owner.id),
+    stages: await stagesOf(em, build, entry), workKinds: await workKindsFor(em, caller, build), people: await peopleOf(em, build),
+    materials: await materialsOf(em, build.owner.id, shelves.seen),
     shelf: shelfRows(shelves), history: materialHistories(shelves, keptDocuments(entry)),
     buildUsed: (await usedOfBuilds(em, [build.id])).get(build.id) ?? 0,
   };

@@ -3,6 +3,7 @@ import type { Entry } from '#server/entities/index.ts';
 import type { Caller, Em } from '#server/http/context.ts';
 import { requireEntry, requireVersion } from './entry-access.ts';
 import { entryContext } from './entry-context.ts';
+import { seenDocument } from './seen-document.ts';
 import { keptDocuments, newNodeId } from './stored-document.ts';
 
 export interface Saved {
@@ -24,7 +25,7 @@ export async function saveTyped(em: Em, caller: Caller, slug: string, number: nu
   return em.transactional(async (inner) => {
     const { build, entry } = await requireEntry(inner, caller, slug, number);
     requireVersion(entry, input.version);
-    const document = readEntry(withUniqueIds(input.document, newNodeId), keptDocuments(entry), await entryContext(inner, build));
+    const document = readEntry(withUniqueIds(await seenDocument(inner, caller, build, input.document), newNodeId), keptDocuments(entry), await entryContext(inner, build));
     entry.working = document;
     entry.workingAt = now;
     nameDraft(entry, document);

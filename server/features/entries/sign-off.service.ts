@@ -9,6 +9,7 @@ import { requireEntry, requireStage, requireVersion } from './entry-access.ts';
 import { giveAddress } from './entry-address.ts';
 import { entryContext } from './entry-context.ts';
 import { replaceRows } from './entry-rows.ts';
+import { seenDocument } from './seen-document.ts';
 import { keptDocuments, newNodeId, storedDocument } from './stored-document.ts';
 
 function requireWhole(derived: EntryDerivation): void {
@@ -56,7 +57,7 @@ export async function signOffDay(em: Em, caller: Caller, slug: string, number: n
     const { build, entry } = await requireEntry(inner, caller, slug, number);
     requireVersion(entry, input.version);
     const context = await entryContext(inner, build);
-    const document = readEntry(withUniqueIds(input.document, newNodeId), keptDocuments(entry), context);
+    const document = readEntry(withUniqueIds(await seenDocument(inner, caller, build, input.document), newNodeId), keptDocuments(entry), context);
     const derived = deriveEntry(document, context);
     requireWhole(derived);
     return publish(inner, build, entry, document, derived, now);

@@ -9,6 +9,7 @@ import type { MaterialFacts } from '#src/blocks/pure.ts';
 import { Build, Material, Person } from '#server/entities/index.ts';
 import { requireCrewBuild, requireWritableBuild } from '#server/features/builds/build-access.service.ts';
 import type { Caller, Em } from '#server/http/context.ts';
+import { materialsSeen, sees } from './build-materials.service.ts';
 
 export type NewMaterial = Omit<ParsedOf<typeof addMaterial>['body'], 'build'>;
 type MaterialDimension = MaterialView['dimension'];
@@ -34,9 +35,10 @@ export function materialView(material: Material): MaterialView {
   };
 }
 
-/** A restorer's materials, by name. */
-export async function materialsOf(em: Em, ownerId: number): Promise<MaterialView[]> {
-  return (await em.find(Material, { owner: ownerId }, { orderBy: { nameKey: 'asc' } })).map(materialView);
+/** A restorer's materials, by name. @param seen only those, or null for all */
+export async function materialsOf(em: Em, ownerId: number, seen: ReadonlySet<number> | null = null): Promise<MaterialView[]> {
+  const materials = await em.find(Material, { owner: ownerId }, { orderBy: { nameKey: 'asc' } });
+  return materials.filter(({ id }) => sees(seen, id)).map(materialView);
 }
 
 /** What blocks need to know of a restorer's materials. */
@@ -45,21 +47,22 @@ export async function materialFacts(em: Em, ownerId: number): Promise<Map<number
   return new Map(materials.map(({ id, name, dimension, unit, packs, ratio, hazards }) => [id, { id, name, dimension, unit, packs, ratio: ratio ?? null, hazards }]));
 }
 
-interface Bench { readonly ownerId: number; readonly measures: Measures }
+interface Bench { readonly ownerId: number; readonly measures: Measures; readonly build: Build | null }
 
 /** Whose list is added to, and by what measures it is read: the build's, else those of one's own newest build. */
 async function benchOf(em: Em, caller: Caller, slug: string | undefined): Promise<Bench> {
   if (slug !== undefined) {
     const build = await requireWritableBuild(em, caller, slug);
-    return { ownerId: build.owner.id, measures: build.measures };
+    return { ownerId: build.owner.id, measures: build.measures, build };
   }
   const newest = await em.findOne(Build, { owner: caller.id }, { orderBy: { id: 'desc' } });
-  return { ownerId: caller.id, measures: newest?.measures ?? 'imperial' };
+  return { ownerId: caller.id, measures: newest?.measures ?? 'imperial', build: null };
 }
 
 export async function listMaterials(em: Em, caller: Caller, slug: string | undefined): Promise<MaterialView[]> {
   if (slug === undefined) return materialsOf(em, caller.id);
-  return materialsOf(em, (await requireCrewBuild(em, caller, slug)).owner.id);
+  const build = await requireCrewBuild(em, caller, slug);
+  return materialsOf(em, build.owner.id, await materialsSeen(em, caller, build));
 }
 
 function readPacks(input: NewMaterial, measures: Measures, fields: Record<string, string>): Pack[] {
@@ -82,25 +85,34 @@ function readUnit(input: NewMaterial, measures: Measures, fields: Record<string,
   return known ?? offered[0]?.id ?? '';
 }
 
-function nameTaken(name: string): AppError {
-  const fields: FieldProblems = { name: `There is already a material called “${name}”. Pick it from the list, or give this one another name.` };
+/** @param listed whether who adds it sees the one that is there */
+function nameTaken(name: string, listed: boolean): AppError {
+  const fields: FieldProblems = {
+    name: listed ? `There is already a material called “${name}”. Pick it from the list, or give this one another name.`
+      : `The restorer keeps a “${name}” that is not on the list of this build. Give this one another name, or ask the restorer to use it here first.`,
+  };
   return new AppError('already-taken', 'A material of that name is there already.', fields);
 }
 
+async function isListed(em: Em, caller: Caller, { ownerId, build }: Bench, name: string): Promise<boolean> {
+  const there = await em.fork().findOne(Material, { owner: ownerId, nameKey: name.toLowerCase() });
+  return !there || !build || sees(await materialsSeen(em, caller, build), there.id);
+}
+
 /** Adds a material to a restorer's list. The unique index on the name closes the race between two who add it at once. */
-export async function createMaterial(em: Em, bench: Bench, input: NewMaterial): Promise<Material> {
+async function createMaterial(em: Em, caller: Caller, bench: Bench, input: NewMaterial): Promise<Material> {
   const fields: Record<string, string> = {};
   const packs = readPacks(input, bench.measures, fields);
   const unit = readUnit(input, bench.measures, fields);
   if (Object.keys(fields).length > 0) throw new AppError('bad-input', 'Some of this needs mending.', fields);
   const name = input.name.trim().replace(/\s+/g, ' ');
   const material = em.create(Material, {
-    owner: em.getReference(Person, bench.ownerId), name, nameKey: name.toLowerCase(), dimension: input.dimension, unit, ratio: null, packs, hazards: input.hazards ?? [],
+    owner: em.getReference(Person, bench.ownerId), addedFor: bench.build, name, nameKey: name.toLowerCase(), dimension: input.dimension, unit, ratio: null, packs, hazards: input.hazards ?? [],
   });
   try {
     await em.persist(material).flush();
   } catch (error) {
-    if (error instanceof UniqueConstraintViolationException) throw nameTaken(name);
+    if (error instanceof UniqueConstraintViolationException) throw nameTaken(name, await isListed(em, caller, bench, name));
     throw error;
   }
   return material;
@@ -108,5 +120,5 @@ export async function createMaterial(em: Em, bench: Bench, input: NewMaterial): 
 
 /** Adds a material to one's own list, or to that of the owner of a build one works on. */
 export async function addToMaterials(em: Em, caller: Caller, slug: string | undefined, input: NewMaterial): Promise<MaterialView> {
-  return materialView(await createMaterial(em, await benchOf(em, caller, slug), input));
+  return materialView(await createMaterial(em, caller, await benchOf(em, caller, slug), input));
 }

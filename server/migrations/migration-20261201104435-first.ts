@@ -1,6 +1,6 @@
 import { Migration } from '@mikro-orm/migrations';
 
-export class Migration20261201103533_first extends Migration {
+export class Migration20261201104435_first extends Migration {
 
   override async up(): Promise<void> {
     this.addSql(`create table \`job\` (\`id\` integer not null primary key autoincrement, \`kind\` text not null, \`payload\` json not null, \`run_at\` datetime not null, \`attempts\` integer not null default 0, \`claimed_at\` datetime null, \`done_at\` datetime null, \`given_up_at\` datetime null, \`failure\` text null, \`created_at\` datetime not null);`);
@@ -10,10 +10,6 @@ export class Migration20261201103533_first extends Migration {
     this.addSql(`create unique index \`person_handle_unique\` on \`person\` (\`handle\`);`);
     this.addSql(`create unique index \`person_email_unique\` on \`person\` (\`email\`);`);
     this.addSql(`create unique index \`person_github_id_unique\` on \`person\` (\`github_id\`);`);
-
-    this.addSql(`create table \`material\` (\`id\` integer not null primary key autoincrement, \`owner_id\` integer not null, \`name\` text not null, \`name_key\` text not null, \`dimension\` text not null, \`unit\` text not null, \`ratio\` json null, \`packs\` json not null, \`hazards\` json not null, \`created_at\` datetime not null, constraint \`material_owner_id_foreign\` foreign key(\`owner_id\`) references \`person\`(\`id\`) on delete cascade on update cascade);`);
-    this.addSql(`create index \`material_owner_id_index\` on \`material\` (\`owner_id\`);`);
-    this.addSql(`create unique index \`material_owner_id_name_key_unique\` on \`material\` (\`owner_id\`, \`name_key\`);`);
 
     this.addSql(`create table \`http_session\` (\`sid\` text not null, \`data\` text not null, \`person_id\` integer null, \`expires_at\` datetime not null, \`created_at\` datetime not null, constraint \`http_session_person_id_foreign\` foreign key(\`person_id\`) references \`person\`(\`id\`) on delete cascade on update cascade, primary key (\`sid\`));`);
     this.addSql(`create index \`http_session_person_id_index\` on \`http_session\` (\`person_id\`);`);
@@ -29,6 +25,11 @@ export class Migration20261201103533_first extends Migration {
     this.addSql(`create unique index \`picture_key_unique\` on \`picture\` (\`key\`);`);
     this.addSql(`create index \`picture_build_id_index\` on \`picture\` (\`build_id\`);`);
     this.addSql(`create index \`picture_uploader_id_index\` on \`picture\` (\`uploader_id\`);`);
+
+    this.addSql(`create table \`material\` (\`id\` integer not null primary key autoincrement, \`owner_id\` integer not null, \`added_for_id\` integer null, \`name\` text not null, \`name_key\` text not null, \`dimension\` text not null, \`unit\` text not null, \`ratio\` json null, \`packs\` json not null, \`hazards\` json not null, \`created_at\` datetime not null, constraint \`material_owner_id_foreign\` foreign key(\`owner_id\`) references \`person\`(\`id\`) on delete cascade on update cascade, constraint \`material_added_for_id_foreign\` foreign key(\`added_for_id\`) references \`build\`(\`id\`) on delete set null on update cascade);`);
+    this.addSql(`create index \`material_owner_id_index\` on \`material\` (\`owner_id\`);`);
+    this.addSql(`create index \`material_added_for_id_index\` on \`material\` (\`added_for_id\`);`);
+    this.addSql(`create unique index \`material_owner_id_name_key_unique\` on \`material\` (\`owner_id\`, \`name_key\`);`);
 
     this.addSql(`create table \`crew_member\` (\`id\` integer not null primary key autoincrement, \`build_id\` integer not null, \`person_id\` integer not null, \`created_at\` datetime not null, constraint \`crew_member_build_id_foreign\` foreign key(\`build_id\`) references \`build\`(\`id\`) on delete cascade on update cascade, constraint \`crew_member_person_id_foreign\` foreign key(\`person_id\`) references \`person\`(\`id\`) on delete cascade on update cascade);`);
     this.addSql(`create index \`crew_member_build_id_index\` on \`crew_member\` (\`build_id\`);`);
