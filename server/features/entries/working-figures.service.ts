@@ -1,6 +1,6 @@
 import { priceShelf } from '#domain/ledger/price.ts';
 import { exactText } from '#domain/quantity.ts';
-import { deriveEntry, type EntryDerivation, type EntryDocument } from '#src/blocks/pure.ts';
+import { broughtToBuild, deriveEntry, type EntryDerivation, type EntryDocument } from '#src/blocks/pure.ts';
 import type { Build, Entry, Shelf } from '#server/entities/index.ts';
 import type { EntryFigures, LineValue } from '#server/features/shelf/figures.service.ts';
 import { ledgerMovement } from '#server/features/shelf/ledger-movement.service.ts';
@@ -35,7 +35,7 @@ function sumsOf(derived: EntryDerivation, lines: ReadonlyMap<string, LineValue>)
   const minutesOf = (waiting: boolean) => sum(derived.times.filter(({ kind }) => (kind === 'waiting') === waiting).map(({ minutes }) => minutes));
   return {
     used: valueOf('used'), wasted: valueOf('wasted'), costs: sum(costsOf(derived).map(({ money }) => money)),
-    bought: sum(derived.receipts.map((receipt) => receipt.notSorted + sum(receipt.lines.filter(({ goes }) => goes !== 'not-mine').map(({ door }) => door)))),
+    bought: sum(derived.receipts.map(broughtToBuild)),
     minutes: minutesOf(false), waiting: minutesOf(true), unsettled: [...lines.values()].some(({ short }) => short !== '0/1'),
   };
 }

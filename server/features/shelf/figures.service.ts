@@ -12,7 +12,7 @@ export interface EntryFigures {
   readonly wasted: number;
   /** Hire, carriage, tools, and what went straight into use. */
   readonly costs: number;
-  /** To the door, without what is not ours. */
+  /** To the door, without what went to the shed or is not ours. */
   readonly bought: number;
   /** Hands on. */
   readonly minutes: number;
@@ -41,7 +41,7 @@ export async function figuresOfEntries(em: Em, entryIds: readonly number[]): Pro
   const queries = [
     `select entry_id as entry, ${usedSum} as used, ${wastedSum} as wasted, max(short <> '0/1') as unsettled from movement where entry_id in ${at} and kind not in ('bought', 'given') group by entry_id`,
     `select entry_id as entry, sum(money) as costs from cost where entry_id in ${at} group by entry_id`,
-    `select r.entry_id as entry, sum(r.not_sorted + ifnull((select sum(l.door) from receipt_line l where l.receipt_id = r.id and l.goes <> 'not-mine'), 0)) as bought from receipt r where r.entry_id in ${at} group by r.entry_id`,
+    `select r.entry_id as entry, sum(r.not_sorted + ifnull((select sum(l.door) from receipt_line l where l.receipt_id = r.id and l.goes in ('shelf', 'straight')), 0)) as bought from receipt r where r.entry_id in ${at} group by r.entry_id`,
     `select entry_id as entry, ${summed("kind <> 'waiting'", 'minutes')} as minutes, ${summed("kind = 'waiting'", 'minutes')} as waiting from time_line where entry_id in ${at} group by entry_id`,
   ];
   for (const query of queries) {

@@ -140,11 +140,17 @@ function amountWords(line: BoughtLine, context: ProjectionContext): string {
   return [amount, line.goes === 'shelf' ? '' : lineGoesWords[line.goes].toLowerCase(), line.onOrder && stocked(line) ? 'on order' : ''].filter(Boolean).join(', ');
 }
 
+function sentence(words: string): string {
+  return words.charAt(0).toUpperCase() + words.slice(1);
+}
+
 function boughtSlip(_id: string, data: BoughtData, context: ProjectionContext): SlipView {
   const reading = readBought(data, context);
+  const shed = reading.door.lines.reduce((sum, line, index) => (data.lines[index]?.goes === 'shed' ? sum + line.door : sum), 0);
   const shares = [reading.delivery > 0 ? 'delivery' : '', reading.tax > 0 ? 'tax' : '', reading.discount > 0 ? 'discount' : ''].filter(Boolean);
   const notes = [
-    shares.length > 0 ? `Each line with its share of ${shares.join(' and ')}` : '',
+    shed > 0 ? `${formatMoney(shed, context.currency)} of it to the shed` : '',
+    shares.length > 0 ? `each line with its share of ${shares.join(' and ')}` : '',
     reading.currency === context.currency ? '' : `paid in ${reading.currency}`,
     data.basis === 'paper' ? '' : data.basis === 'memory' ? 'from memory' : 'a guess',
   ].filter(Boolean);
@@ -162,7 +168,7 @@ function boughtSlip(_id: string, data: BoughtData, context: ProjectionContext): 
       ...(context.costsShown && reading.door.notSorted > 0 ? [{ label: 'Not sorted yet', value: formatMoney(reading.door.notSorted, context.currency) }] : []),
     ],
     sum: context.costsShown ? { label: 'To the door', value: formatMoney(mine, context.currency) } : null,
-    ...(context.costsShown && notes.length > 0 ? { footnote: notes.join(', ') } : {}),
+    ...(context.costsShown && notes.length > 0 ? { footnote: sentence(notes.join(', ')) } : {}),
   };
 }
 

@@ -3,7 +3,7 @@ import type { DeskView } from '#contracts/entries.ts';
 import type { MaterialLedger } from '#domain/ledger/price.ts';
 import { whatOneTakes } from '#domain/one-takes.ts';
 import { exactFrom, exactText } from '#domain/quantity.ts';
-import { deriveEntry, readEntry, type EntryDerivation, type EntryDocument, type MaterialFacts } from '#src/blocks/pure.ts';
+import { broughtToBuild, deriveEntry, readEntry, type EntryDerivation, type EntryDocument, type MaterialFacts } from '#src/blocks/pure.ts';
 import type { EntryContext } from '#src/blocks/derive-entry.ts';
 import type { LineReckoning } from '#src/blocks/figures-store.ts';
 import { lineKey, shelfKey, shelfReplay, type ShelfName } from './shelf-replay.ts';
@@ -17,7 +17,7 @@ export interface DayFigures {
   readonly costs: number;
   /** used + wasted + costs */
   readonly day: number;
-  /** To the door, without what is not ours. */
+  /** To the door, without what went to the shed or is not ours. */
   readonly bought: number;
   /** Lines not bought yet, or not all of it: their money is not settled. */
   readonly linesShort: number;
@@ -92,7 +92,7 @@ function figuresOf(derived: EntryDerivation, lines: ReadonlyMap<string, LineReck
   const handsOn = derived.times.filter(({ kind }) => kind !== 'waiting');
   return {
     used, wasted, costs, day: used + wasted + costs,
-    bought: sumOf(derived.receipts.map((receipt) => receipt.notSorted + sumOf(receipt.lines.filter(({ goes }) => goes !== 'not-mine').map(({ door }) => door)))),
+    bought: sumOf(derived.receipts.map(broughtToBuild)),
     linesShort: derived.uses.filter((use) => exactFrom(lines.get(lineKey(use.block, use.line))?.short ?? noughtText).gt(0)).length,
     minutes: sumOf(handsOn.map(({ minutes }) => minutes)),
     waiting: sumOf(derived.times.filter(({ kind }) => kind === 'waiting').map(({ minutes }) => minutes)),
