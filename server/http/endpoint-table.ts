@@ -51,7 +51,10 @@ function parsed(schema: z.ZodType, value: unknown, missing: 'bad-input' | 'not-f
   const result = schema.safeParse(value ?? {});
   if (result.success) return result.data;
   if (missing === 'not-found') throw new AppError('not-found', 'There is nothing at this address.');
-  throw new AppError('bad-input', 'Some of this needs mending.', fieldProblems(result.error));
+  const fields = fieldProblems(result.error);
+  // one problem is said itself, for whoever shows no fields
+  const [words = 'Some of this needs mending.', ...more] = Object.values(fields);
+  throw new AppError('bad-input', more.length > 0 ? 'Some of this needs mending.' : words, fields);
 }
 
 /**

@@ -4,6 +4,7 @@ import { endpoint } from './endpoint.ts';
 import { entryPage } from './entry-view.ts';
 import { minor, noBody, nothing, ok, plainDay, slug } from './fields.ts';
 import { materialView } from './materials.ts';
+import { sentDocument } from './sent-document.ts';
 import { measuresList, pricingMethods, timeKinds } from './words.ts';
 
 const buildParams = z.object({ build: slug });
@@ -66,12 +67,12 @@ const saved = z.object({ version: z.number().int(), document: entryDocument, sav
 /** Saves the working copy. A newer one standing there answers `newer-exists` with `newer: { version, document }`. */
 export const saveWorking = endpoint({
   method: 'PUT', path: '/api/builds/:build/entries/:number/working', access: 'member', params: entryParams, query: nothing,
-  body: z.object({ version: z.number().int(), document: entryDocument }), reply: saved,
+  body: z.object({ version: z.number().int(), document: sentDocument }), reply: saved,
 });
 /** Publishes the document given: validates all of it, replaces the entry's rows, re-prices, in one transaction. */
 export const signOffEntry = endpoint({
   method: 'POST', path: '/api/builds/:build/entries/:number/sign-off', access: 'member', params: entryParams, query: nothing,
-  body: z.object({ version: z.number().int(), document: entryDocument }), reply: z.object({ version: z.number().int(), href: z.string() }),
+  body: z.object({ version: z.number().int(), document: sentDocument }), reply: z.object({ version: z.number().int(), href: z.string() }),
 });
 /** Takes a published entry back: its document becomes the working copy, its rows leave the ledger. */
 export const takeBackEntry = endpoint({
