@@ -9,11 +9,10 @@ const formats = {
   json: { type: 'application/feed+json; charset=utf-8', write: jsonFeedOf },
 } as const;
 
-/** Answers a feed; express adds the ETag and the 304s. Other sites' readers may fetch it, so the resource policy is open. */
+/** Answers a feed; express adds the ETag and the 304s. It has no date: figures change without the words. Other sites' readers may fetch it, so the resource policy is open. */
 function sendFeed(res: Response, feed: Feed, format: keyof typeof formats, publicUrl: string): void {
   const { type, write } = formats[format];
   res.set({ 'Cache-Control': 'public, max-age=300', 'Cross-Origin-Resource-Policy': 'cross-origin', 'Access-Control-Allow-Origin': '*' });
-  if (feed.modified) res.set('Last-Modified', feed.modified.toUTCString());
   if (!feed.listed) res.set('X-Robots-Tag', 'noindex');
   res.set('Content-Type', type).send(Buffer.from(write(feed, publicUrl)));
 }
