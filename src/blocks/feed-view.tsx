@@ -30,8 +30,9 @@ export function FeedEntry({ page, publicUrl }: { page: Pick<EntryPage, 'lead' | 
       {page.lead !== '' && <p><em>{page.lead}</em></p>}
       {page.rows.map((row, index) => (
         <div key={index}>
-          {row.body.map((node, at) => <FeedBody key={at} node={node} publicUrl={publicUrl} />)}
+          {row.body.slice(0, row.at).map((node, at) => <FeedBody key={at} node={node} publicUrl={publicUrl} />)}
           {row.slips.map(({ id, slip }) => <SlipTable key={id} {...slip} />)}
+          {row.body.slice(row.at).map((node, at) => <FeedBody key={at} node={node} publicUrl={publicUrl} />)}
         </div>
       ))}
     </>

@@ -57,7 +57,8 @@ export function hangingSlips(rows: readonly RowView[], beside: number): number {
     text += height / 2;
     hanging += 1;
   }
-  return hanging;
+  // one alone would only change sides
+  return hanging > 1 ? hanging : 0;
 }
 
 interface Laid { runs: number[]; text: number; margin: number }
@@ -66,14 +67,17 @@ function laidOut(rows: readonly RowView[], beside: number): Laid {
   let run = 0;
   let text = 0;
   let margin = beside;
+  // the day's tally belongs to no words in particular, so no words wait for it
+  let onlyTally = true;
   const runs = rows.map((row, index) => {
     const gap = margin - text;
-    if (index > 0 && gap <= mostGap) {
+    if (index > 0 && gap <= (onlyTally ? 0 : mostGap)) {
       run += 1;
       text = Math.max(text, margin);
       margin = text;
     }
     text += row.body.reduce((sum, node) => sum + bodyHeight(node), 0);
+    onlyTally &&= row.slips.length === 0;
     margin += row.slips.reduce((sum, { slip }) => sum + slipHeight(slip), 0);
     return run;
   });

@@ -52,13 +52,16 @@ function unspokenHazards(document: EntryDocument, context: ProjectionContext): H
  */
 export function projectEntry(document: EntryDocument, context: ProjectionContext, pictures: ReadonlyMap<string, PictureView>): EntryProjection {
   const rows: RowView[] = [];
-  let row: RowView = { body: [], slips: [] };
+  let row: RowView = { body: [], at: 0, slips: [] };
   let slipBefore = false;
   for (const node of document.content) {
     const slip = slipOf(node, context);
     const body = bodyOf(node, pictures);
     if (slip) {
-      if (!slipBefore) row = splitAtAnchor(rows, row);
+      if (!slipBefore) {
+        row = splitAtAnchor(rows, row);
+        row.at = row.body.length;
+      }
       row.slips.push(slip);
     } else if (body) row.body.push(body);
     if (slip || body) slipBefore = slip !== null;
@@ -73,5 +76,5 @@ function splitAtAnchor(rows: RowView[], row: RowView): RowView {
   if (anchor <= 0 && row.slips.length === 0) return row;
   const moved = row.body.splice(Math.max(anchor, 0));
   rows.push(row);
-  return { body: moved, slips: [] };
+  return { body: moved, at: 0, slips: [] };
 }

@@ -40,6 +40,8 @@ function bodyViews(body: readonly BodyNode[], firstPhotos: string | null): React
   return views;
 }
 
+const filled = (views: ReactNode[]): ReactNode => (views.length > 0 ? views : null);
+
 /** The day's tally, guessed in pixels. */
 const tallyHeight = 300;
 
@@ -51,7 +53,8 @@ export function readerRuns(rows: readonly RowView[], tally: ReactNode): TallyRun
   const slipsOf = (row: RowView) => row.slips.map(({ id, slip }) => <Slip key={id} {...slip} />);
   const parts = rows.map((row, index) => ({
     key: row.body[0] ? keyOf(row.body[0]) : row.slips[0]?.id ?? String(index),
-    prose: bodyViews(row.body, firstId),
+    before: filled(bodyViews(row.body.slice(0, row.at), firstId)),
+    after: filled(bodyViews(row.body.slice(row.at), firstId)),
     slips: [...(index === 0 ? [tally] : []), ...slipsOf(row).slice(0, index === rows.length - 1 ? row.slips.length - hanging : undefined)],
   }));
   const runs: { key: string; parts: TallyPart[]; under?: ReactNode[] }[] = [];
@@ -65,7 +68,7 @@ export function readerRuns(rows: readonly RowView[], tally: ReactNode): TallyRun
   const last = runs.at(-1);
   const lastRow = rows.at(-1);
   if (last && lastRow && hanging > 0) last.under = slipsOf(lastRow).slice(-hanging);
-  return runs.length > 0 ? runs : [{ key: 'tally', parts: [{ key: 'tally', prose: null, slips: [tally] }] }];
+  return runs.length > 0 ? runs : [{ key: 'tally', parts: [{ key: 'tally', before: null, slips: [tally], after: null }] }];
 }
 
 function keyOf(node: BodyNode): string {

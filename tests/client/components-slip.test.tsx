@@ -40,17 +40,22 @@ describe('a slip', () => {
 
 describe('the tally margin', () => {
   it('reads in the order of the page: words, their slips, the next words', () => {
-    const part = (key: string, prose: string, slips: string[]) => ({ key, parts: [{ key, prose, slips }] });
+    const part = (key: string, prose: string, slips: string[]) => ({ key, parts: [{ key, before: prose, slips, after: null }] });
     const { container } = render(<TallyMargin runs={[part('a', 'First words.', ['First slip.']), part('b', 'Second words.', [])]} />);
     expect(container.textContent).toBe('First words.First slip.Second words.');
   });
 
+  it('keeps the order things were written in where one part stands alone', () => {
+    const { container } = render(<TallyMargin runs={[{ key: 'a', parts: [{ key: 'a', before: 'Before.', slips: ['Slip.'], after: 'After.' }] }]} />);
+    expect(container.textContent).toBe('Before.Slip.After.');
+  });
+
   it('lets words run on within a run, and puts each slip after its own words on a phone', () => {
     const { container } = render(
-      <TallyMargin runs={[{ key: 'a', parts: [{ key: 'a', prose: 'One.', slips: ['First slip.'] }, { key: 'b', prose: 'Two.', slips: ['Second slip.'] }] }]} />,
+      <TallyMargin runs={[{ key: 'a', parts: [{ key: 'a', before: 'One.', slips: ['First slip.'], after: 'More.' }, { key: 'b', before: 'Two.', slips: ['Second slip.'], after: null }] }]} />,
     );
     const ordered = [...container.querySelectorAll<HTMLElement>('[style]')].toSorted((a, b) => Number(a.style.order) - Number(b.style.order));
-    expect(ordered.map((part) => part.textContent)).toEqual(['One.', 'First slip.', 'Two.', 'Second slip.']);
+    expect(ordered.map((part) => part.textContent)).toEqual(['One.', 'First slip.', 'More.', 'Two.', 'Second slip.']);
   });
 });
 
