@@ -4,6 +4,7 @@ import type { Endpoint, Method, ParsedOf } from '#contracts/endpoint.ts';
 import { AppError, type FieldProblems } from '#contracts/errors.ts';
 import type { Access, Role } from '#contracts/words.ts';
 import type { Caller, Context } from './context.ts';
+import { unshowableIn } from './unshowable.ts';
 import './zod-words.ts';
 
 type ReplyInput<E extends Endpoint> = z.input<E['reply']>;
@@ -48,6 +49,11 @@ export function fieldProblems(error: z.ZodError): FieldProblems {
 }
 
 function parsed(schema: z.ZodType, value: unknown, missing: 'bad-input' | 'not-found'): unknown {
+  const unshowable = unshowableIn(value);
+  if (unshowable !== null && missing === 'bad-input') {
+    const words = 'This holds a character that cannot be shown, often from pasting. Type it again without it.';
+    throw new AppError('bad-input', words, { [unshowable === '' ? 'form' : unshowable]: words });
+  }
   const result = schema.safeParse(value ?? {});
   if (result.success) return result.data;
   if (missing === 'not-found') throw new AppError('not-found', 'There is nothing at this address.');

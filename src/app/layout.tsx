@@ -34,8 +34,8 @@ function SiteFoot({ demo }: { demo: boolean }) {
     <footer className="not-printed border-t border-rule">
       <div className="mx-auto flex w-full max-w-page flex-wrap gap-x-6 gap-y-2 px-[18px] py-6 text-sm text-ink-soft wide:px-8">
         <span>Tallywright. Write up the work. Know what it cost.</span>
-        <a href="/feed.xml">RSS</a>
-        <a href="/feed.json">JSON Feed</a>
+        <a href="/feed.xml" className="-my-1 py-1">RSS</a>
+        <a href="/feed.json" className="-my-1 py-1">JSON Feed</a>
         {demo && <span>This is the demo: its people and builds are made up.</span>}
       </div>
     </footer>

@@ -6,6 +6,8 @@ export interface ShownError {
   status: number;
   code: ErrorCode;
   message: string;
+  /** What stood in the form that was sent, where it is to be sent again. */
+  values?: Readonly<Record<string, string>>;
 }
 export type FrozenErrors = Record<string, ShownError>;
 
@@ -14,7 +16,7 @@ const unexpected = 'Something went wrong here. It has been noted; try again in a
 export function shownError(error: unknown): ShownError {
   if (isRouteErrorResponse(error)) {
     const known = error.data as Partial<ShownError> | null;
-    if (known?.code && known.message) return { status: error.status, code: known.code, message: known.message };
+    if (known?.code && known.message) return { status: error.status, code: known.code, message: known.message, ...(known.values ? { values: known.values } : {}) };
     if (error.status === 404) return { status: 404, code: 'not-found', message: 'There is nothing at this address.' };
     return { status: error.status, code: 'broken', message: unexpected };
   }
@@ -23,8 +25,8 @@ export function shownError(error: unknown): ShownError {
 }
 
 /** Thrown from a loader: the page's status and words follow the outcome. */
-export function pageError(error: AppError) {
-  return data({ code: error.code, message: error.message }, { status: error.status });
+export function pageError({ code, message, status }: AppError, values?: ShownError['values']) {
+  return data({ code, message, ...(values ? { values } : {}) }, { status });
 }
 
 export function frozenErrors(errors: Record<string, unknown> | null): FrozenErrors | null {
@@ -32,5 +34,5 @@ export function frozenErrors(errors: Record<string, unknown> | null): FrozenErro
 }
 
 export function thawedErrors(errors: FrozenErrors | null): Record<string, unknown> | null {
-  return errors && Object.fromEntries(Object.entries(errors).map(([route, { status, code, message }]) => [route, new RouteErrorResponse(status, code, { code, message })]));
+  return errors && Object.fromEntries(Object.entries(errors).map(([route, { status, ...said }]) => [route, new RouteErrorResponse(status, said.code, said)]));
 }

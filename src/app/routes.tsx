@@ -2,6 +2,7 @@ import type { QueryClient } from '@tanstack/react-query';
 import { redirect, type ActionFunction, type LoaderFunction, type RouteObject } from 'react-router-dom';
 import type { ComponentType } from 'react';
 import { AppError } from '#contracts/errors.ts';
+import { SignedOutForm } from '#src/lib/form-action.ts';
 import { sessionQuery } from '#src/queries/session.ts';
 import { ErrorPage } from './error-page.tsx';
 import { Layout } from './layout.tsx';
@@ -23,13 +24,14 @@ function signInFrom(request: Request) {
   return redirect(`/sign-in?next=${encodeURIComponent(pathname + search)}`);
 }
 
-/** Outcomes become the page's status; a page that needs somebody signed in sends to the sign-in first. */
+/** Outcomes become the page's status; a page that needs somebody signed in sends to the sign-in first, but a form is kept. */
 function guarded<F extends LoaderFunction | ActionFunction>(run: F, options: RouteOptions): F {
   const wrapped = async (args: Parameters<F>[0], context?: unknown) => {
     try {
       return await (run as LoaderFunction)(args, context) ?? null;
     } catch (error) {
       if (error instanceof Response) throw error;
+      if (error instanceof SignedOutForm) throw pageError(new AppError('sign-in-needed', error.message), error.values);
       if (error instanceof AppError && error.code === 'sign-in-needed') throw signInFrom(args.request);
       if (error instanceof AppError) throw pageError(error);
       options.onFault(error);

@@ -2,6 +2,7 @@ import { useSuspenseQuery, type QueryClient } from '@tanstack/react-query';
 import { redirect, useSearchParams, type ActionFunctionArgs } from 'react-router-dom';
 import { githubOutcomeOf, githubOutcomes } from '#contracts/github-outcomes.ts';
 import type { AccountView, changeAccount, changePassword, endOtherSessions, partGithub } from '#contracts/session.ts';
+import { PageColumns } from '#src/components/page-columns.tsx';
 import { PageFrame } from '#src/components/page-frame.tsx';
 import { PageHead } from '#src/components/page-head.tsx';
 import { Panel } from '#src/components/panel.tsx';
@@ -71,12 +72,22 @@ export function Component() {
     <PageFrame head={<PageHead title="Settings" lettering="place" lede={<>{`You are @${account.handle} here, signed in as ${account.email}.`}</>} />}>
       <Head title="Settings" />
       {notice && <Notice key={search.toString()} good={notice.good}>{notice.words}</Notice>}
-      <div className="grid max-w-[36rem] gap-10">
-        <section><SectionHeading>Profile</SectionHeading><Panel><ProfileForm account={account} /></Panel></section>
-        <section><SectionHeading>Password</SectionHeading><Panel><PasswordForm key={String(search.get('done'))} account={account} /></Panel></section>
-        {(github || account.github) && <section><SectionHeading>GitHub</SectionHeading><Panel><GithubPanel account={account} /></Panel></section>}
-        <section><SectionHeading>Where you are signed in</SectionHeading><Panel><SessionsPanel sessions={account.sessions} /></Panel></section>
-      </div>
+      <PageColumns asideWidth="wide" aside={<div className="grid gap-10"><WaysIn account={account} github={github} /></div>}>
+        <div className="grid gap-10">
+          <section><SectionHeading>Profile</SectionHeading><Panel><ProfileForm account={account} /></Panel></section>
+          <section><SectionHeading>Password</SectionHeading><Panel><PasswordForm key={String(search.get('done'))} account={account} /></Panel></section>
+        </div>
+      </PageColumns>
     </PageFrame>
+  );
+}
+
+/** How this account is got into, and from where. */
+function WaysIn({ account, github }: { account: AccountView; github: boolean }) {
+  return (
+    <>
+      <section><SectionHeading>Where you are signed in</SectionHeading><Panel><SessionsPanel sessions={account.sessions} /></Panel></section>
+      {(github || account.github) && <section><SectionHeading>GitHub</SectionHeading><Panel><GithubPanel account={account} /></Panel></section>}
+    </>
   );
 }

@@ -2,9 +2,11 @@ import { useSuspenseQuery, type QueryClient } from '@tanstack/react-query';
 import { Link, redirect, redirectDocument, useSearchParams, type ActionFunctionArgs, type LoaderFunctionArgs } from 'react-router-dom';
 import { localPath, withNext } from '#contracts/local-path.ts';
 import type { signUp, signUpWithGithub } from '#contracts/session.ts';
+import { PageColumns } from '#src/components/page-columns.tsx';
 import { PageFrame } from '#src/components/page-frame.tsx';
 import { PageHead } from '#src/components/page-head.tsx';
 import { Panel } from '#src/components/panel.tsx';
+import { SectionHeading } from '#src/components/section-heading.tsx';
 import { GithubButton } from '#src/features/account/github-button.tsx';
 import { GithubSignUpForm, SignUpForm } from '#src/features/account/sign-up-form.tsx';
 import { formAction, passwordOf, textOf } from '#src/lib/form-action.ts';
@@ -44,10 +46,26 @@ export function Component() {
   return (
     <PageFrame head={<PageHead title={finishing ? 'Finish signing up' : 'Sign up'} lettering="place" lede={lede} />}>
       <Head title={finishing ? 'Finish signing up' : 'Sign up'} />
-      <div className="max-w-[30rem]">
+      <PageColumns asideWidth="wide" aside={<WhatForSection />}>
         <Panel>{finishing ? <GithubSignUpForm joining={finishing} /> : <SignUpForm />}</Panel>
         {github && !finishing && <p className="mt-5"><GithubButton next={next}>Sign up with GitHub</GithubButton></p>}
-      </div>
+      </PageColumns>
     </PageFrame>
+  );
+}
+
+const uses = [
+  ['Keep a build', 'Write up each day with pictures, what it took and how long. The tally is kept for you.'],
+  ['Know what it cost', 'Buy by the tin and the box, use by the cup and the piece: every line is priced from what you paid.'],
+  ['Show as much as you like', 'A build is public, by its address only, or for you and your crew; costs can stay with the crew.'],
+] as const;
+
+/** What an account is for. */
+function WhatForSection() {
+  return (
+    <section>
+      <SectionHeading>What an account is for</SectionHeading>
+      <ul>{uses.map(([title, words]) => <li key={title} className="border-b border-rule py-3"><b className="lettering-row block">{title}</b><span className="text-control text-ink-soft">{words}</span></li>)}</ul>
+    </section>
   );
 }

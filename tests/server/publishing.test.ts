@@ -163,12 +163,12 @@ describe('addresses are permanent', () => {
 describe('feeds', () => {
   test('stay well-formed with hostile titles and keep the guid through edits and renames', async () => {
     const slug = await build('Nasty ]]> & <b>feed</b>');
-    const title = 'Tar ]]> & <script>alert(1)</script> \u0007 \u202Eright to left';
+    const title = 'Tar ]]> & <script>alert(1)</script> \u202Bright to left';
     const day = await costedDay(title);
     const { number } = await signOff(slug, day);
     const read = async () => new Parser().parseString((await visitor.get(`/builds/${slug}/feed.xml`)).text);
     const before = await read();
-    expect(before.items[0]?.title).toBe(title.replace('\u0007', ''));
+    expect(before.items[0]?.title).toBe(title);
     await signOff(slug, { ...day, title: 'Plain title' }, number);
     const after = await read();
     expect(after.items[0]?.title).toBe('Plain title');
