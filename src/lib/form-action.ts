@@ -19,13 +19,23 @@ export function typedValues(form: FormData): Record<string, string> {
   return values;
 }
 
+/** A form that was sent by nobody signed in: the page it stands on cannot be drawn for them, so what was typed goes along. */
+export class SignedOutForm extends Error {
+  readonly values: Readonly<Record<string, string>>;
+  constructor(values: Readonly<Record<string, string>>) {
+    super('Nothing was done, and nothing of what you typed is lost.');
+    this.values = values;
+  }
+}
+
 /** Runs a form's case. Outcomes the person can mend come back beside their fields, with all that was typed. */
 export async function formAction(request: Request, run: (form: FormData) => Promise<Response>) {
   const form = await request.formData();
   try {
     return await run(form);
   } catch (error) {
-    if (!(error instanceof AppError) || error.code === 'sign-in-needed' || error.code === 'not-found') throw error;
+    if (error instanceof AppError && error.code === 'sign-in-needed') throw new SignedOutForm(typedValues(form));
+    if (!(error instanceof AppError) || error.code === 'not-found') throw error;
     const result: FormResult = { fields: error.fields ?? {}, message: error.message, values: typedValues(form), attempt: Date.now() };
     return data(result, { status: error.status });
   }
