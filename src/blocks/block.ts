@@ -120,6 +120,8 @@ export interface LineFigures {
   readonly value: number | null;
   /** Exact `n/d`: not bought yet. */
   readonly short: string;
+  /** What the short part would cost at the last price paid; nothing where none is known, or costs are hidden. */
+  readonly estimate: number | null;
 }
 
 export interface ProjectionContext extends BlockContext {

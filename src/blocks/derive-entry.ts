@@ -1,6 +1,7 @@
 import { dayProblem } from '#domain/day.ts';
 import { mostOfDay } from '#domain/money.ts';
 import { readAmountOfWork } from '#domain/work.ts';
+import { workKindName } from '#domain/work-words.ts';
 import type { BlockContext, BlockDerivation, DerivedCost, DerivedReceipt, DerivedTime, DerivedUse, PureBlock, ShownPicture } from './block.ts';
 import { isProse, type BlockNode, type EntryDocument, type TopNode } from './entry-document.ts';
 import { pureBlocks, type BlockType } from './pure-list.ts';
@@ -50,7 +51,7 @@ function workOf(document: EntryDocument, faults: Record<string, string>): EntryD
   if (work.kind.trim() === '') faults['work.kind'] = 'Say what was done, such as “panel coated”.';
   const amount = readAmountOfWork(work.amount);
   if (!amount.ok) faults['work.amount'] = amount.problem;
-  return amount.ok && work.kind.trim() !== '' ? { amount: amount.value, unit: work.unit, kind: work.kind.trim().toLowerCase() } : null;
+  return amount.ok && work.kind.trim() !== '' ? { amount: amount.value, unit: work.unit, kind: workKindName(work.kind) } : null;
 }
 
 /** What each block brings in and spends, minor units of the build's currency. */

@@ -23,10 +23,19 @@ function FeedBody({ node, publicUrl }: { node: BodyNode; publicUrl: string }) {
   return <ProseView node={node} />;
 }
 
+export interface FeedEntryProps {
+  page: Pick<EntryPage, 'lead' | 'rows'>;
+  /** The build it is a day of, and when that was, in words. */
+  build: { title: string; url: string };
+  days: string;
+  publicUrl: string;
+}
+
 /** An entry whole, for feeds and mail: no styles, blocks as plain tables, pictures at absolute addresses. */
-export function FeedEntry({ page, publicUrl }: { page: Pick<EntryPage, 'lead' | 'rows'>; publicUrl: string }) {
+export function FeedEntry({ page, build, days, publicUrl }: FeedEntryProps) {
   return (
     <>
+      <p><a href={build.url}>{build.title}</a>, {days}</p>
       {page.lead !== '' && <p><em>{page.lead}</em></p>}
       {page.rows.map((row, index) => (
         <div key={index}>

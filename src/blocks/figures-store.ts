@@ -4,6 +4,8 @@ export interface LineReckoning {
   readonly value: number;
   /** Exact `n/d`: not bought yet. */
   readonly short: string;
+  /** What the short part would cost at the last price paid; in no sum. */
+  readonly estimate: number | null;
   /** Exact `n/d`: on its shelf after this line; nothing where it reaches no shelf. */
   readonly left: string | null;
 }
@@ -25,7 +27,7 @@ export interface FiguresStore {
 }
 
 function same(a: LineReckoning | undefined, b: LineReckoning): a is LineReckoning {
-  return a !== undefined && a.value === b.value && a.short === b.short && a.left === b.left;
+  return a !== undefined && a.value === b.value && a.short === b.short && a.estimate === b.estimate && a.left === b.left;
 }
 
 /** Figures beside the text, so that a keystroke draws only the fields and lines it changes, not every block of the entry. */

@@ -10,6 +10,8 @@ export interface TapeBar {
   /** The entry's title. */
   label: string;
   href: string;
+  /** Some of the money is still to come. */
+  unsettled?: boolean;
   current?: boolean;
 }
 
@@ -23,6 +25,7 @@ export interface Slot {
   label: string;
   when: string;
   href: string;
+  unsettled: boolean;
   current: boolean;
 }
 
@@ -46,7 +49,7 @@ function slotOf(bar: TapeBar): Slot {
   const last = Math.max(first, dayNumber(bar.to ?? bar.day));
   return {
     key: `${bar.day} ${bar.href}`, first, last, amount: bar.amount, label: bar.label,
-    when: writtenSpan(first, last), href: bar.href, current: bar.current ?? false,
+    when: writtenSpan(first, last), href: bar.href, unsettled: bar.unsettled ?? false, current: bar.current ?? false,
   };
 }
 
@@ -71,6 +74,7 @@ function joined(group: readonly Slot[], when: (head: Slot) => string): Slot[] {
     first: head.first,
     last: Math.max(...group.map((slot) => slot.last)),
     amount: group.reduce((sum, slot) => sum + slot.amount, 0),
+    unsettled: group.some((slot) => slot.unsettled),
     label: `${group.length} entries`,
     when: when(head),
   }];

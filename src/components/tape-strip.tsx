@@ -7,7 +7,7 @@ export interface TapeStripProps {
   strip: Strip;
   name: string;
   size: TapeSize;
-  show: (amount: number) => string;
+  show: (amount: number, unsettled?: boolean) => string;
 }
 
 /** Height of the month band and of the ticks along the lower edge, px. */
@@ -42,7 +42,7 @@ export function TapeStrip({ strip, name, size, show }: TapeStripProps) {
         ))}
       </g>
       {strip.bars.map((bar) => (
-        <StripBar key={bar.key} bar={bar} foot={foot} room={barRoom[size]} height={height} figure={show(bar.amount)} />
+        <StripBar key={bar.key} bar={bar} foot={foot} room={barRoom[size]} height={height} figure={show(bar.amount, bar.unsettled)} />
       ))}
     </svg>
   );

@@ -8,7 +8,7 @@ export interface TapeTableProps {
   amountWord: string;
   /** Every entry by itself, also where the tape goes by weeks. */
   entries: readonly Slot[];
-  show: (amount: number) => string;
+  show: (amount: number, unsettled?: boolean) => string;
 }
 
 /** The tape's figures as a table, for whoever cannot see it or would rather read. */
@@ -35,7 +35,7 @@ export function TapeTable({ title, amountWord, entries, show }: TapeTableProps) 
                     {slot.label}
                   </Link>
                 </td>
-                <td className={`${cellClass} ${numberClass}`}>{show(slot.amount)}</td>
+                <td className={`${cellClass} ${numberClass}`}>{show(slot.amount, slot.unsettled)}</td>
               </tr>
             ))}
           </tbody>

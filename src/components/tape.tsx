@@ -15,8 +15,8 @@ export interface TapeProps {
   from: string;
   to: string;
   bars: TapeBar[];
-  /** Writes an amount out: `£91.74` or `7 h 30 min`. */
-  show: (amount: number) => string;
+  /** Writes an amount out: `£91.74` or `7 h 30 min`; unsettled where some of the money is still to come. */
+  show: (amount: number, unsettled?: boolean) => string;
   /** Chosen by the layout when left out: days while they can be told apart, then weeks. */
   unit?: TapeUnit;
   /** The same page with the other scale. */
@@ -64,7 +64,7 @@ interface TapeLengthProps {
   strip: Strip;
   title: string;
   size: TapeSize;
-  show: (amount: number) => string;
+  show: (amount: number, unsettled?: boolean) => string;
 }
 
 /** One tape in its own sideways window, opened where the reader is. */

@@ -91,7 +91,8 @@ export const buildCard = z.object({
   slug: z.string(), title: z.string(), kind: z.enum(buildKinds), lead: z.string(),
   owner: personView, stands: z.enum(standsList), standsNote: z.string(), madeIn: z.string(),
   days: z.number().int(), lastDay: plainDay.nullable(), picture: pictureView.nullable(),
-  used: z.object({ minor, currency: z.string() }).optional(),
+  /** Unsettled: some of it is not bought yet. */
+  used: z.object({ minor, currency: z.string(), unsettled: z.boolean() }).optional(),
 });
 export type BuildCard = z.output<typeof buildCard>;
 export const readBuilds = endpoint({
@@ -111,11 +112,15 @@ export const entryCard = z.object({
   build: z.object({ slug: z.string(), title: z.string() }), author: personView,
   picture: pictureView.nullable(), photos: z.number().int(),
   currency: z.string(), money: minor.optional(), minutes: z.number().int(), draft: z.boolean(),
+  /** Some of the money is not bought yet; absent where the money is. */
+  unsettled: z.boolean().optional(),
 });
 export type EntryCard = z.output<typeof entryCard>;
 
 export const planRow = z.object({
   stage: z.string(), done: z.boolean(), planned: minor.nullable(), used: minor, wasted: minor,
+  /** Some of what went is not bought yet, so its money is in neither figure. */
+  unsettled: z.boolean(),
   /** Nothing where there is not enough to go on. */
   finishAt: minor.nullable(), minutes: z.number().int(), plannedMinutes: z.number().int().nullable(),
 });

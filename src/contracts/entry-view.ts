@@ -15,6 +15,8 @@ export const bodyNode = z.union([
 /** Words with the slips that belong beside them. */
 export const rowView = z.object({
   body: z.array(bodyNode),
+  /** How many of the body the slips come after, in the order they were written. */
+  at: z.number().int(),
   slips: z.array(z.object({ type: z.string(), id: z.string(), slip: slipView })),
 });
 export type RowView = z.output<typeof rowView>;
@@ -24,8 +26,12 @@ export const tallyView = z.object({
   currency: z.string(),
   money: z.object({
     day: minor, used: minor, wasted: minor, costs: minor, bought: minor, buildUsed: minor,
+    /** Some of what the build used so far is not bought yet. */
+    buildUnsettled: z.boolean(),
     /** For one unit of work: materials counted for each, half-even once. */
     one: minor.nullable(),
+    /** Some of what counts for one is not bought yet. */
+    oneUnsettled: z.boolean(),
     /** Some of it is not bought yet, so not settled. */
     unsettled: z.boolean(),
   }).optional(),

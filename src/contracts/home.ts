@@ -12,7 +12,7 @@ export const readHome = endpoint({
     opening: z.object({ entry: entryCard, slip: slipView.nullable() }).nullable(),
     fresh: z.array(entryCard),
     /** What one unit of work took in the latest entries that say so. */
-    takes: z.array(z.object({ one: z.string(), href: z.string(), build: z.string(), currency: z.string(), money: minor.nullable(), minutes: z.number().int().nullable() })),
+    takes: z.array(z.object({ one: z.string(), href: z.string(), build: z.string(), currency: z.string(), money: minor.nullable(), unsettled: z.boolean(), minutes: z.number().int().nullable() })),
     kinds: z.array(z.object({ kind: z.enum(buildKinds), count: z.number().int() })),
   }),
 });

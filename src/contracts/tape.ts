@@ -8,6 +8,8 @@ export const tapeDay = z.object({
   title: z.string(),
   href: z.string(),
   money: z.number().int().optional(),
+  /** Some of the money is not bought yet; absent where the money is. */
+  unsettled: z.boolean().optional(),
   minutes: z.number().int(),
 });
 export type TapeDay = z.output<typeof tapeDay>;

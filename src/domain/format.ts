@@ -33,6 +33,11 @@ export function formatMoney(minor: number, currency: string): string {
   return `${minor < 0 ? minusSign : ''}${sign ?? currency + noBreakSpace}${figure}`;
 }
 
+/** Money that may have some of it still to come: `£3.00, some not bought yet`. */
+export function formatMoneySoFar(minor: number, currency: string, unsettled = false): string {
+  return unsettled ? `${formatMoney(minor, currency)}, some not bought yet` : formatMoney(minor, currency);
+}
+
 function hoursAndMinutes(minutes: number): { sign: string; hours: number; rest: number } {
   const total = Math.abs(whole(minutes, 'Time'));
   return { sign: minutes < 0 ? minusSign : '', hours: Math.floor(total / 60), rest: total % 60 };

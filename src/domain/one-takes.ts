@@ -1,5 +1,5 @@
 import Fraction from 'fraction.js';
-import { roundedWithin } from './rounding.ts';
+import { roundedWithin, roundHalfEven } from './rounding.ts';
 
 export interface UseForOne {
   readonly material: string;
@@ -70,31 +70,38 @@ function sumsByMaterial(uses: readonly UseForOne[]): Map<string, Sums> {
 }
 
 /**
+ * Money (minor units, half to even) and hands-on minutes (nearest whole) for one unit of work, of sums over *for each* lines.
+ * @returns null when no work was done, or so little that what one takes is no figure
+ */
+export function forOneOf(work: Fraction, sums: { readonly money: number; readonly minutes: number }): { money: number; minutes: number } | null {
+  if (work.n === 0n) return null;
+  const [money, minutes] = [sums.money, sums.minutes].map((sum) => roundedWithin(new Fraction(sum).div(work), mostForOne));
+  return money == null || minutes == null ? null : { money, minutes };
+}
+
+/**
  * What one unit of work really took: material (exact base units), money (minor units, half to
  * even once, of the sum) and hands-on minutes (nearest whole, half to even). Only *for each*
  * lines and times count; what was wasted is kept apart and given as a share of what was used.
  * @returns null when no work was done, or so little that what one takes is no figure
  */
 export function whatOneTakes({ work, uses, times }: WorkForOne): OneTakes | null {
-  if (work.n === 0n) return null;
   const each = uses.filter(({ counts }) => counts === 'each');
   const moneyOf = (kind: UseForOne['kind']) =>
     each.reduce((sum, use) => (use.kind === kind ? sum + use.value : sum), 0);
-  const forOne = (sum: number) => roundedWithin(new Fraction(sum).div(work), mostForOne);
-  const money = forOne(moneyOf('used'));
-  const minutes = forOne(times.reduce((sum, time) => (time.kind === 'each' ? sum + time.minutes : sum), 0));
-  if (money === null || minutes === null) return null;
-  const materials = [...sumsByMaterial(each)].map(([material, own]) => ({
+  const minutesForEach = times.reduce((sum, { minutes, kind }) => (kind === 'each' ? sum + minutes : sum), 0);
+  const one = forOneOf(work, { money: moneyOf('used'), minutes: minutesForEach });
+  if (!one) return null;
+  const materials = [...sumsByMaterial(each)].map(([material, { used, wasted, money }]) => ({
     material,
-    amount: own.used.div(work),
-    // no material takes more than all of them
-    money: forOne(own.money) ?? money,
-    wastedShare: share(own.wasted, own.used),
+    amount: used.div(work),
+    money: roundHalfEven(new Fraction(money).div(work)),
+    wastedShare: share(wasted, used),
   }));
   return {
     materials,
-    money,
-    minutes,
+    money: one.money,
+    minutes: one.minutes,
     wastedShare: share(new Fraction(moneyOf('wasted')), new Fraction(moneyOf('used'))),
   };
 }

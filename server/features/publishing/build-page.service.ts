@@ -27,9 +27,9 @@ function identityOf(build: Build, writes: boolean): BuildPage['identity'] {
 }
 
 function planRow(stage: Stage, figures: StageFigures | undefined): PlanRow {
-  const { used = 0, wasted = 0, usedForEach = 0, minutes = 0, workDone = null } = figures ?? {};
+  const { used = 0, wasted = 0, usedForEach = 0, unsettled = false, minutes = 0, workDone = null } = figures ?? {};
   return {
-    stage: stage.title, done: stage.done, planned: stage.plannedMoney ?? null, used, wasted, minutes, plannedMinutes: stage.plannedMinutes ?? null,
+    stage: stage.title, done: stage.done, planned: stage.plannedMoney ?? null, used, wasted, unsettled, minutes, plannedMinutes: stage.plannedMinutes ?? null,
     finishAt: finishAt({
       planned: stage.plannedMoney ?? null, used, wasted, usedForEach, done: stage.done, percent: null,
       workPlanned: stage.plannedWork ? exactFrom(stage.plannedWork) : null, workDone: workDone ? exactFrom(workDone) : null,
@@ -40,8 +40,8 @@ function planRow(stage: Stage, figures: StageFigures | undefined): PlanRow {
 /** Work outside any stage keeps the table's foot equal to the build's figures. */
 function looseRow(stages: ReadonlyMap<number | null, StageFigures>): PlanRow[] {
   const loose = stages.get(null);
-  if (!loose || loose.used + loose.wasted + loose.minutes === 0) return [];
-  return [{ stage: 'Outside any stage', done: false, planned: null, used: loose.used, wasted: loose.wasted, finishAt: null, minutes: loose.minutes, plannedMinutes: null }];
+  if (!loose || (loose.used + loose.wasted + loose.minutes === 0 && !loose.unsettled)) return [];
+  return [{ stage: 'Outside any stage', done: false, planned: null, used: loose.used, wasted: loose.wasted, unsettled: loose.unsettled, finishAt: null, minutes: loose.minutes, plannedMinutes: null }];
 }
 
 async function listedEntries(em: Em, build: Build, page: number) {

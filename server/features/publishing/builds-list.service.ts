@@ -1,7 +1,7 @@
 import type { BuildCard, BuildsView } from '#contracts/builds.ts';
 import { buildKinds, type BuildKind } from '#contracts/words.ts';
 import { Build } from '#server/entities/index.ts';
-import { usedOfBuilds } from '#server/features/shelf/figures.service.ts';
+import { unsettledBuilds, usedOfBuilds } from '#server/features/shelf/figures.service.ts';
 import type { Em } from '#server/http/context.ts';
 import { daysOfBuilds } from './build-days.service.ts';
 import { madeInWords } from './build-page.service.ts';
@@ -26,14 +26,16 @@ export async function buildCards(em: Em, builds: readonly Build[]): Promise<Buil
   const ids = builds.map((build) => build.id);
   const days = await daysOfBuilds(em, ids);
   const covers = await coversOfBuilds(em, ids);
-  const used = await usedOfBuilds(em, builds.filter((build) => build.costsShown).map((build) => build.id));
+  const shown = builds.filter((build) => build.costsShown).map((build) => build.id);
+  const used = await usedOfBuilds(em, shown);
+  const unsettled = await unsettledBuilds(em, shown);
   return builds.map((build) => {
     const written = days.get(build.id);
     return {
       slug: build.slug, title: build.title, kind: build.kind, lead: build.lead, owner: { handle: build.owner.handle, name: build.owner.name },
       stands: build.stands, standsNote: build.standsNote, madeIn: madeInWords(build), days: written?.days ?? 0, lastDay: written?.lastDay ?? null,
       picture: covers.get(build.id) ?? null,
-      ...(build.costsShown ? { used: { minor: used.get(build.id) ?? 0, currency: build.currency } } : {}),
+      ...(build.costsShown ? { used: { minor: used.get(build.id) ?? 0, currency: build.currency, unsettled: unsettled.has(build.id) } } : {}),
     };
   });
 }

@@ -23,7 +23,7 @@ export async function entryCards(em: Em, entries: readonly Entry[], showsCosts: 
       day: entry.day, dayTo: entry.dayTo ?? null, stage: entry.stage?.title ?? null,
       build: { slug: build.slug, title: build.title }, author: { handle: entry.author.handle, name: entry.author.name },
       picture: shown?.cover ?? null, photos: shown?.count ?? 0, currency: build.currency,
-      ...(showsCosts(entry) && published ? { money: (sums?.used ?? 0) + (sums?.wasted ?? 0) + (sums?.costs ?? 0) } : {}),
+      ...(showsCosts(entry) && published ? { money: (sums?.used ?? 0) + (sums?.wasted ?? 0) + (sums?.costs ?? 0), unsettled: sums?.unsettled ?? false } : {}),
       minutes: sums?.minutes ?? 0, draft: !published,
     };
   });

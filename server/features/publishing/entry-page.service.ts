@@ -1,17 +1,21 @@
 import type { EntryPage, TallyView } from '#contracts/entry-view.ts';
+import { estimateOf } from '#domain/ledger/estimate.ts';
+import { exactFrom } from '#domain/quantity.ts';
+import { oneOfWork } from '#domain/work-words.ts';
 import { currentDocument, deriveEntry, projectEntry, type EntryDerivation, type EntryDocument, type ProjectionContext } from '#src/blocks/pure.ts';
 import { AppError } from '#contracts/errors.ts';
 import { CrewMember, Entry, EntryAddress, Stage, WorkKind, type Build } from '#server/entities/index.ts';
 import { movedBuild, requireCrewBuild, requireVisibleBuild, seesCosts } from '#server/features/builds/build-access.service.ts';
 import { workingFigures, type WorkingFigures } from '#server/features/entries/working-figures.service.ts';
 import { pictureViews } from '#server/features/media/pictures.service.ts';
-import { lineFigures, figuresOfEntries, usedOfBuilds, type EntryFigures } from '#server/features/shelf/figures.service.ts';
+import { lineFigures, figuresOfEntries, unsettledBuilds, usedOfBuilds, type EntryFigures, type LineValue } from '#server/features/shelf/figures.service.ts';
+import { lastPaidFor, paidKey } from '#server/features/shelf/last-paid.service.ts';
 import { materialFacts } from '#server/features/shelf/materials.service.ts';
 import type { Em, Viewer } from '#server/http/context.ts';
 import { entryHref } from './entry-cards.service.ts';
-import { entryTakes, takesOf } from './takes.service.ts';
+import { takesOf, takesOfEntries, type Takes } from './takes.service.ts';
 import { tapeOf } from './tape.service.ts';
-import { oneOfWork, workWords } from './work-words.ts';
+import { workWords } from './work-words.ts';
 
 type Materials = ProjectionContext['materials'];
 
@@ -35,13 +39,25 @@ async function namesAround(em: Em, build: Build): Promise<Map<string, string>> {
   return new Map([[build.owner.handle, build.owner.name], ...crew.map(({ person }) => [person.handle, person.name] as const)]);
 }
 
+/** What the lines not bought yet would cost at the last price paid, by `block:line`. */
+async function estimatesOf(em: Em, build: Build, derived: EntryDerivation, figures: ReadonlyMap<string, LineValue>): Promise<ReadonlyMap<string, number | null>> {
+  const short = derived.uses.flatMap((use) => {
+    const key = `${use.block}:${use.line}`;
+    const amount = figures.get(key)?.short ?? '0/1';
+    return amount === '0/1' ? [] : [{ key, amount, material: use.material, from: use.from }];
+  });
+  const paid = await lastPaidFor(em, build, short);
+  return new Map(short.map(({ key, amount, material, from }) => [key, estimateOf(exactFrom(amount), paid.get(paidKey(material, from)) ?? null)]));
+}
+
 async function projectionContext(em: Em, source: EntrySource, materials: Materials, derived: EntryDerivation, plural: ReadonlyMap<string, string>): Promise<ProjectionContext> {
   const { build, entry, document, costsShown } = source;
   const figures = source.working?.lines ?? await lineFigures(em, entry.id);
+  const estimates = costsShown ? await estimatesOf(em, build, derived, figures) : new Map<string, number | null>();
   return {
     measures: build.measures, currency: build.currency, day: document.day, dayTo: document.dayTo, stage: document.stage,
     materials, costsShown,
-    figures: new Map([...figures].map(([key, line]) => [key, { value: costsShown ? line.value : null, short: line.short }])),
+    figures: new Map([...figures].map(([key, line]) => [key, { value: costsShown ? line.value : null, short: line.short, estimate: estimates.get(key) ?? null }])),
     workWords: derived.work ? workWords(derived.work, plural) : null, names: await namesAround(em, build),
   };
 }
@@ -60,16 +76,24 @@ async function usedSoFar(em: Em, { build, entry, working }: EntrySource, sums: E
   return stored - published.used - published.costs + sums.used + sums.costs;
 }
 
+async function oneTakes(em: Em, { entry, working }: EntrySource, derived: EntryDerivation): Promise<Takes | null> {
+  const { work } = derived;
+  if (!work) return null;
+  if (working) return takesOf(derived, work.amount, working.lines);
+  return (await takesOfEntries(em, [{ entry: entry.id, amount: work.amount }])).get(entry.id) ?? null;
+}
+
 async function tallyOf(em: Em, source: EntrySource, derived: EntryDerivation, sums: EntryFigures, plural: ReadonlyMap<string, string>): Promise<TallyView> {
-  const { build, entry, costsShown } = source;
-  const takes = derived.work ? source.working ? takesOf(derived, derived.work.amount, source.working.lines) : await entryTakes(em, entry.id, derived.work.amount) : null;
+  const { build, costsShown } = source;
+  const takes = await oneTakes(em, source, derived);
   const buildUsed = await usedSoFar(em, source, sums);
   const people = new Set(derived.times.filter((time) => time.kind !== 'waiting').map((time) => time.handle ?? time.name)).size;
   return {
     currency: build.currency,
     ...(costsShown ? { money: {
-      day: sums.used + sums.wasted + sums.costs, used: sums.used, wasted: sums.wasted, costs: sums.costs, bought: sums.bought, buildUsed,
-      one: takes?.money ?? null, unsettled: sums.unsettled,
+      day: sums.used + sums.wasted + sums.costs, used: sums.used, wasted: sums.wasted, costs: sums.costs, bought: sums.bought,
+      buildUsed, buildUnsettled: sums.unsettled || (await unsettledBuilds(em, [build.id])).has(build.id),
+      one: takes?.money ?? null, oneUnsettled: takes?.unsettled ?? false, unsettled: sums.unsettled,
     } } : {}),
     minutes: sums.minutes, waiting: sums.waiting, people,
     work: derived.work ? { words: workWords(derived.work, plural), one: `One ${oneOfWork(derived.work)}` } : null,

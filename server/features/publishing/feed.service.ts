@@ -1,5 +1,6 @@
 import { createElement } from 'react';
 import { renderToStaticMarkup } from 'react-dom/server';
+import { formatDayLong } from '#domain/format.ts';
 import { FeedEntry } from '#src/blocks/views.ts';
 import { Entry, type Build } from '#server/entities/index.ts';
 import { materialFacts } from '#server/features/shelf/materials.service.ts';
@@ -46,6 +47,10 @@ export function wellFormed(text: string): string {
   return [...text.toWellFormed()].filter((letter) => allowedInXml(letter.codePointAt(0) ?? 0)).join('');
 }
 
+function daysInWords({ day, dayTo }: Pick<Entry, 'day' | 'dayTo'>): string {
+  return dayTo && dayTo !== day ? `${formatDayLong(day)} to ${formatDayLong(dayTo)}` : formatDayLong(day);
+}
+
 async function feedItem(em: Em, entry: Entry, publicUrl: string, materials: NonNullable<EntrySource['materials']>): Promise<FeedItem | null> {
   const build = entry.build;
   if (!entry.published || !entry.firstPublishedAt) return null;
@@ -55,7 +60,9 @@ async function feedItem(em: Em, entry: Entry, publicUrl: string, materials: NonN
   const src = cover ? pictures.get(cover.key)?.src : undefined;
   return {
     guid: `urn:uuid:${entry.guid}`, title: wellFormed(entry.title), url: `${publicUrl}${entryHref(build, entry)}`, lead: wellFormed(entry.published.lead),
-    html: wellFormed(renderToStaticMarkup(createElement(FeedEntry, { page: { lead: entry.published.lead, rows }, publicUrl }))),
+    html: wellFormed(renderToStaticMarkup(createElement(FeedEntry, {
+      page: { lead: entry.published.lead, rows }, build: { title: build.title, url: `${publicUrl}/builds/${build.slug}` }, days: daysInWords(entry), publicUrl,
+    }))),
     author: wellFormed(entry.author.name), published: entry.firstPublishedAt, modified: entry.editedAt ?? entry.firstPublishedAt,
     picture: src ? `${publicUrl}${src}` : null, tags: entry.stage ? [wellFormed(entry.stage.title)] : [],
   };

@@ -1,14 +1,14 @@
 import type { EntryCard } from '#contracts/builds.ts';
 import type { HomeView } from '#contracts/home.ts';
 import type { SlipView } from '#contracts/slip.ts';
-import { formatMinutes, formatMoney } from '#domain/format.ts';
+import { formatMinutes, formatMoneySoFar } from '#domain/format.ts';
+import { oneOfWork } from '#domain/work-words.ts';
 import { Entry } from '#server/entities/index.ts';
 import type { Em } from '#server/http/context.ts';
 import { countByKind, listedBuilds } from './builds-list.service.ts';
 import { entryCards, entryHref } from './entry-cards.service.ts';
 import { projectedEntry } from './entry-page.service.ts';
-import { entryTakes } from './takes.service.ts';
-import { oneOfWork } from './work-words.ts';
+import { takesOfEntries } from './takes.service.ts';
 
 const freshCount = 12;
 const takesCount = 6;
@@ -27,28 +27,30 @@ async function openingSlip(em: Em, entry: Entry): Promise<SlipView | null> {
   const { rows, derived } = await projectedEntry(em, { build, entry, document: entry.published, costsShown: build.costsShown, writes: false });
   const slip = rows.flatMap((row) => row.slips).find((one) => one.type === 'used')?.slip;
   if (!slip) return null;
-  const takes = derived.work && (await entryTakes(em, entry.id, derived.work.amount));
+  const takes = derived.work && (await takesOfEntries(em, [{ entry: entry.id, amount: derived.work.amount }])).get(entry.id);
   if (!derived.work || !takes) return slip;
-  const figures = [build.costsShown ? formatMoney(takes.money, build.currency) : '', takes.minutes > 0 ? formatMinutes(takes.minutes) : ''].filter(Boolean);
+  const figures = [build.costsShown ? formatMoneySoFar(takes.money, build.currency, takes.unsettled) : '', takes.minutes > 0 ? formatMinutes(takes.minutes) : ''].filter(Boolean);
   return figures.length > 0 ? { ...slip, footnote: undefined, sum: { label: `One ${oneOfWork(derived.work)} takes`, value: figures.join(', ') } } : slip;
 }
 
 async function latestTakes(em: Em, entries: readonly Entry[]): Promise<HomeView['takes']> {
+  const ones = await takesOfEntries(em, entries.flatMap(({ id, workKind, workAmount }) => (workKind && workAmount ? [{ entry: id, amount: workAmount }] : [])));
   const takes: HomeView['takes'] = [];
   const seen = new Set<number>();
   for (const entry of entries) {
-    if (takes.length === takesCount || !entry.workKind || !entry.workAmount || seen.has(entry.workKind.id)) continue;
-    const one = await entryTakes(em, entry.id, entry.workAmount);
+    const { build, workKind } = entry;
+    const one = ones.get(entry.id);
+    if (takes.length === takesCount || !workKind || !one || seen.has(workKind.id)) continue;
     // where costs are kept to the crew, that there was money says nothing either
-    const money = one && entry.build.costsShown ? one.money : null;
-    const minutes = one && one.minutes > 0 ? one.minutes : null;
+    const money = build.costsShown ? one.money : null;
+    const minutes = one.minutes > 0 ? one.minutes : null;
     if (!money && minutes === null) continue;
-    seen.add(entry.workKind.id);
+    seen.add(workKind.id);
     const unit = entry.workUnit ?? 'piece';
-    const words = oneOfWork({ unit, kind: entry.workKind.one });
+    const words = oneOfWork({ unit, kind: workKind.one });
     takes.push({
-      one: unit === 'piece' ? `${words.charAt(0).toUpperCase()}${words.slice(1)}` : words, href: entryHref(entry.build, entry), build: entry.build.title, currency: entry.build.currency,
-      money, minutes,
+      one: unit === 'piece' ? `${words.charAt(0).toUpperCase()}${words.slice(1)}` : words, href: entryHref(build, entry), build: build.title, currency: build.currency,
+      money, unsettled: money !== null && one.unsettled, minutes,
     });
   }
   return takes;

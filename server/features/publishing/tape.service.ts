@@ -14,7 +14,7 @@ export async function tapeOf(em: Em, build: Build, showsCosts: boolean): Promise
     const sums = figures.get(entry.id);
     return {
       day: entry.dayTo ?? entry.day, number: entry.number, title: entry.title, href: entryHref(build, entry), minutes: sums?.minutes ?? 0,
-      ...(showsCosts ? { money: (sums?.used ?? 0) + (sums?.wasted ?? 0) + (sums?.costs ?? 0) } : {}),
+      ...(showsCosts ? { money: (sums?.used ?? 0) + (sums?.wasted ?? 0) + (sums?.costs ?? 0), unsettled: sums?.unsettled ?? false } : {}),
     };
   });
   // a day of several weeks is begun before others and ends after them

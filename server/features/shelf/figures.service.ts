@@ -80,3 +80,37 @@ export async function usedOfBuilds(em: Em, buildIds: readonly number[]): Promise
   );
   return new Map(rows.map(({ build, used }) => [build, used]));
 }
+
+/** Builds with something used or wasted that is not bought yet, so that its money is still to come. */
+export async function unsettledBuilds(em: Em, buildIds: readonly number[]): Promise<ReadonlySet<number>> {
+  if (buildIds.length === 0) return new Set();
+  const rows = await em.execute<{ build: number }[]>(`select distinct build_id as build from movement where build_id in (${marks(buildIds)}) and short <> '0/1'`, [...buildIds]);
+  return new Set(rows.map(({ build }) => build));
+}
+
+/** Sums over the *for each* lines and times of an entry, of which what one takes is worked out. */
+export interface ForEachSums {
+  readonly money: number;
+  readonly minutes: number;
+  /** Some of it is not bought yet. */
+  readonly unsettled: boolean;
+}
+
+/** The sums of many entries in two queries; an entry without rows is absent. */
+export async function forEachOfEntries(em: Em, entryIds: readonly number[]): Promise<Map<number, ForEachSums>> {
+  const sums = new Map<number, ForEachSums>();
+  if (entryIds.length === 0) return sums;
+  const at = `(${marks(entryIds)})`;
+  const forEach = "kind = 'used' and ifnull(counts, 'each') = 'each'";
+  const queries = [
+    `select entry_id as entry, ${summed(forEach, 'value')} as money, max(${forEach} and short <> '0/1') as unsettled from movement where entry_id in ${at} group by entry_id`,
+    `select entry_id as entry, ${summed("kind = 'each'", 'minutes')} as minutes from time_line where entry_id in ${at} group by entry_id`,
+  ];
+  for (const query of queries) {
+    for (const { entry, money = 0, minutes = 0, unsettled = 0 } of await em.execute<{ entry: number; money?: number; minutes?: number; unsettled?: number }[]>(query, [...entryIds])) {
+      const before = sums.get(entry);
+      sums.set(entry, { money: money + (before?.money ?? 0), minutes: minutes + (before?.minutes ?? 0), unsettled: unsettled === 1 || before?.unsettled === true });
+    }
+  }
+  return sums;
+}

@@ -11,6 +11,8 @@ export interface StageFigures {
   readonly wasted: number;
   /** used + wasted of lines that count for each */
   readonly usedForEach: number;
+  /** Some of what was used or wasted is not bought yet. */
+  readonly unsettled: boolean;
   /** Hands on. */
   readonly minutes: number;
   /** Published entries. */
@@ -19,14 +21,14 @@ export interface StageFigures {
   readonly workDone: string | null;
 }
 
-const nothing: StageFigures = { used: 0, wasted: 0, usedForEach: 0, minutes: 0, days: 0, workDone: null };
+const nothing: StageFigures = { used: 0, wasted: 0, usedForEach: 0, unsettled: false, minutes: 0, days: 0, workDone: null };
 
-interface StageSums { stage: number | null; used: number; wasted: number; usedForEach: number; costs: number; minutes: number; days: number }
+interface StageSums { stage: number | null; used: number; wasted: number; usedForEach: number; unsettled: number; costs: number; minutes: number; days: number }
 
 function queriesOf(): string[] {
   const others = 'build_id = ? and ifnull(entry_id, 0) <> ?';
   return [
-    `select stage_id as stage, ${usedSum} as used, ${wastedSum} as wasted, ${summed("counts = 'each'", 'value')} as usedForEach from movement where ${others} and kind in ('used', 'wasted', 'counted') group by stage_id`,
+    `select stage_id as stage, ${usedSum} as used, ${wastedSum} as wasted, ${summed("counts = 'each'", 'value')} as usedForEach, max(short <> '0/1') as unsettled from movement where ${others} and kind in ('used', 'wasted', 'counted') group by stage_id`,
     `select stage_id as stage, sum(money) as costs from cost where ${others} group by stage_id`,
     `select stage_id as stage, ${summed("kind <> 'waiting'", 'minutes')} as minutes from time_line where ${others} group by stage_id`,
     `select stage_id as stage, count(*) as days from entry where build_id = ? and id <> ? and published is not null group by stage_id`,
@@ -56,9 +58,9 @@ export async function figuresOfStages(em: Em, build: Pick<Build, 'id'>, options:
   const without = options.without ?? 0;
   const figures = new Map<number | null, StageFigures>();
   for (const query of queriesOf()) {
-    for (const { stage = null, costs = 0, ...sums } of await em.execute<Partial<StageSums>[]>(query, [build.id, without])) {
+    for (const { stage = null, costs = 0, unsettled = 0, ...sums } of await em.execute<Partial<StageSums>[]>(query, [build.id, without])) {
       const before = figures.get(stage) ?? nothing;
-      figures.set(stage, { ...before, ...sums, used: (sums.used ?? before.used) + costs });
+      figures.set(stage, { ...before, ...sums, used: (sums.used ?? before.used) + costs, unsettled: before.unsettled || unsettled === 1 });
     }
   }
   for (const [stage, amount] of await workDone(em, build, without)) {

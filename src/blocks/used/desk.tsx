@@ -1,6 +1,6 @@
 import { useState } from 'react';
 import { exactFrom } from '#domain/quantity.ts';
-import { formatMoney, plural } from '#domain/format.ts';
+import { formatMoneySoFar, plural } from '#domain/format.ts';
 import { typedAmount } from '../amount-line.ts';
 import { useBench, useFigure } from '../bench.ts';
 import { BlockFrame, BlockSum, textButton } from '../block-frame.tsx';
@@ -20,7 +20,8 @@ function UsedDesk(props: BlockDeskProps<UsedData>) {
   const currency = bench.context.currency;
   const sumOf = (fate: UsedLine['fate']) => ({ lines: priced }: Figures) => data.lines.filter((line) => line.fate === fate).reduce((sum, line) => sum + (priced.get(`${id}:${line.id}`)?.value ?? 0), 0);
   const [usedSum, wastedSum] = [useFigure(sumOf('used')), useFigure(sumOf('wasted'))];
-  const short = useFigure(({ lines: priced }) => data.lines.some((line) => exactFrom(priced.get(`${id}:${line.id}`)?.short ?? '0/1').gt(0)));
+  const shortOf = (fate: UsedLine['fate']) => ({ lines: priced }: Figures) => data.lines.some((line) => line.fate === fate && exactFrom(priced.get(`${id}:${line.id}`)?.short ?? '0/1').gt(0));
+  const [usedShort, wastedShort] = [useFigure(shortOf('used')), useFigure(shortOf('wasted'))];
 
   const sameAsLastTime = async () => {
     setAsking(true);
@@ -48,9 +49,9 @@ function UsedDesk(props: BlockDeskProps<UsedData>) {
         {data.lines.map((line) => <UsedLineDesk key={line.id} block={id} line={line} lines={lines} />)}
       </ol>
       <button type="button" onClick={() => lines.add()} className={`${textButton} mt-2.5 text-base`}>Add a line</button>
-      <BlockSum label="Used" value={formatMoney(usedSum, currency)} />
-      {wastedSum > 0 && <p className="mt-1.5 flex justify-between gap-4 text-small text-ink-soft"><span>Wasted beside it</span><span>{formatMoney(wastedSum, currency)}</span></p>}
-      {short && <p className="mt-1.5 text-small text-ink-soft">Some of it is not bought yet: its cost comes in with the next receipt.</p>}
+      <BlockSum label="Used" value={formatMoneySoFar(usedSum, currency, usedShort)} />
+      {wastedSum > 0 && <p className="mt-1.5 flex justify-between gap-4 text-small text-ink-soft"><span>Wasted beside it</span><span>{formatMoneySoFar(wastedSum, currency, wastedShort)}</span></p>}
+      {(usedShort || wastedShort) && <p className="mt-1.5 text-small text-ink-soft">Some of it is not bought yet: its cost comes in with the next receipt.</p>}
     </BlockFrame>
   );
 }

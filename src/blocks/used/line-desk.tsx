@@ -12,7 +12,7 @@ import { NewMaterial } from '../new-material.tsx';
 import { TakeOutLine } from '../take-out-line.tsx';
 import { unitWordOf } from '../unit-choice.ts';
 import type { LineActions } from '../use-lines.ts';
-import type { UsedLine } from './used.ts';
+import { notBoughtYet, type UsedLine } from './used.ts';
 
 const fates = [{ value: 'used', label: 'Used' }, { value: 'wasted', label: 'Wasted' }];
 const places = [{ value: 'shelf', label: 'Off the shelf' }, { value: 'shed', label: 'From the shed' }];
@@ -60,6 +60,7 @@ export const UsedLineDesk = memo(function UsedLineDesk({ block, line, lines }: U
         <div className="[grid-area:amount]"><AmountInput block={block} line={line} onLine={change} onEnter={() => lines.goOn(line.id)} /></div>
         <p className={`text-small [grid-area:left] max-wide:text-right ${left.short ? 'font-semibold text-lead' : 'text-ink-soft'}`}>{left.words}</p>
         <p className="text-right [grid-area:money]">{value === undefined || (value === 0 && left.short) ? '' : formatMoney(value, bench.context.currency)}</p>
+        {left.short && <p className="col-span-full text-right text-small text-ink-soft">{notBoughtYet(reckoning?.estimate ?? null, bench.context.currency)}</p>}
       </div>
       {newName !== null && <NewMaterial key={newName} at={path('material')} name={newName} onAdded={pick} onLeave={() => setNewName(null)} />}
       <div className="mt-1 flex flex-wrap items-center gap-x-3.5 gap-y-1">

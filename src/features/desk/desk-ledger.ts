@@ -1,5 +1,6 @@
 import Fraction from 'fraction.js';
 import type { DeskView } from '#contracts/entries.ts';
+import { estimateOf } from '#domain/ledger/estimate.ts';
 import type { MaterialLedger } from '#domain/ledger/price.ts';
 import { whatOneTakes } from '#domain/one-takes.ts';
 import { exactFrom, exactText } from '#domain/quantity.ts';
@@ -21,6 +22,8 @@ export interface DayFigures {
   readonly bought: number;
   /** Lines not bought yet, or not all of it: their money is not settled. */
   readonly linesShort: number;
+  /** What those would cost at the last prices paid, as far as any is known; in no sum. */
+  readonly estimate: number | null;
   readonly minutes: number;
   readonly waiting: number;
   readonly people: number;
@@ -31,6 +34,8 @@ export interface OneTakesFigures {
   readonly unit: string;
   readonly money: number;
   readonly minutes: number;
+  /** Some of it is not bought yet. */
+  readonly unsettled: boolean;
 }
 
 export interface ShelfAfter {
@@ -61,16 +66,16 @@ export interface DeskLedger {
 const noughtText = '0/1';
 
 function lineReckonings(derived: EntryDerivation, ledgers: ReadonlyMap<string, MaterialLedger>): Map<string, LineReckoning> {
-  const priced = new Map([...ledgers.values()].flatMap(({ movements }) => movements.map((movement) => [movement.key, movement] as const)));
+  const priced = new Map([...ledgers.values()].flatMap(({ movements, lastPaid }) => movements.map((movement) => [movement.key, { ...movement, lastPaid }] as const)));
   const lines = new Map<string, LineReckoning>();
   for (const use of derived.uses) {
     const movement = priced.get(lineKey(use.block, use.line));
-    if (movement) lines.set(lineKey(use.block, use.line), { value: movement.value, short: exactText(movement.short), left: exactText(movement.left) });
+    if (movement) lines.set(lineKey(use.block, use.line), { value: movement.value, short: exactText(movement.short), estimate: estimateOf(movement.short, movement.lastPaid), left: exactText(movement.left) });
   }
   for (const receipt of derived.receipts) {
     for (const line of receipt.lines) {
       const movement = priced.get(lineKey(receipt.block, line.line));
-      lines.set(lineKey(receipt.block, line.line), { value: line.door, short: noughtText, left: movement ? exactText(movement.left) : null });
+      lines.set(lineKey(receipt.block, line.line), { value: line.door, short: noughtText, estimate: null, left: movement ? exactText(movement.left) : null });
     }
   }
   return lines;
@@ -86,14 +91,21 @@ function costsOf(derived: EntryDerivation): number {
   return sumOf(derived.costs.map(({ money }) => money)) + sumOf(straight);
 }
 
+function isShort(line: LineReckoning | undefined): boolean {
+  return line !== undefined && exactFrom(line.short).gt(0);
+}
+
 function figuresOf(derived: EntryDerivation, lines: ReadonlyMap<string, LineReckoning>): DayFigures {
   const valueOf = (kind: 'used' | 'wasted') => sumOf(derived.uses.filter((use) => use.kind === kind).map((use) => lines.get(lineKey(use.block, use.line))?.value ?? 0));
   const [used, wasted, costs] = [valueOf('used'), valueOf('wasted'), costsOf(derived)];
+  const short = derived.uses.map((use) => lines.get(lineKey(use.block, use.line))).filter(isShort);
+  const estimates = short.flatMap((line) => line?.estimate ?? []);
   const handsOn = derived.times.filter(({ kind }) => kind !== 'waiting');
   return {
     used, wasted, costs, day: used + wasted + costs,
     bought: sumOf(derived.receipts.map(broughtToBuild)),
-    linesShort: derived.uses.filter((use) => exactFrom(lines.get(lineKey(use.block, use.line))?.short ?? noughtText).gt(0)).length,
+    linesShort: short.length,
+    estimate: estimates.length === 0 ? null : sumOf(estimates),
     minutes: sumOf(handsOn.map(({ minutes }) => minutes)),
     waiting: sumOf(derived.times.filter(({ kind }) => kind === 'waiting').map(({ minutes }) => minutes)),
     people: new Set(handsOn.map(({ handle, name }) => handle ?? name.toLowerCase())).size,
@@ -106,7 +118,8 @@ function oneOf(derived: EntryDerivation, lines: ReadonlyMap<string, LineReckonin
     material: String(use.material), kind: use.kind, counts: use.counts, amount: exactFrom(use.amount), value: lines.get(lineKey(use.block, use.line))?.value ?? 0,
   }));
   const one = whatOneTakes({ work: new Fraction(exactFrom(derived.work.amount)), uses, times: derived.times });
-  return one && { kind: derived.work.kind, unit: derived.work.unit, money: one.money, minutes: one.minutes };
+  const unsettled = derived.uses.some((use) => use.kind === 'used' && use.counts === 'each' && isShort(lines.get(lineKey(use.block, use.line))));
+  return one && { kind: derived.work.kind, unit: derived.work.unit, money: one.money, minutes: one.minutes, unsettled };
 }
 
 function shelfAfter(ledgers: ReadonlyMap<string, MaterialLedger>): ShelfAfter[] {

@@ -1,6 +1,7 @@
 import type { DeskView } from '#contracts/entries.ts';
 import { finishAt } from '#domain/forecast.ts';
 import { exactFrom, exactText } from '#domain/quantity.ts';
+import { workKindName } from '#domain/work-words.ts';
 import { readAmountOfWork } from '#domain/work.ts';
 import type { EntryDerivation, EntryDocument } from '#src/blocks/pure.ts';
 import type { LineReckoning } from '#src/blocks/figures-store.ts';
@@ -26,7 +27,7 @@ type DeskStage = DeskView['stages'][number];
 function workHere(stage: DeskStage, derived: EntryDerivation): boolean {
   const { work } = derived;
   if (!work || stage.workUnit === null) return false;
-  return work.unit === stage.workUnit && (stage.workKind === null || stage.workKind.trim().toLowerCase() === work.kind);
+  return work.unit === stage.workUnit && (stage.workKind === null || workKindName(stage.workKind) === work.kind);
 }
 
 function usedForEach(derived: EntryDerivation, lines: ReadonlyMap<string, LineReckoning>): number {

@@ -1,7 +1,7 @@
-import { formatMinutes, formatMoney, plural } from '#domain/format.ts';
+import { formatMinutes, formatMoney, formatMoneySoFar, plural } from '#domain/format.ts';
+import { oneOfWork } from '#domain/work-words.ts';
 import type { TallyFact } from '#src/components/running-tally.tsx';
 import type { DeskReckoning } from './desk-ledger.ts';
-import { oneOfWork } from './work-words.ts';
 
 export interface TallyWords {
   figure: string;
@@ -30,13 +30,13 @@ export function tallyWords(reckoning: DeskReckoning, currency: string): TallyWor
   const { figures, one } = reckoning;
   const money = (minor: number) => formatMoney(minor, currency);
   const parts = [`${money(figures.used)} used`, figures.wasted > 0 ? `${money(figures.wasted)} wasted` : '', figures.costs > 0 ? `${money(figures.costs)} in costs` : ''].filter(Boolean);
-  const name = one && oneOfWork(one.unit, one.kind);
-  const takes = one && name ? [{ label: `One ${name} takes`, value: [money(one.money), one.minutes > 0 ? formatMinutes(one.minutes) : ''].filter(Boolean).join(', ') }] : [];
+  const name = one && oneOfWork(one);
+  const takes = one && name ? [{ label: `One ${name} takes`, value: [formatMoneySoFar(one.money, currency, one.unsettled), one.minutes > 0 ? formatMinutes(one.minutes) : ''].filter(Boolean).join(', ') }] : [];
   const bought = figures.bought > 0 ? [{ label: 'Bought, to the door', value: money(figures.bought) }] : [];
-  const short = figures.linesShort > 0 ? [{ label: 'Not bought yet', value: plural(figures.linesShort, 'line', 'lines') }] : [];
+  const short = figures.linesShort > 0 ? [{ label: 'Not bought yet', value: [plural(figures.linesShort, 'line', 'lines'), figures.estimate === null ? '' : `about ${money(figures.estimate)}`].filter(Boolean).join(', ') }] : [];
   return {
     figure: money(figures.day),
-    words: `this day: ${parts.join(', ')}`,
+    words: `this day: ${parts.join(', ')}${figures.linesShort > 0 ? '; some not bought yet' : ''}`,
     short: one && name ? `this day, one ${name} ${money(one.money)}` : 'this day',
     groups: [[...takes, ...stageFacts(reckoning, currency)], [...timeFacts(reckoning), ...bought, ...short]],
   };

@@ -2,7 +2,7 @@ import { controlClass, fieldId, FieldNotes } from '#src/components/field.tsx';
 import { useBench, useFault } from '#src/blocks/bench.ts';
 import { tall } from '#src/blocks/line-fields.tsx';
 import { workUnits, type WorkDone } from '#src/blocks/pure.ts';
-import { workUnitWords } from './work-words.ts';
+import { workUnitMenu } from './work-words.ts';
 
 interface WorkDoneFieldProps {
   work: WorkDone | null;
@@ -36,7 +36,7 @@ export function WorkDoneField({ work, kinds, onWork }: WorkDoneFieldProps) {
           id={fieldId('work.unit')} aria-label="Unit of the work" value={now.unit} onChange={(event) => change({ unit: workUnits.find((unit) => unit === event.target.value) ?? 'piece' })}
           className={`${control} select-control w-auto! pr-8`}
         >
-          {workUnits.map((unit) => <option key={unit} value={unit}>{workUnitWords[unit].menu}</option>)}
+          {workUnits.map((unit) => <option key={unit} value={unit}>{workUnitMenu[unit]}</option>)}
         </select>
         <input
           id={ids.kind} aria-label="Kind of work, one of it" aria-invalid={faults.kind ? true : undefined} aria-describedby={faults.kind ? `${ids.kind}-error` : undefined}

@@ -1,5 +1,5 @@
 import type { BuildPage, PlanRow } from '#contracts/builds.ts';
-import { formatMinutes, formatMoney } from '#domain/format.ts';
+import { formatMinutes, formatMoney, formatMoneySoFar } from '#domain/format.ts';
 import { DataTable } from '#src/components/data-table.tsx';
 import { Empty } from '#src/components/empty.tsx';
 import { PlanTable } from '#src/components/plan-table.tsx';
@@ -27,10 +27,10 @@ export function BuildPlan({ build }: { build: BuildPage }) {
       caption="Planned, used and finish at, by stage"
       rows={plan.map((row, index) => ({
         key: String(index), stage: row.stage, done: row.done,
-        planned: row.planned === null ? '' : money(row.planned), used: money(row.used + row.wasted),
+        planned: row.planned === null ? '' : money(row.planned), used: formatMoneySoFar(row.used + row.wasted, currency, row.unsettled),
         ...(row.finishAt === null ? {} : { finishAt: money(row.finishAt) }), bar: barOf(row, money),
       }))}
-      foot={{ label: 'Build', planned: money(sum(plan, (row) => row.planned)), used: money(sum(plan, (row) => row.used + row.wasted)), ...(known ? { finishAt: money(finish) } : {}) }}
+      foot={{ label: 'Build', planned: money(sum(plan, (row) => row.planned)), used: formatMoneySoFar(sum(plan, (row) => row.used + row.wasted), currency, plan.some((row) => row.unsettled)), ...(known ? { finishAt: money(finish) } : {}) }}
     />
   );
 }

@@ -1,5 +1,5 @@
 import type { TapeView } from '#contracts/tape.ts';
-import { formatMinutes, formatMoney } from '#domain/format.ts';
+import { formatMinutes, formatMoneySoFar } from '#domain/format.ts';
 import { Tape } from '#src/components/tape.tsx';
 
 export interface BuildTapeProps {
@@ -25,8 +25,8 @@ export function BuildTape({ title, tape, currency, hours, otherHref, current, si
       scale={scale}
       from={tape.from}
       to={tape.to}
-      bars={tape.days.map((day) => ({ day: day.day, amount: scale === 'hours' ? day.minutes : day.money ?? 0, label: day.title, href: day.href, current: day.number === current }))}
-      show={(amount) => (scale === 'hours' ? formatMinutes(amount) : formatMoney(amount, currency))}
+      bars={tape.days.map((day) => ({ day: day.day, amount: scale === 'hours' ? day.minutes : day.money ?? 0, label: day.title, href: day.href, unsettled: scale === 'money' && day.unsettled === true, current: day.number === current }))}
+      show={(amount, unsettled) => (scale === 'hours' ? formatMinutes(amount) : formatMoneySoFar(amount, currency, unsettled))}
       {...(withMoney ? { toggleHref: otherHref } : {})}
       {...(size ? { size } : {})}
     />

@@ -1,6 +1,6 @@
 import { Link, useLocation } from 'react-router-dom';
 import type { EntryPage, TallyView } from '#contracts/entry-view.ts';
-import { formatDayLong, formatMinutes, formatMoney } from '#domain/format.ts';
+import { formatDayLong, formatMinutes, formatMoney, formatMoneySoFar } from '#domain/format.ts';
 import { readerRuns } from '#src/blocks/views.ts';
 import { Byline } from '#src/components/byline.tsx';
 import { Chip } from '#src/components/chip.tsx';
@@ -33,11 +33,11 @@ function dayFacts(tally: TallyView): TallyFact[] {
 
 function oneFacts(tally: TallyView): TallyFact[] {
   const { money, work, currency } = tally;
-  const one = [money?.one != null ? formatMoney(money.one, currency) : '', tally.oneMinutes != null ? formatMinutes(tally.oneMinutes) : ''].filter(Boolean);
+  const one = [money?.one != null ? formatMoneySoFar(money.one, currency, money.oneUnsettled) : '', tally.oneMinutes != null ? formatMinutes(tally.oneMinutes) : ''].filter(Boolean);
   return [
     ...(work && one.length > 0 ? [{ label: `${work.one} takes`, value: one.join(', ') }] : []),
     ...(money && money.bought > 0 ? [{ label: 'Bought', value: formatMoney(money.bought, currency) }] : []),
-    ...(money ? [{ label: 'Build so far', value: `${formatMoney(money.buildUsed, currency)} used` }] : []),
+    ...(money ? [{ label: 'Build so far', value: `${formatMoney(money.buildUsed, currency)} used${money.buildUnsettled ? ', some not bought yet' : ''}` }] : []),
   ];
 }
 

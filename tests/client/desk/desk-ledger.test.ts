@@ -20,7 +20,7 @@ describe('figures while somebody types', () => {
     expect(exactFrom(left.get(resin.id) ?? '').equals(exactFrom(gallon).div(2))).toBe(true);
     expect(left.get(brushes.id)).toBe('7/1');
     // 30.33 over eight boards, half to even once: 3.79125
-    expect(reckoning.one).toEqual({ kind: 'board', unit: 'piece', money: 379, minutes: 0 });
+    expect(reckoning.one).toEqual({ kind: 'board', unit: 'piece', money: 379, minutes: 0, unsettled: false });
   });
 
   test('what is bought in the entry itself comes in before it is used, at its cost to the door', () => {
@@ -30,7 +30,7 @@ describe('figures while somebody types', () => {
         boughtNode('bought1', [{ id: 'lineB', material: oil.id, name: oil.name, amount: '2', unit: 'tin', money: '50.00' }]),
       ],
     }), byId);
-    expect(reckoning.lines.get('used1:lineA')).toEqual({ value: 1000, short: '0/1', left: '4000/1' });
+    expect(reckoning.lines.get('used1:lineA')).toEqual({ value: 1000, short: '0/1', estimate: null, left: '4000/1' });
     expect(reckoning.figures).toMatchObject({ used: 1000, bought: 5000, linesShort: 0 });
   });
 
@@ -53,7 +53,7 @@ describe('figures while somebody types', () => {
         usedNode('used1', [line('lineB', oil.id, '500', 'ml')]),
       ],
     }), byId);
-    expect(reckoning.lines.get('used1:lineB')).toEqual({ value: 0, short: '500/1', left: '0/1' });
+    expect(reckoning.lines.get('used1:lineB')).toEqual({ value: 0, short: '500/1', estimate: null, left: '0/1' });
     expect(reckoning.figures.linesShort).toBe(1);
   });
 
