@@ -164,11 +164,14 @@ describe('feeds', () => {
   test('stay well-formed with hostile titles and keep the guid through edits and renames', async () => {
     const slug = await build('Nasty ]]> & <b>feed</b>');
     const title = 'Tar ]]> & <script>alert(1)</script> \u202Bright to left';
-    const day = await costedDay(title);
+    const day = { ...(await costedDay(title)), lead: 'Steam <b>day</b>.' };
     const { number } = await signOff(slug, day);
     const read = async () => new Parser().parseString((await visitor.get(`/builds/${slug}/feed.xml`)).text);
     const before = await read();
     expect(before.items[0]?.title).toBe(title);
+    // a description is HTML to a feed reader: what the writer typed stands in it as letters
+    const { text } = await visitor.get(`/builds/${slug}/feed.xml`);
+    expect(text).toContain('<description><![CDATA[Steam &#60;b&#62;day&#60;/b&#62;.]]></description>');
     await signOff(slug, { ...day, title: 'Plain title' }, number);
     const after = await read();
     expect(after.items[0]?.title).toBe('Plain title');
