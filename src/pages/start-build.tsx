@@ -10,7 +10,7 @@ import { PageHead } from '#src/components/page-head.tsx';
 import { Panel } from '#src/components/panel.tsx';
 import { SectionHeading } from '#src/components/section-heading.tsx';
 import { SubmitButton } from '#src/components/submit-button.tsx';
-import { NamingFields, ReckoningFields, ShowingFields } from '#src/features/builds/build-fields.tsx';
+import { IdentityFields, NamingFields, ReckoningFields, ShowingFields } from '#src/features/builds/build-fields.tsx';
 import { buildInput } from '#src/features/builds/build-form.ts';
 import { formAction, useFormState } from '#src/lib/form-action.ts';
 import { Head } from '#src/lib/head.tsx';
@@ -44,7 +44,8 @@ export function Component() {
           <ErrorSummary errors={form.errors} attempt={form.attempt} />
           <div className="grid gap-6">
             <Panel><SectionHeading>What it is</SectionHeading><NamingFields form={form} /></Panel>
-            <Panel><SectionHeading>How it is reckoned</SectionHeading><ReckoningFields form={form} /></Panel>
+            <Panel><SectionHeading>Maker, model and numbers</SectionHeading><IdentityFields form={form} /></Panel>
+          <Panel><SectionHeading>How it is reckoned</SectionHeading><ReckoningFields form={form} /></Panel>
             <Panel><SectionHeading>Who sees it</SectionHeading><ShowingFields form={form} /></Panel>
             <div><SubmitButton pending={form.pending} pendingWord="Starting the build">Start the build</SubmitButton></div>
           </div>

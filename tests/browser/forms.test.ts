@@ -45,7 +45,7 @@ for (const scripts of [true, false]) {
     await page.goto('/builds/new');
     const lead = 'Bought at a farm sale, seized since the war.';
     await page.getByLabel(/^In a few sentences/).fill(lead);
-    await page.getByLabel('What it is', { exact: true }).selectOption({ label: 'Motorcycle' });
+    await page.getByLabel('Kind', { exact: true }).selectOption({ label: 'Motorcycle' });
     await page.getByLabel('Started on').fill('2026-03-14');
     await page.getByLabel('Currency').selectOption('USD');
     for (const choice of [/^US \(/, 'Moving average', /^Private/]) await page.getByLabel(choice).check();
@@ -53,7 +53,7 @@ for (const scripts of [true, false]) {
     expect(await sentBack(page, 'Start the build')).toContain('Give the build a name.');
     expect(await noteBeside(page, 'Name of the build')).toContain('Give the build a name.');
     expect(await page.getByLabel(/^In a few sentences/).inputValue()).toBe(lead);
-    expect(await page.getByLabel('What it is', { exact: true }).inputValue()).toBe('motorcycle');
+    expect(await page.getByLabel('Kind', { exact: true }).inputValue()).toBe('motorcycle');
     expect(await page.getByLabel('Started on').inputValue()).toBe('2026-03-14');
     expect(await page.getByLabel('Currency').inputValue()).toBe('USD');
     for (const choice of [/^US \(/, 'Moving average', /^Private/]) expect(await page.getByLabel(choice).isChecked(), String(choice)).toBe(true);

@@ -21,5 +21,13 @@ export async function tapeOf(em: Em, build: Build, showsCosts: boolean): Promise
   days.sort((a, b) => (a.day === b.day ? a.number - b.number : a.day < b.day ? -1 : 1));
   const first = days[0]?.day;
   const last = days.at(-1)?.day;
-  return { from: first && first < build.startedOn ? first : build.startedOn, to: last && last > build.startedOn ? last : build.startedOn, days };
+  const end = last && last > build.startedOn ? last : build.startedOn;
+  return { from: first && first < build.startedOn ? first : build.startedOn, to: daysLater(end, daysAfterTheLast), days };
+}
+
+/** Room for the last bar, which stands across its own day. */
+const daysAfterTheLast = 2;
+
+function daysLater(day: string, count: number): string {
+  return new Date(Date.parse(`${day}T00:00:00Z`) + count * 86_400_000).toISOString().slice(0, 10);
 }

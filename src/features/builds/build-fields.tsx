@@ -21,7 +21,7 @@ export function NamingFields({ form, build = {} }: FieldsProps) {
       <TextField name="title" label="Name of the build" hint="As you speak of it: Sandpiper, a 1972 touring caravan" required maxLength={100} defaultValue={form.value('title', build.title)} error={form.error('title')} />
       <TextArea name="lead" label="In a few sentences" optional hint="How it came to you and where you mean to take it. It opens the build's page." maxLength={600} defaultValue={form.value('lead', build.lead)} error={form.error('lead')} />
       <div className="grid gap-5 wide:grid-cols-2">
-        <SelectField name="kind" label="What it is" options={optionsOf(buildKinds, kindWords)} defaultValue={form.value('kind', build.kind ?? 'boat')} error={form.error('kind')} />
+        <SelectField name="kind" label="Kind" options={optionsOf(buildKinds, kindWords)} defaultValue={form.value('kind', build.kind ?? 'boat')} error={form.error('kind')} />
         <TextField name="startedOn" type="date" label="Started on" defaultValue={form.value('startedOn', build.startedOn)} error={form.error('startedOn')} />
       </div>
     </div>

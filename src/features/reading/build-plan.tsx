@@ -1,5 +1,6 @@
 import type { BuildPage, PlanRow } from '#contracts/builds.ts';
 import { formatMinutes, formatMoney, formatMoneySoFar } from '#domain/format.ts';
+import { ButtonLink } from '#src/components/button.tsx';
 import { DataTable } from '#src/components/data-table.tsx';
 import { Empty } from '#src/components/empty.tsx';
 import { PlanTable } from '#src/components/plan-table.tsx';
@@ -19,7 +20,7 @@ export function BuildPlan({ build }: { build: BuildPage }) {
   const { plan, currency } = build;
   const money = (minor: number) => formatMoney(minor, currency);
   if (!plan) return <StageHours build={build} />;
-  if (plan.length === 0) return <Empty title="No plan yet">Stages with what is planned for each stand here, beside what they took.</Empty>;
+  if (plan.length === 0) return <Empty title="No plan yet" action={build.may.settle ? <ButtonLink kind="quiet" to={`/builds/${build.slug}/plan`}>Plan the stages</ButtonLink> : null}>Stages with what is planned for each stand here, beside what they took.</Empty>;
   const known = plan.every((row) => row.finishAt !== null || (row.planned === null && row.used + row.wasted === 0));
   const finish = sum(plan, (row) => row.finishAt);
   return (

@@ -23,7 +23,7 @@ export const us = /^US \(/;
 export async function startBuild(page: Page, { title, kind, currency, measures }: BuildFacts): Promise<string> {
   await page.goto('/builds/new');
   await page.getByLabel('Name of the build').fill(title);
-  await page.getByLabel('What it is', { exact: true }).selectOption({ label: kind });
+  await page.getByLabel('Kind', { exact: true }).selectOption({ label: kind });
   await page.getByLabel('Currency').selectOption(currency);
   await page.getByLabel(measures).check();
   await page.getByRole('button', { name: 'Start the build' }).click();
