@@ -20,6 +20,6 @@ test.each(['999/1', '1/0'])('a figure of %s sent with a line that is not stocked
 // The exact text went beyond what a document may hold, so that the saved draft could not be opened again.
 test('an amount too fine to be kept is refused in words', () => {
   const text = '1234567 1/9999999999999999999999999999999999999999999 ft';
-  expect(readQuantity(text, { measures: 'us', dimension: 'length' })).toEqual({ ok: false, problem: 'That is finer than one line can hold: write a rounder figure.' });
+  expect(readQuantity(text, { measures: 'us', dimension: 'length' })).toEqual({ ok: false, problem: 'A fraction has 128 at most below the line: write a rounder figure, like 1/64.' });
   expect(readQuantity('1/3 ft', { measures: 'us', dimension: 'length' }).ok).toBe(true);
 });

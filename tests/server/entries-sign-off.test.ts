@@ -69,7 +69,7 @@ test('a material of somebody else, a stage of another build and a photo that is 
     .toMatchObject({ code: 'bad-input', fields: { 'used-teak.line-teak.material': expect.stringContaining('Teak') } });
   const em = shop.em();
   const there = await em.findOneOrFail(Build, { slug: theirs });
-  await putStages(em, there, [{ id: null, title: 'Deck', plannedMoney: '', plannedTime: '', plannedWork: '', workUnit: '', workKind: '', done: false }]);
+  await putStages(em, there, [{ id: null, title: 'Deck', plannedMoney: '', plannedTime: '', plannedWork: '', workUnit: 'piece' as const, workKind: '', done: false }]);
   const deck = await em.findOneOrFail(Stage, { build: there.id });
   expect(await outcomeOf(shop.signOff(owner, build, dayOf('2026-03-01', [], { stage: deck.id }), number))).toMatchObject({ fields: { stage: 'Pick a stage of this build.' } });
   const photos = { type: 'photos' as const, attrs: { id: 'photos-lost', version: 1, data: { photos: [{ id: 'photo-lost', picture: 'a-key-of-no-picture', caption: '', alt: '', cover: false }] } } };
@@ -163,7 +163,7 @@ test('the day it was first published and its guid stay; the edited date is of th
 test('stages add up what their published days used, the time and the work of their own kind', async () => {
   const em = shop.em();
   const of = await em.findOneOrFail(Build, { slug: build });
-  const stage = (title: string, work: string) => ({ id: null, title, plannedMoney: '110.00', plannedTime: '', plannedWork: work, workUnit: 'piece', workKind: work === '' ? '' : 'steamed rib', done: false });
+  const stage = (title: string, work: string) => ({ id: null, title, plannedMoney: '110.00', plannedTime: '', plannedWork: work, workUnit: 'piece' as const, workKind: work === '' ? '' : 'steamed rib', done: false });
   await putStages(em, of, [stage('Ribs', '24'), stage('Deck', '')]);
   const [ribs, deck] = await em.find(Stage, { build: of.id }, { orderBy: { position: 'asc' } });
   const oak = await shop.material(owner, build, 'Oak');
@@ -177,7 +177,7 @@ test('stages add up what their published days used, the time and the work of the
   const draft = await shop.start(owner, build, '2026-03-05');
   await shop.save(owner, build, draft, day('2026-03-05', '9', 'steamed rib', ribs?.id));
   const figures = await figuresOfStages(shop.em(), of);
-  expect(figures.get(ribs?.id ?? 0)).toEqual({ used: 3 * (300 + 300), wasted: 300, usedForEach: 900, minutes: 180, days: 3, workDone: '25/3' });
+  expect(figures.get(ribs?.id ?? 0)).toEqual({ unsettled: false, used: 3 * (300 + 300), wasted: 300, usedForEach: 900, minutes: 180, days: 3, workDone: '25/3' });
   expect(figures.get(deck?.id ?? 0)).toBeUndefined();
   expect(figures.get(null)).toMatchObject({ used: 0, days: 1, workDone: null });
   const desk = await readDeskOf(shop.em(), owner, build, one);
@@ -190,7 +190,7 @@ test('stages add up what their published days used, the time and the work of the
 test('same as last time: the lines of the day before, of the same stage where there is one, drafts included', async () => {
   const em = shop.em();
   const of = await em.findOneOrFail(Build, { slug: build });
-  await putStages(em, of, ['Ribs', 'Deck'].map((title) => ({ id: null, title, plannedMoney: '', plannedTime: '', plannedWork: '', workUnit: '', workKind: '', done: false })));
+  await putStages(em, of, ['Ribs', 'Deck'].map((title) => ({ id: null, title, plannedMoney: '', plannedTime: '', plannedWork: '', workUnit: 'piece' as const, workKind: '', done: false })));
   const [ribs, deck] = await em.find(Stage, { build: of.id }, { orderBy: { position: 'asc' } });
   const oak = await shop.material(owner, build, 'Oak');
   const day = (date: string, amount: string, stage: number | undefined) => dayOf(date, [usedBlock([{ of: oak, amount }]), timeBlock([{ time: amount === '1' ? '1 h' : '2 h' }])], { stage: stage ?? null, title: `Day ${amount}` });
