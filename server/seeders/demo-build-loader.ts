@@ -66,7 +66,7 @@ export class DemoBuildLoader {
     const build = await startRestoration(em, this.#writers[owner], { ...fields, serialNumber, standsNote, startedOn }, startedOn);
     for (const member of crew) await joinCrew(em, build, this.#writers[member].id);
     await replaceStages(em, this.#writers[owner], build.slug, stages.map(({ title, money, time, work, done = false }) => ({
-      id: null, title, plannedMoney: money, plannedTime: time, plannedWork: work?.amount ?? '', workUnit: work?.unit ?? '', workKind: work?.kind ?? '', done,
+      id: null, title, plannedMoney: money, plannedTime: time, plannedWork: work?.amount ?? '', workUnit: work?.unit ?? 'piece', workKind: work?.kind ?? '', done,
     })));
     const rows = await em.find(Stage, { build: build.id });
     this.#loaded = { slug: build.slug, stages: new Map(rows.map(({ id, title }) => [title, id])), materials: await this.#addMaterials(em, build.slug) };

@@ -1,4 +1,5 @@
 import { z } from 'zod';
+import { workUnits } from '#src/blocks/entry-document.ts';
 import { endpoint } from './endpoint.ts';
 import { currencyCode, minor, noBody, nothing, ok, personView, plainDay, slug } from './fields.ts';
 import { pictureView } from './pictures.ts';
@@ -38,6 +39,7 @@ export const startBuild = endpoint({
 export const readBuildSettings = endpoint({
   method: 'GET', path: '/api/builds/:build/settings', access: 'member', params: buildParams, query: nothing, body: noBody, reply: buildSettings,
 });
+/** A newer version standing there answers `newer-exists` with `newer: { version }`. */
 export const changeBuild = endpoint({
   method: 'PATCH', path: '/api/builds/:build/settings', access: 'member', params: buildParams, query: nothing,
   body: z.object(buildFields).partial().extend({ version: z.number().int() }), reply: z.object({ slug: z.string(), version: z.number().int() }),
@@ -59,16 +61,21 @@ export const stageView = z.object({
 export type StageView = z.output<typeof stageView>;
 export const readStages = endpoint({
   method: 'GET', path: '/api/builds/:build/stages', access: 'member', params: buildParams, query: nothing, body: noBody,
-  reply: z.object({ currency: z.string(), stages: z.array(stageView) }),
+  reply: z.object({
+    currency: z.string(), stages: z.array(stageView),
+    /** Of the list as it was read: a change of it says which it stands on. */
+    version: z.string(),
+  }),
 });
-/** The whole list in order: rows without an id are new, rows left out are taken away. Money and hours as typed. */
+/** The whole list in order: rows without an id are new, rows left out are taken away. Money and hours as typed. A newer list standing there answers `newer-exists` with `newer: { version }`. */
 export const changeStages = endpoint({
   method: 'PUT', path: '/api/builds/:build/stages', access: 'member', params: buildParams, query: nothing,
   body: z.object({
     stages: z.array(z.object({
       id: z.number().int().nullable(), title: text(60).min(1, 'Give the stage a name.'),
-      plannedMoney: text(20), plannedTime: text(20), plannedWork: text(20), workUnit: text(10), workKind: text(60), done: z.boolean(),
+      plannedMoney: text(20), plannedTime: text(20), plannedWork: text(20), workUnit: z.enum(workUnits, 'Pick what it is counted in.'), workKind: text(60), done: z.boolean(),
     })).max(60),
+    version: z.string().max(40),
   }),
   reply: ok,
 });

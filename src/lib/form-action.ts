@@ -6,6 +6,8 @@ export interface FormResult {
   readonly fields: FieldProblems;
   readonly message: string;
   readonly values: Readonly<Record<string, string>>;
+  /** With an answer that somebody changed it meanwhile: the version that stands there now. */
+  readonly newer?: string;
   /** New each time, so that the summary takes the focus again. */
   readonly attempt: number;
 }
@@ -28,6 +30,10 @@ export class SignedOutForm extends Error {
   }
 }
 
+function newerVersion({ newer }: AppError): { newer?: string } {
+  return typeof newer === 'object' && newer !== null && 'version' in newer ? { newer: String(newer.version) } : {};
+}
+
 /** Runs a form's case. Outcomes the person can mend come back beside their fields, with all that was typed. */
 export async function formAction(request: Request, run: (form: FormData) => Promise<Response>) {
   const form = await request.formData();
@@ -36,7 +42,7 @@ export async function formAction(request: Request, run: (form: FormData) => Prom
   } catch (error) {
     if (error instanceof AppError && error.code === 'sign-in-needed') throw new SignedOutForm(typedValues(form));
     if (!(error instanceof AppError) || error.code === 'not-found') throw error;
-    const result: FormResult = { fields: error.fields ?? {}, message: error.message, values: typedValues(form), attempt: Date.now() };
+    const result: FormResult = { fields: error.fields ?? {}, message: error.message, values: typedValues(form), attempt: Date.now(), ...newerVersion(error) };
     return data(result, { status: error.status });
   }
 }
@@ -49,6 +55,8 @@ export interface FormState {
   /** Whether a box is ticked: as sent, else as it was. */
   readonly ticked: (name: string, before: boolean) => boolean;
   readonly errors: { name?: string; message: string }[];
+  /** The version somebody else saved meanwhile, which this form may go over only when asked to. */
+  readonly newer: string | undefined;
   readonly attempt: number | undefined;
   readonly pending: boolean;
 }
@@ -68,9 +76,15 @@ export function useFormState(form?: string): FormState {
     value: (name, before = '') => result?.values[name] ?? before,
     ticked: (name, before) => (result ? result.values[name] !== undefined : before),
     errors: result && named.length === 0 ? [{ message: result.message }] : named,
+    newer: result?.newer,
     attempt: result?.attempt,
     pending: sent && navigation.state !== 'idle' && navigation.formMethod === 'POST',
   };
+}
+
+/** The version a form stands on: the one it was opened with, or the newer one its writer chose to go over. */
+export function versionOf(form: FormData): string {
+  return textOf(form, 'over') || textOf(form, 'version');
 }
 
 /** A text of a form, trimmed; empty where it was not sent. */

@@ -12,7 +12,8 @@ import { SectionHeading } from '#src/components/section-heading.tsx';
 import { SubmitButton } from '#src/components/submit-button.tsx';
 import { IdentityFields, NamingFields, ReckoningFields, ShowingFields, StandsFields } from '#src/features/builds/build-fields.tsx';
 import { buildInput } from '#src/features/builds/build-form.ts';
-import { formAction, textOf, useFormState } from '#src/lib/form-action.ts';
+import { VersionField } from '#src/features/builds/version-field.tsx';
+import { formAction, textOf, useFormState, versionOf } from '#src/lib/form-action.ts';
 import { Head } from '#src/lib/head.tsx';
 import { call } from '#src/lib/transport.ts';
 import { buildSettingsQuery } from '#src/queries/builds.ts';
@@ -32,7 +33,7 @@ export function makeAction(client: QueryClient) {
       await client.invalidateQueries();
       return redirect(`/builds/${build}/settings`);
     }
-    const { slug } = await call<typeof changeBuild>(client, 'PATCH', '/api/builds/:build/settings', { params: { build }, body: { ...buildInput(form), version: Number(textOf(form, 'version')) } });
+    const { slug } = await call<typeof changeBuild>(client, 'PATCH', '/api/builds/:build/settings', { params: { build }, body: { ...buildInput(form), version: Number(versionOf(form)) } });
     // what this page shows stands at the old address, if the build was renamed: nothing is asked for there again
     await client.invalidateQueries({ refetchType: 'none' });
     return redirect(`/builds/${slug}`);
@@ -49,7 +50,7 @@ export function Component() {
       <PageColumns aside={<><BuildPlaces build={data} /><PutAway build={data} /></>}>
         <Form method="post" noValidate>
           <ErrorSummary errors={form.errors} attempt={form.attempt} />
-          <input type="hidden" name="version" value={data.version} />
+          <VersionField form={form} version={String(data.version)} />
           <div className="grid gap-6">
             <Panel><SectionHeading>What it is</SectionHeading><NamingFields form={form} build={data} /></Panel>
             <Panel><SectionHeading>Where it stands</SectionHeading><StandsFields form={form} build={data} /></Panel>

@@ -58,7 +58,7 @@ test('a preview counts itself in what the build used so far, in place of what is
 
 test('thirds in a plan come back in words that the plan can be kept with', async () => {
   const build = await shop.build(owner, { title: 'Thirds' });
-  const stage = { id: null, title: 'Seams', plannedMoney: '', plannedTime: '', plannedWork: '4 1/3', workUnit: 'm', workKind: 'seam caulked', done: false };
+  const stage = { id: null, title: 'Seams', plannedMoney: '', plannedTime: '', plannedWork: '4 1/3', workUnit: 'm' as const, workKind: 'seam caulked', done: false };
   await replaceStages(shop.em(), owner, build, [stage]);
   const [kept] = (await listStages(shop.em(), owner, build)).stages;
   expect(kept?.plannedWork).toBe('4 1/3');
@@ -67,7 +67,7 @@ test('thirds in a plan come back in words that the plan can be kept with', async
 
 test('a stage is used once a day stands in it, and by nothing of another stage', async () => {
   const build = await shop.build(owner, { title: 'Used stages' });
-  const blank = { id: null, plannedMoney: '', plannedTime: '', plannedWork: '', workUnit: '', workKind: '', done: false };
+  const blank = { id: null, plannedMoney: '', plannedTime: '', plannedWork: '', workUnit: 'piece' as const, workKind: '', done: false };
   await replaceStages(shop.em(), owner, build, [{ ...blank, title: 'Ribs' }, { ...blank, title: 'Planks' }]);
   const [ribs] = (await listStages(shop.em(), owner, build)).stages;
   await shop.signOff(owner, build, dayOf('2026-03-01', [], { stage: ribs?.id ?? null }));

@@ -50,7 +50,7 @@ async function saidEverywhere(build: string, number: number) {
 
 test('every figure that stands without what is not bought yet says so, and no longer once it is bought', async () => {
   const build = await shop.build(owner, { title: 'Short of nails' });
-  await replaceStages(shop.em(), owner, build, [{ id: null, title: 'Planking', plannedMoney: '', plannedTime: '', plannedWork: '', workUnit: '', workKind: '', done: false }]);
+  await replaceStages(shop.em(), owner, build, [{ id: null, title: 'Planking', plannedMoney: '', plannedTime: '', plannedWork: '', workUnit: 'piece' as const, workKind: '', done: false }]);
   const [planking] = (await listStages(shop.em(), owner, build)).stages;
   const nails = await shop.material(owner, build, 'Nails');
   const facts = { stage: planking?.id ?? null, work: { amount: '2', unit: 'piece', kind: 'plank hung' } } as const;

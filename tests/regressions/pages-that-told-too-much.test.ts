@@ -18,7 +18,7 @@ beforeAll(async () => {
 });
 afterAll(() => shop.close());
 
-const noStage = { id: null, plannedMoney: '', plannedTime: '', plannedWork: '', workUnit: '', workKind: '', done: false };
+const noStage = { id: null, plannedMoney: '', plannedTime: '', plannedWork: '', workUnit: 'piece' as const, workKind: '', done: false };
 
 async function keepCosts(slug: string): Promise<void> {
   const { version } = await readSettings(shop.em(), owner, slug);

@@ -23,7 +23,8 @@ async function signedOff(slug: string, document: EntryDocument): Promise<void> {
   const { entry } = await owner.ask(readDesk, { params: { build: slug, number } });
   await owner.ask(signOffEntry, { params: { build: slug, number }, body: { version: entry.version, document } });
 }
-const blankStage = { id: null, title: '', plannedMoney: '', plannedTime: '', plannedWork: '', workUnit: 'piece', workKind: '', done: false };
+const blankStage = { id: null, title: '', plannedMoney: '', plannedTime: '', plannedWork: '', workUnit: 'piece' as const, workKind: '', done: false };
+const planVersion = async (slug: string) => (await owner.ask(readStages, { params: { build: slug } })).version;
 
 describe('a build', () => {
   test('says beside each field what needs mending, all at once', async () => {
@@ -64,7 +65,7 @@ describe('a build', () => {
     const hidden = await start('Settled in private', { visibility: 'private' });
     expect((await other.call(changeBuild, { params: { build: slug }, body: { lead: 'Mine now.', version: 1 } })).status).toBe(403);
     expect((await other.call(readBuildSettings, { params: { build: hidden.slug } })).status).toBe(404);
-    expect((await other.call(changeStages, { params: { build: slug }, body: { stages: [] } })).status).toBe(403);
+    expect((await other.call(changeStages, { params: { build: slug }, body: { stages: [], version: '' } })).status).toBe(403);
     for (const endpoint of [readBuildSettings, readStages] as const) expect((await other.call(endpoint, { params: { build: slug } })).status).toBe(404);
     expect((await other.ask(readMyBuilds)).builds).toEqual([]);
   });
@@ -77,18 +78,18 @@ describe('stages', () => {
       { ...blankStage, title: 'Ribs', plannedMoney: '£110.00', plannedTime: '30 h', plannedWork: '24', workKind: 'steamed rib' },
       { ...blankStage, title: 'Planking', plannedMoney: '1,180', plannedTime: '7 h 30 min' },
     ];
-    await owner.ask(changeStages, { params: { build: slug }, body: { stages } });
+    await owner.ask(changeStages, { params: { build: slug }, body: { stages, version: await planVersion(slug) } });
     const { stages: kept } = await owner.ask(readStages, { params: { build: slug } });
     expect(kept.map(({ title, plannedMoney, plannedMinutes, plannedWork, workKind }) => [title, plannedMoney, plannedMinutes, plannedWork, workKind])).toEqual([
       ['Ribs', 11_000, 1800, '24', 'steamed rib'], ['Planking', 118_000, 450, null, null],
     ]);
-    await owner.ask(changeStages, { params: { build: slug }, body: { stages: kept.toReversed().map((stage, index) => ({ ...blankStage, ...stages[1 - index], id: stage.id })) } });
+    await owner.ask(changeStages, { params: { build: slug }, body: { stages: kept.toReversed().map((stage, index) => ({ ...blankStage, ...stages[1 - index], id: stage.id })), version: await planVersion(slug) } });
     expect((await owner.ask(readStages, { params: { build: slug } })).stages.map(({ title }) => title)).toEqual(['Planking', 'Ribs']);
   });
 
   test('with a fault change nothing, and say which field of which stage', async () => {
     const { slug } = await start('Faulty plan');
-    const outcome = await owner.call(changeStages, { params: { build: slug }, body: { stages: [{ ...blankStage, title: 'Ribs' }, { ...blankStage, title: 'Planking', plannedMoney: '1,5', plannedTime: 'a while', plannedWork: '3' }] } });
+    const outcome = await owner.call(changeStages, { params: { build: slug }, body: { stages: [{ ...blankStage, title: 'Ribs' }, { ...blankStage, title: 'Planking', plannedMoney: '1,5', plannedTime: 'a while', plannedWork: '3' }], version: await planVersion(slug) } });
     expect(outcome).toMatchObject({ ok: false, status: 422, problem: { fields: {
       'stages.1.plannedMoney': 'Write 1.5 with a point.', 'stages.1.plannedTime': expect.any(String) as string, 'stages.1.workKind': expect.any(String) as string,
     } } });
@@ -97,10 +98,10 @@ describe('stages', () => {
 
   test('that hold days stay when they are left out', async () => {
     const { slug } = await start('Kept stage');
-    await owner.ask(changeStages, { params: { build: slug }, body: { stages: [{ ...blankStage, title: 'Ribs' }] } });
+    await owner.ask(changeStages, { params: { build: slug }, body: { stages: [{ ...blankStage, title: 'Ribs' }], version: await planVersion(slug) } });
     const [stage] = (await owner.ask(readStages, { params: { build: slug } })).stages;
     await signedOff(slug, dayOf('2026-06-14', [], { stage: stage?.id ?? null }));
-    expect(await owner.call(changeStages, { params: { build: slug }, body: { stages: [] } })).toMatchObject({ ok: false, status: 409, problem: { code: 'in-use' } });
+    expect(await owner.call(changeStages, { params: { build: slug }, body: { stages: [], version: await planVersion(slug) } })).toMatchObject({ ok: false, status: 409, problem: { code: 'in-use' } });
     expect((await owner.ask(readStages, { params: { build: slug } })).stages).toHaveLength(1);
   });
 });

@@ -18,7 +18,7 @@ export function buildRoutes(table: EndpointTable): void {
   });
   handle(table, readStages, async ({ em, viewer }, { params }) => listStages(em, viewer, params.build));
   handle(table, changeStages, async ({ em, viewer }, { params, body }) => {
-    await replaceStages(em, viewer, params.build, body.stages);
+    await replaceStages(em, viewer, params.build, body.stages, body.version);
     return done;
   });
   handle(table, readMyBuilds, async ({ em, viewer }) => ({ builds: await listMyBuilds(em, viewer) }));

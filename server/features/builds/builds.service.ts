@@ -57,7 +57,9 @@ export async function changeSettings(em: Em, caller: Caller, slug: string, input
   return em.transactional(async (inner) => {
     const build = await requireOwnBuild(inner, caller, slug);
     const { version, method, ...changes } = input;
-    if (build.version !== version) throw new AppError('newer-exists', 'Somebody changed these settings since you opened them. Look at them again, then save.');
+    if (build.version !== version) {
+      throw new AppError('newer-exists', 'Somebody changed these settings since you opened them. Look at them as they are now, then say whose to keep.', undefined, { version: build.version });
+    }
     if (changes.currency !== undefined && changes.currency !== build.currency && (await moneyWritten(inner, build))) {
       throw new AppError('bad-input', 'Some of this needs mending.', { currency: `Money is already written down in ${build.currency}, so the currency stays.` });
     }

@@ -1,3 +1,4 @@
+import { createHash } from 'node:crypto';
 import type { changeStages, StageView } from '#contracts/builds.ts';
 import type { ParsedOf } from '#contracts/endpoint.ts';
 import { AppError } from '#contracts/errors.ts';
@@ -20,12 +21,22 @@ async function usedStages(em: Em, build: Build): Promise<Set<number>> {
   return new Set(rows.map(({ id }) => id));
 }
 
-export async function listStages(em: Em, caller: Caller, slug: string): Promise<{ currency: string; stages: StageView[] }> {
+/** Tells one list of stages from another. */
+function versionOf(stages: readonly Stage[]): string {
+  const told = stages.map(({ id, title, position, plannedMoney, plannedMinutes, plannedWork, workUnit, workKind, done }) => [
+    id, title, position, plannedMoney ?? null, plannedMinutes ?? null, plannedWork ?? null, workUnit ?? null, workKind?.id ?? null, done,
+  ]);
+  return createHash('sha256').update(JSON.stringify(told)).digest('base64url').slice(0, 20);
+}
+
+const inOrder = { orderBy: { position: 'asc', id: 'asc' }, populate: ['workKind'] } as const;
+
+export async function listStages(em: Em, caller: Caller, slug: string): Promise<{ currency: string; stages: StageView[]; version: string }> {
   const build = await requireCrewBuild(em, caller, slug);
   const used = await usedStages(em, build);
-  const stages = await em.find(Stage, { build: build.id }, { orderBy: { position: 'asc', id: 'asc' }, populate: ['workKind'] });
+  const stages = await em.find(Stage, { build: build.id }, inOrder);
   return {
-    currency: build.currency,
+    currency: build.currency, version: versionOf(stages),
     stages: stages.map((stage) => ({
       id: stage.id, title: stage.title, plannedMoney: stage.plannedMoney ?? null, plannedMinutes: stage.plannedMinutes ?? null,
       plannedWork: stage.plannedWork ? exactFigure(exactFrom(stage.plannedWork)) : null, workUnit: stage.workUnit ?? null,
@@ -49,10 +60,18 @@ function plannedFigures(input: StageInput, index: number, currency: string, fiel
   return { plannedMoney: money?.minor ?? null, plannedMinutes: read('plannedTime', input.plannedTime, readMinutes(input.plannedTime)), plannedWork: work };
 }
 
-/** Puts the whole list in place, in order. A stage that entries stand in stays. */
-export async function replaceStages(em: Em, caller: Caller, slug: string, inputs: readonly StageInput[]): Promise<void> {
+/**
+ * Puts the whole list in place, in order. A stage that entries stand in stays.
+ * @param version of the list it was made from; nothing for one that was made from none
+ * @throws AppError `newer-exists`, with the version of now, when the list was changed since
+ */
+export async function replaceStages(em: Em, caller: Caller, slug: string, inputs: readonly StageInput[], version?: string): Promise<void> {
   await em.transactional(async (inner) => {
     const build = await requireOwnBuild(inner, caller, slug);
+    const standing = versionOf(await inner.find(Stage, { build: build.id }, inOrder));
+    if (version !== undefined && version !== standing) {
+      throw new AppError('newer-exists', 'Somebody changed this plan since you opened it. Look at it as it is now, then say whose to keep.', undefined, { version: standing });
+    }
     await putStages(inner, build, inputs);
   });
 }
@@ -76,7 +95,7 @@ export async function putStages(em: Em, build: Build, inputs: readonly StageInpu
     const figures = planned[position];
     if (!figures) continue;
     const workKind = input.workKind === '' ? null : await workKindNamed(em, input.workKind);
-    const values = { title: input.title, position, ...figures, workUnit: figures.plannedWork ? input.workUnit || 'piece' : null, workKind, done: input.done };
+    const values = { title: input.title, position, ...figures, workUnit: figures.plannedWork ? input.workUnit : null, workKind, done: input.done };
     const stage = input.id === null ? undefined : existing.get(input.id);
     if (stage) Object.assign(stage, values);
     else em.persist(em.create(Stage, { build, ...values }));

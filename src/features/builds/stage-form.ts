@@ -21,6 +21,11 @@ export function stageCount(form: FormData): number {
   return rowsNamed(textOf(form, 'count'));
 }
 
+/** The contract checks what was sent; a form without the field counts pieces. */
+function unitSent(text: string): StageInput['workUnit'] {
+  return (text || 'piece') as StageInput['workUnit'];
+}
+
 /** Stages as sent, in the order asked for. Empty rows and rows ticked to be taken out are left out. */
 export function stageInputs(form: FormData): StageInput[] {
   const rows = Array.from({ length: stageCount(form) }, (_, index) => {
@@ -30,7 +35,7 @@ export function stageInputs(form: FormData): StageInput[] {
       order: Number(field('order')) || index + 1, gone: form.has(`stages.${index}.gone`),
       stage: {
         id: id === '' ? null : Number(id), title: field('title'), plannedMoney: field('plannedMoney'), plannedTime: field('plannedTime'),
-        plannedWork: field('plannedWork'), workUnit: field('workUnit'), workKind: field('workKind'), done: form.has(`stages.${index}.done`),
+        plannedWork: field('plannedWork'), workUnit: unitSent(field('workUnit')), workKind: field('workKind'), done: form.has(`stages.${index}.done`),
       },
     };
   });
