@@ -102,7 +102,7 @@ function DayRow({ entry }: { entry: EntryCard }) {
       title={entry.title}
       picture={entry.picture ? pictureData(entry.picture) : null}
       kicker={{ items: [formatDayShort(entry.dayTo ?? entry.day), ...(entry.stage ? [entry.stage] : [])] }}
-      small={entry.photos > 0 ? plural(entry.photos, 'photo', 'photos') : entry.lead}
+      small={[entry.photos > 0 ? plural(entry.photos, 'photo', 'photos') : entry.lead, ...(entry.unsettled ? ['some not bought yet'] : [])].join(', ')}
       money={entry.money === undefined ? null : formatMoney(entry.money, entry.currency)}
       hours={entry.minutes > 0 ? formatHours(entry.minutes) : null}
     />

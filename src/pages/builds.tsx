@@ -68,7 +68,7 @@ function Row({ build }: { build: BuildCard }) {
       picture={build.picture ? pictureData(build.picture) : null}
       facts={facts}
       figures={[
-        ...(build.used ? [`${formatMoney(build.used.minor, build.used.currency)} used`] : []),
+        ...(build.used ? [`${formatMoney(build.used.minor, build.used.currency)} used${build.used.unsettled ? ', some not bought yet' : ''}`] : []),
         `${plural(build.days, 'day', 'days')} written up`,
         ...(build.lastDay ? [`last on ${formatDayShort(build.lastDay)}`] : []),
       ]}

@@ -39,7 +39,7 @@ function FreshRow({ entry }: { entry: EntryCard }) {
       title={entry.title}
       picture={entry.picture ? pictureData(entry.picture) : null}
       kicker={{ lead: { label: entry.build.title, to: `/builds/${entry.build.slug}` }, items: [formatDayShort(entry.dayTo ?? entry.day)] }}
-      small={entry.lead}
+      small={entry.unsettled ? <>{entry.lead} <span className="text-lead">Some of it is not bought yet.</span></> : entry.lead}
       money={entry.money === undefined ? null : formatMoney(entry.money, entry.currency)}
       hours={entry.minutes > 0 ? formatHours(entry.minutes) : null}
     />
@@ -92,8 +92,8 @@ function HomeAside({ home }: { home: HomeView }) {
             rows={home.takes.map((take) => ({
               key: take.href,
               cells: [
-                <><Link to={take.href}>{take.one}</Link><span className="block text-note text-ink-soft">{take.build}</span></>,
-                take.money === null ? '' : formatMoney(take.money, take.currency),
+                <><Link to={take.href}>{take.one}</Link><span className="block text-note text-ink-soft">{take.unsettled ? `${take.build}, some not bought yet` : take.build}</span></>,
+                take.money === null || take.money === 0 ? '' : formatMoney(take.money, take.currency),
                 take.minutes === null ? '' : formatMinutes(take.minutes),
               ],
             }))}

@@ -33,7 +33,7 @@ function dayFacts(tally: TallyView): TallyFact[] {
 
 function oneFacts(tally: TallyView): TallyFact[] {
   const { money, work, currency } = tally;
-  const one = [money?.one != null ? formatMoneySoFar(money.one, currency, money.oneUnsettled) : '', tally.oneMinutes != null ? formatMinutes(tally.oneMinutes).replaceAll(' ', '\u00a0') : ''].filter(Boolean);
+  const one = [money?.one != null && money.one > 0 ? formatMoneySoFar(money.one, currency, money.oneUnsettled) : '', tally.oneMinutes != null ? formatMinutes(tally.oneMinutes).replaceAll(' ', '\u00a0') : ''].filter(Boolean);
   return [
     ...(work && one.length > 0 ? [{ label: `${work.one} takes`, value: one.join(', ') }] : []),
     ...(money && money.bought > 0 ? [{ label: 'Bought', value: formatMoney(money.bought, currency) }] : []),
