@@ -1,6 +1,6 @@
 import type { BrowserContext, Page } from 'playwright-core';
 import { expect, inject } from 'vitest';
-import { deskIsOpen, expectKept, expectWords, leadField, tally, titleField, wordsField, PATIENCE } from './support/desk-hand.ts';
+import { amountOf, deskIsOpen, expectKept, expectWords, leadField, lineOf, putIn, tally, titleField, wordsField, PATIENCE } from './support/desk-hand.ts';
 import { openDraft } from './support/draft.ts';
 import { journey } from './support/journey.ts';
 import { signIn } from './support/sign-in.ts';
@@ -114,4 +114,41 @@ journey('a connection lost while typing loses nothing, even when the tab is clos
   await expectWords(wordsField(again), 'The planer took two passes.');
   await expectKept(again);
   await expect.poll(async () => (await openedDesk(context, desk)).getByRole('status').filter({ hasText: 'taken up again' }).count(), PATIENCE).toBe(0);
+});
+
+journey('a press on the blank of a block, then a letter, a paste or Backspace: the block stays as it was', async ({ open }) => {
+  const { page } = await open();
+  await signIn(page, 'restorer');
+  const desk = await openDraft(page, 'Pressed beside');
+  await wordsField(page).pressSequentially('Before it. ');
+  const used = await putIn(page, 'Used');
+  await amountOf(await lineOf(used, 0)).fill('3 pints');
+  const pressBlank = () => used.getByRole('list').click({ position: { x: 2, y: 2 } });
+  await pressBlank();
+  await page.keyboard.press('Backspace');
+  await page.keyboard.type('xyz');
+  await pressBlank();
+  await page.keyboard.press('Delete');
+  await used.evaluate((block) => {
+    const clipboardData = new DataTransfer();
+    clipboardData.setData('text/plain', 'pasted');
+    block.dispatchEvent(new ClipboardEvent('paste', { clipboardData, bubbles: true, cancelable: true }));
+  });
+  await expectKept(page);
+  const after = await openedDesk(page.context(), desk);
+  expect(await amountOf(after.getByRole('group', { name: 'Used', exact: true })).inputValue()).toBe('3 pints');
+  await expectWords(wordsField(after), 'Before it.', 'xyz', 'pasted');
+});
+
+journey('a block taken out is back with Ctrl+Z', async ({ open }) => {
+  const { page } = await open();
+  await signIn(page, 'restorer');
+  await openDraft(page, 'Taken out');
+  const used = await putIn(page, 'Used');
+  await amountOf(await lineOf(used, 0)).fill('3 pints');
+  await used.getByRole('button', { name: 'Take out', exact: true }).click();
+  await used.waitFor({ state: 'detached' });
+  await page.keyboard.press('Control+z');
+  await used.waitFor();
+  expect(await amountOf(used).inputValue()).toBe('3 pints');
 });

@@ -1,6 +1,8 @@
 import type { Editor, JSONContent } from '@tiptap/core';
 import type { Node } from '@tiptap/pm/model';
+import { closeHistory } from '@tiptap/pm/history';
 import { TextSelection } from '@tiptap/pm/state';
+import { toParagraphAt } from './keeps-blocks.ts';
 
 interface Placed { node: Node; index: number; pos: number }
 
@@ -49,10 +51,18 @@ export function moveBlock(editor: Editor, id: string, by: -1 | 1): void {
   });
 }
 
-/** Taken out at once; the desk sees it go and offers to put it back. */
+/** Taken out at once, as one step back; the desk sees it go and offers to put it back. */
 export function takeOutBlock(editor: Editor, id: string): void {
   const placed = find(editor.state.doc, id);
-  if (placed) editor.view.dispatch(editor.state.tr.delete(placed.pos, placed.pos + placed.node.nodeSize));
+  if (placed) editor.view.dispatch(closeHistory(editor.state.tr).delete(placed.pos, placed.pos + placed.node.nodeSize));
+}
+
+/** Leads the cursor to an empty paragraph after a block. */
+export function writeAfterBlock(editor: Editor, id: string): void {
+  const placed = find(editor.state.doc, id);
+  if (!placed) return;
+  editor.view.dispatch(toParagraphAt(editor.state.tr, placed.pos + placed.node.nodeSize));
+  editor.view.focus();
 }
 
 export function positionOfIndex(doc: Node, index: number): number {

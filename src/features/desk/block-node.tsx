@@ -1,15 +1,39 @@
-import { mergeAttributes, Node } from '@tiptap/core';
+import { mergeAttributes, Node, type Editor } from '@tiptap/core';
 import { NodeViewWrapper, ReactNodeViewRenderer, useEditorState, type ReactNodeViewProps } from '@tiptap/react';
 import { fieldId } from '#src/components/field.tsx';
 import { BlockHandleProvider } from '#src/blocks/block-frame.tsx';
 import type { DeskBlock } from '#src/blocks/desk-block.ts';
 import { deskBlocks } from '#src/blocks/desk.ts';
 import { blockTypes, pureBlocks, type BlockType } from '#src/blocks/pure.ts';
-import { changeBlock, moveBlock, placeOfBlock, takeOutBlock } from './block-commands.ts';
+import type { ClipboardEvent, KeyboardEvent } from 'react';
+import { changeBlock, moveBlock, placeOfBlock, takeOutBlock, writeAfterBlock } from './block-commands.ts';
 
 // One type's data always meets its own desk, which an index type cannot say.
 export function deskBlockOf(type: string): DeskBlock<unknown> | undefined {
   return type in deskBlocks ? (deskBlocks[type as BlockType] as unknown as DeskBlock<unknown>) : undefined;
+}
+
+const controls = 'input, button, select, textarea, summary, label, a, [role="listbox"], [role="option"]';
+
+/** A press beside a block's fields gives the block the focus, not a place in its stead: what is written then goes into a paragraph after it. */
+function afterBlock(editor: Editor, id: string) {
+  return {
+    onKeyDown: (event: KeyboardEvent) => {
+      if (event.target !== event.currentTarget || event.key.length !== 1 || event.ctrlKey || event.metaKey || event.altKey) return;
+      event.preventDefault();
+      writeAfterBlock(editor, id);
+      editor.view.dispatch(editor.state.tr.insertText(event.key));
+    },
+    onPaste: (event: ClipboardEvent) => {
+      const { target, nativeEvent, clipboardData } = event;
+      if (!(target instanceof Element) || target.closest(controls) || clipboardData.files.length > 0) return;
+      event.preventDefault();
+      writeAfterBlock(editor, id);
+      const html = clipboardData.getData('text/html');
+      if (html) editor.view.pasteHTML(html, nativeEvent);
+      else editor.view.pasteText(clipboardData.getData('text/plain'), nativeEvent);
+    },
+  };
 }
 
 function BlockView({ node, editor }: ReactNodeViewProps) {
@@ -23,7 +47,7 @@ function BlockView({ node, editor }: ReactNodeViewProps) {
     up: () => moveBlock(editor, id, -1), down: () => moveBlock(editor, id, 1), takeOut: () => takeOutBlock(editor, id),
   };
   return (
-    <NodeViewWrapper id={fieldId(id)} data-block-view={id} tabIndex={-1} className="scroll-mt-16 focus:outline-none">
+    <NodeViewWrapper id={fieldId(id)} data-block-view={id} tabIndex={-1} className="scroll-mt-16 focus:outline-none" {...afterBlock(editor, id)}>
       <BlockHandleProvider value={handle}>
         <Desk id={id} data={node.attrs['data'] as unknown} onChange={(change) => changeBlock(editor, id, change)} />
       </BlockHandleProvider>
@@ -44,8 +68,6 @@ function storedData(element: HTMLElement): unknown {
     throw cause;
   }
 }
-
-const controls = 'input, button, select, textarea, label, a, [role="listbox"], [role="option"]';
 
 /** A block in the editor: one atom with its id, version and data, drawn by its desk. */
 function blockNode(type: BlockType) {
@@ -69,7 +91,8 @@ function blockNode(type: BlockType) {
     renderText: ({ node }) => `[${deskBlockOf(type)?.word ?? type}: ${Object.keys((node.attrs['data'] ?? {}) as object).length > 0 ? 'a block' : 'empty'}]`,
     addNodeView: () => ReactNodeViewRenderer(BlockView, {
       className: 'max-w-none! font-ui text-control',
-      stopEvent: ({ event }) => event.target instanceof Element && event.target.closest(controls) !== null,
+      // what happens in a block is its own; only what is dragged over it may be for the text
+      stopEvent: ({ event }) => !event.type.startsWith('dr') || (event.target instanceof Element && event.target.closest(controls) !== null),
     }),
   });
 }

@@ -1,6 +1,7 @@
 import type { Editor } from '@tiptap/core';
 import { useEditorState } from '@tiptap/react';
 import { useRef, useState, type KeyboardEvent, type ReactNode } from 'react';
+import { roomBesideBlocks } from './keeps-blocks.ts';
 import { LinkField } from './link-field.tsx';
 import { PutInHere } from './tray.tsx';
 
@@ -29,8 +30,14 @@ function useTools(editor: Editor, askForLink: () => void): Tool[] {
     { label: 'Numbered list', face: '1, 2, 3', active: on.numbers, act: () => chain().toggleOrderedList().run() },
     { label: 'Quotation', face: 'Quote', active: on.quote, act: () => chain().toggleBlockquote().run() },
     { label: 'Link', face: 'Link', active: on.link, act: askForLink },
-    { label: on.table ? 'Take the table out' : 'Table', face: 'Table', active: on.table, act: () => (on.table ? chain().deleteTable() : chain().insertTable({ rows: 3, cols: 3, withHeaderRow: true })).run() },
+    { label: on.table ? 'Take the table out' : 'Table', face: 'Table', active: on.table, act: () => (on.table ? chain().deleteTable().run() : putTableIn(editor)) },
   ];
+}
+
+function putTableIn(editor: Editor): void {
+  const room = roomBesideBlocks(editor.state);
+  if (room) editor.view.dispatch(room);
+  editor.chain().focus().insertTable({ rows: 3, cols: 3, withHeaderRow: true }).run();
 }
 
 const tableTools: { label: string; act: (editor: Editor) => void }[] = [

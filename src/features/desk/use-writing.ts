@@ -5,6 +5,7 @@ import type { EntryDocument } from '#src/blocks/pure.ts';
 import { startAtEnd } from './block-commands.ts';
 import { BlockIds } from './block-ids.ts';
 import { blockExtensions } from './block-node.tsx';
+import { KeepsBlocks } from './keeps-blocks.ts';
 import { pastedWords } from './pasted-words.ts';
 import { proseExtensions } from './prose-extensions.ts';
 import { sameText } from './same-text.ts';
@@ -13,7 +14,7 @@ import type { DeskStart } from './desk-start.ts';
 import { editorContent, storedContent } from './stored-content.ts';
 import { goneIn, type GoneBlock } from './took-out.ts';
 
-const extensions = [...proseExtensions, ...blockExtensions, BlockIds];
+const extensions = [...proseExtensions, ...blockExtensions, BlockIds, KeepsBlocks];
 
 export interface WritingParts {
   start: DeskStart;

@@ -1,9 +1,10 @@
 import { Editor } from '@tiptap/core';
 import { afterEach, describe, expect, test, vi } from 'vitest';
 import { entryDocument, type EntryDocument } from '#src/blocks/pure.ts';
-import { moveBlock, putBack, putInBlock, startAtEnd, takeOutBlock } from '#src/features/desk/block-commands.ts';
+import { changeBlock, moveBlock, putBack, putInBlock, startAtEnd, takeOutBlock } from '#src/features/desk/block-commands.ts';
 import { BlockIds, idsOf } from '#src/features/desk/block-ids.ts';
 import { blockExtensions } from '#src/features/desk/block-node.tsx';
+import { KeepsBlocks } from '#src/features/desk/keeps-blocks.ts';
 import { pastedWords } from '#src/features/desk/pasted-words.ts';
 import { proseExtensions } from '#src/features/desk/prose-extensions.ts';
 import { editorContent, storedContent } from '#src/features/desk/stored-content.ts';
@@ -18,7 +19,7 @@ function open(content: EntryDocument['content']): Editor {
   // jsdom has no layout, which scrolling to the cursor asks for
   Range.prototype.getClientRects = () => Object.assign([], { item: () => null });
   Range.prototype.getBoundingClientRect = () => new DOMRect();
-  editor = new Editor({ element: document.body.appendChild(document.createElement('div')), extensions: [...proseExtensions, ...plainBlocks, BlockIds], content: editorContent(content), editorProps: { transformPastedHTML: pastedWords } });
+  editor = new Editor({ element: document.body.appendChild(document.createElement('div')), extensions: [...proseExtensions, ...plainBlocks, BlockIds, KeepsBlocks], content: editorContent(content), editorProps: { transformPastedHTML: pastedWords } });
   return editor;
 }
 function stored(now: Editor): EntryDocument['content'] {
@@ -158,6 +159,60 @@ describe('blocks in the text', () => {
     startAtEnd(now);
     now.commands.insertContent('x');
     expect(stored(now).map((node) => node.type)).toEqual(['used', 'paragraph']);
+  });
+
+  describe('typed over', () => {
+    const text = (): EntryDocument['content'] => [paragraph('para1', 'Before'), usedNode('used1', [{ id: 'lineA', amount: '3' }]), paragraph('para2', 'After')];
+    const said = (now: Editor) => stored(now).map((node) => (node.type === 'used' ? node.attrs.id : JSON.stringify(node).match(/"text":"([^"]*)"/)?.[1] ?? ''));
+    const selectBlock = (now: Editor) => now.commands.setNodeSelection(now.state.doc.firstChild?.nodeSize ?? 0);
+    // what the editor makes of a key that stands for a character
+    const press = (now: Editor, key: string) => now.view.dom.dispatchEvent(new KeyboardEvent('keypress', { key, charCode: key.charCodeAt(0), bubbles: true, cancelable: true }));
+
+    test('a letter typed while a block is selected starts a paragraph after it', () => {
+      const now = open(text());
+      selectBlock(now);
+      press(now, 'x');
+      now.commands.insertContent('y');
+      expect(said(now)).toEqual(['Before', 'used1', 'xy', 'After']);
+    });
+
+    test('what is pasted while a block is selected stands after it, words in one line or several', () => {
+      for (const [html, becomes] of [['one line', ['one line']], ['<p>two</p><p>lines</p>', ['two', 'lines']]] as const) {
+        const now = open(text());
+        selectBlock(now);
+        paste(now, html);
+        expect(said(now)).toEqual(['Before', 'used1', ...becomes, 'After']);
+        now.destroy();
+      }
+    });
+
+    test('with everything selected a letter or a paste takes the words and leaves the block', () => {
+      const now = open(text());
+      now.commands.selectAll();
+      press(now, 'x');
+      expect(said(now)).toEqual(['x', 'used1']);
+      now.commands.selectAll();
+      paste(now, 'y');
+      expect(said(now)).toEqual(['y', 'used1']);
+    });
+
+    test('a selected block goes with Backspace and is back with undo', () => {
+      const now = open(text());
+      selectBlock(now);
+      now.commands.keyboardShortcut('Backspace');
+      expect(said(now)).toEqual(['Before', 'After']);
+      now.commands.undo();
+      expect(stored(now)).toEqual(text());
+    });
+
+    test('a block taken out is back with one undo, with what was typed in it just before', () => {
+      const now = open(text());
+      const data = { day: null, lines: [] };
+      changeBlock(now, 'used1', () => data);
+      takeOutBlock(now, 'used1');
+      now.commands.undo();
+      expect(stored(now)).toEqual([paragraph('para1', 'Before'), { type: 'used', attrs: { id: 'used1', version: 1, data } }, paragraph('para2', 'After')]);
+    });
   });
 
   test('what is put in stands at the end, before the line to write on', () => {
