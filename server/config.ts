@@ -9,11 +9,19 @@ const loopback = new Set(['127.0.0.1', 'localhost', '::1', '[::1]']);
 const blankIsAbsent = (value: unknown) => (value === '' ? undefined : value);
 const optional = <S extends z.ZodType>(schema: S) => z.preprocess(blankIsAbsent, schema.optional());
 
+/** Addresses, cookies and links all start at the top: a site under a path of another would lead out of itself. */
+function isWholeSite(text: string): boolean {
+  // what is no address is said by the check before
+  if (!URL.canParse(text)) return true;
+  const { pathname, search, hash, username, password } = new URL(text);
+  return pathname === '/' && search + hash + username + password === '';
+}
+
 const environment = z.object({
   PORT: z.preprocess(blankIsAbsent, z.coerce.number('PORT is a number from 0 to 65535').int().min(0).max(65_535).default(3000)),
   HOST: z.preprocess(blankIsAbsent, z.string().default('127.0.0.1')),
   DATA_DIR: z.preprocess(blankIsAbsent, z.string().default('./data')),
-  PUBLIC_URL: optional(z.url({ protocol: /^https?$/, error: 'PUBLIC_URL is a whole address, such as https://log.example' })),
+  PUBLIC_URL: optional(z.url({ protocol: /^https?$/, error: 'PUBLIC_URL is a whole address, such as https://log.example' }).refine(isWholeSite, 'PUBLIC_URL is a host with nothing behind it, such as https://log.example: the site stands at the top of its address')),
   TRUST_PROXY: optional(z.string()),
   SESSION_SECRET: optional(z.string().min(32, 'SESSION_SECRET has 32 letters or more')),
   DEMO_PASSWORD: optional(z.string().min(10, 'DEMO_PASSWORD has ten letters or more')),
