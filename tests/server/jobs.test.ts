@@ -252,3 +252,21 @@ test('sessions that have run out are dropped, and no others', async () => {
   await start({ 'prune-sessions': prune }).idle();
   expect((await em.find(HttpSession, { sid: { $in: ['past', 'future'] } })).map(({ sid }) => sid)).toEqual(['future']);
 });
+
+test('work that was done goes a week after; what waits and what was given up stays', async () => {
+  const dayMs = 86_400 * secondMs;
+  const em = site.orm.em.fork();
+  const job = (kind: string, daysAgo: number, end: 'doneAt' | 'givenUpAt' | null) => em.persist(em.create(Job, {
+    kind, payload: {}, runAt: new Date(clock.getTime() - daysAgo * dayMs), ...(end ? { [end]: new Date(clock.getTime() - daysAgo * dayMs) } : {}),
+  }));
+  job('done-long-ago', 8, 'doneAt');
+  job('done-lately', 6, 'doneAt');
+  job('given-up', 30, 'givenUpAt');
+  job('waiting', 30, null);
+  await em.flush();
+  const pruning = jobHandlers({ ...site.parts, now: () => clock })['prune-jobs'];
+  if (!pruning) throw new Error('Nothing prunes the queue.');
+  expect(pruning.everyMs).toBe(dayMs);
+  await pruning.run({}, { id: 0, attempt: 1, signal: new AbortController().signal });
+  expect((await rows()).map(({ kind }) => kind)).toEqual(['done-lately', 'given-up', 'waiting']);
+});
