@@ -160,6 +160,20 @@ test('the day it was first published and its guid stay; the edited date is of th
   expect(await shop.entry(build, number)).toMatchObject({ guid: first.guid, firstPublishedAt: morning, editedAt: evening });
 });
 
+test('taken back and signed off again as it was, a day is not edited; with other words it is', async () => {
+  const rope = await shop.material(owner, build, 'Rope');
+  const words = dayOf('2026-03-02', [usedBlock([{ of: rope, amount: '2' }])]);
+  const number = await shop.start(owner, build, '2026-03-02');
+  const sign = async (document: typeof words, at: Date | undefined) => signOffDay(shop.em(), owner, build, number, { version: (await shop.entry(build, number)).version, document }, at ?? new Date(0));
+  await sign(words, morning);
+  await shop.takeBack(owner, build, number);
+  await sign(words, noon);
+  expect(await shop.entry(build, number)).toMatchObject({ firstPublishedAt: morning, editedAt: null });
+  await shop.takeBack(owner, build, number);
+  await sign({ ...words, lead: 'Two lengths.' }, evening);
+  expect(await shop.entry(build, number)).toMatchObject({ firstPublishedAt: morning, editedAt: evening });
+});
+
 test('stages add up what their published days used, the time and the work of their own kind', async () => {
   const em = shop.em();
   const of = await em.findOneOrFail(Build, { slug: build });

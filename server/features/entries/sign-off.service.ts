@@ -11,6 +11,7 @@ import { entryContext } from './entry-context.ts';
 import { replaceRows } from './entry-rows.ts';
 import { seenDocument } from './seen-document.ts';
 import { keptDocuments, newNodeId, storedDocument } from './stored-document.ts';
+import { wordsDigest } from './words-digest.ts';
 
 function requireWhole(derived: EntryDerivation): void {
   const count = Object.keys(derived.faults).length;
@@ -18,9 +19,10 @@ function requireWhole(derived: EntryDerivation): void {
   throw new AppError('bad-input', count === 1 ? 'One thing needs mending before this day can be signed off.' : `${count} things need mending before this day can be signed off.`, derived.faults);
 }
 
-// After a take-back the words last published are gone, so what is signed off again counts as edited.
+// After a take-back the words last published may be gone; of them the digest is kept.
 function wordsChanged(entry: Entry, document: EntryDocument): boolean {
-  return !entry.published || !isDeepStrictEqual(storedDocument(entry.published), storedDocument(document));
+  if (!entry.published) return entry.takenBack !== wordsDigest(storedDocument(document));
+  return !isDeepStrictEqual(storedDocument(entry.published), storedDocument(document));
 }
 
 async function setWork(em: Em, entry: Entry, work: EntryDerivation['work']): Promise<void> {
@@ -32,7 +34,7 @@ async function setWork(em: Em, entry: Entry, work: EntryDerivation['work']): Pro
 function setPublished(entry: Entry, document: EntryDocument, stage: Stage | null, now: Date): void {
   if (entry.firstPublishedAt && wordsChanged(entry, document)) entry.editedAt = now;
   entry.firstPublishedAt ??= now;
-  Object.assign(entry, { published: document, working: null, workingAt: null, title: document.title.trim(), day: document.day, dayTo: document.dayTo, stage });
+  Object.assign(entry, { published: document, takenBack: null, working: null, workingAt: null, title: document.title.trim(), day: document.day, dayTo: document.dayTo, stage });
 }
 
 interface SignedOff { readonly version: number; readonly href: string }

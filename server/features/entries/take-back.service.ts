@@ -3,6 +3,8 @@ import type { Caller, Em } from '#server/http/context.ts';
 import { requireEntry, requireVersion } from './entry-access.ts';
 import { nothingDerived } from './entry-context.ts';
 import { replaceRows } from './entry-rows.ts';
+import { storedDocument } from './stored-document.ts';
+import { wordsDigest } from './words-digest.ts';
 
 /**
  * Takes a published entry back: its rows leave the ledger, and its document becomes the working copy, unless a newer one
@@ -17,7 +19,7 @@ export async function takeBack(em: Em, caller: Caller, slug: string, number: num
     const working = entry.working ?? entry.published;
     Object.assign(entry, {
       working, workingAt: entry.workingAt ?? now, published: null, title: working.title, day: working.day, dayTo: working.dayTo,
-      stage: null, workAmount: null, workUnit: null, workKind: null,
+      takenBack: wordsDigest(storedDocument(entry.published)), stage: null, workAmount: null, workUnit: null, workKind: null,
     });
     await inner.flush();
     return entry.version;
