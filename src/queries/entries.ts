@@ -1,7 +1,8 @@
 import { queryOptions, useMutation, useQueryClient } from '@tanstack/react-query';
-import type { discardWorking, previewEntry, readDesk, readLastTime, saveWorking, signOffEntry, startEntry, takeBackEntry } from '#contracts/entries.ts';
+import type { discardWorking, readDesk, readLastTime, saveWorking, signOffEntry, startEntry, takeBackEntry } from '#contracts/entries.ts';
 import type { InputOf } from '#contracts/endpoint.ts';
 import { call, useCall } from '#src/lib/transport.ts';
+import { previewQuery } from './reading.ts';
 
 export interface EntryAt {
   build: string;
@@ -15,12 +16,6 @@ export const deskQuery = ({ build, number }: EntryAt) => queryOptions({
   staleTime: 0,
   refetchOnMount: false,
   refetchOnReconnect: false,
-});
-
-export const previewQuery = ({ build, number }: EntryAt) => queryOptions({
-  queryKey: ['entries', build, number, 'preview'],
-  queryFn: ({ client }) => call<typeof previewEntry>(client, 'GET', '/api/builds/:build/entries/:number/preview', { params: { build, number } }),
-  staleTime: 0,
 });
 
 /** Lines for "same as last time", of the same stage where there are any. */
@@ -48,7 +43,7 @@ export function useEntrySettled({ build, number }: EntryAt) {
     const moved = ({ queryKey }: { queryKey: readonly unknown[] }) => queryKey[0] !== 'session' && queryKey[0] !== 'pictures';
     client.removeQueries({ type: 'inactive', predicate: moved });
     await client.invalidateQueries({ predicate: moved, refetchType: 'none' });
-    client.removeQueries({ queryKey: ['entries', build, number, 'preview'] });
+    client.removeQueries({ queryKey: previewQuery(build, number).queryKey });
   };
 }
 
