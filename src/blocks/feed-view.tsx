@@ -1,6 +1,7 @@
-import type { EntryPage, RowView } from '#contracts/entry-view.ts';
+import type { EntryPage, RowView, TallyView } from '#contracts/entry-view.ts';
 import type { PictureView } from '#contracts/pictures.ts';
 import { SlipTable } from '#src/components/slip-table.tsx';
+import { dayFacts, oneFacts, tallyFigure, tallySaid } from './tally-words.ts';
 import { ProseView } from './prose-view.tsx';
 
 type BodyNode = RowView['body'][number];
@@ -28,11 +29,12 @@ export interface FeedEntryProps {
   /** The build it is a day of, and when that was, in words. */
   build: { title: string; url: string };
   days: string;
+  tally: TallyView;
   publicUrl: string;
 }
 
 /** An entry whole, for feeds and mail: no styles, blocks as plain tables, pictures at absolute addresses. */
-export function FeedEntry({ page, build, days, publicUrl }: FeedEntryProps) {
+export function FeedEntry({ page, build, days, tally, publicUrl }: FeedEntryProps) {
   return (
     <>
       <p><a href={build.url}>{build.title}</a>, {days}</p>
@@ -44,6 +46,21 @@ export function FeedEntry({ page, build, days, publicUrl }: FeedEntryProps) {
           {row.body.slice(row.at).map((node, at) => <FeedBody key={at} node={node} publicUrl={publicUrl} />)}
         </div>
       ))}
+      <FeedTally tally={tally} />
     </>
+  );
+}
+
+/** The day's tally, without what changes as the build goes on: an item stays what it was. */
+function FeedTally({ tally }: { tally: TallyView }) {
+  return (
+    <table>
+      <caption>The day’s tally</caption>
+      <tbody>
+        {[{ label: tallyFigure(tally), value: tallySaid(tally) }, ...dayFacts(tally), ...oneFacts(tally)].map((fact) => (
+          <tr key={fact.label}><th scope="row">{fact.label}</th><td>{fact.value}</td></tr>
+        ))}
+      </tbody>
+    </table>
   );
 }

@@ -72,6 +72,8 @@ describe('a published day', () => {
       const { text } = await visitor.get(feed);
       expect(text, feed).toContain('£57.80');
       expect(text, feed).toContain('£3.40');
+      expect(text, feed).toContain('this day: £57.80 used, £3.40 wasted, £12.34 of costs');
+      expect(text, feed).toContain('One steamed rib takes');
     }
   });
 

@@ -32,7 +32,7 @@ export interface EntrySource {
   readonly working?: WorkingFigures;
 }
 
-const noFigures: EntryFigures = { used: 0, wasted: 0, costs: 0, bought: 0, minutes: 0, waiting: 0, unsettled: false };
+export const noFigures: EntryFigures = { used: 0, wasted: 0, costs: 0, bought: 0, minutes: 0, waiting: 0, unsettled: false };
 
 async function namesAround(em: Em, build: Build): Promise<Map<string, string>> {
   const crew = await em.find(CrewMember, { build: build.id }, { populate: ['person'] });
@@ -83,7 +83,8 @@ async function oneTakes(em: Em, { entry, working }: EntrySource, derived: EntryD
   return (await takesOfEntries(em, [{ entry: entry.id, amount: work.amount }])).get(entry.id) ?? null;
 }
 
-async function tallyOf(em: Em, source: EntrySource, derived: EntryDerivation, sums: EntryFigures, plural: ReadonlyMap<string, string>): Promise<TallyView> {
+/** The day's tally of a source: money where it is shown, hours, work, and what one took. */
+export async function tallyOf(em: Em, source: EntrySource, derived: EntryDerivation, sums: EntryFigures, plural: ReadonlyMap<string, string>): Promise<TallyView> {
   const { build, costsShown } = source;
   const takes = await oneTakes(em, source, derived);
   const buildUsed = await usedSoFar(em, source, sums);

@@ -3,11 +3,12 @@ import { renderToStaticMarkup } from 'react-dom/server';
 import { formatDayLong } from '#domain/format.ts';
 import { FeedEntry } from '#src/blocks/views.ts';
 import { Entry, type Build } from '#server/entities/index.ts';
+import { figuresOfEntries } from '#server/features/shelf/figures.service.ts';
 import { materialFacts } from '#server/features/shelf/materials.service.ts';
 import { requireVisibleBuild } from '#server/features/builds/build-access.service.ts';
 import type { Em } from '#server/http/context.ts';
 import { entryHref } from './entry-cards.service.ts';
-import { projectedEntry, type EntrySource } from './entry-page.service.ts';
+import { noFigures, projectedEntry, tallyOf, type EntrySource } from './entry-page.service.ts';
 import { freshEntries } from './home.service.ts';
 
 const itemsAFeed = 20;
@@ -55,13 +56,16 @@ async function feedItem(em: Em, entry: Entry, publicUrl: string, materials: NonN
   const build = entry.build;
   if (!entry.published || !entry.firstPublishedAt) return null;
   // a feed has no reader it knows: costs kept to the crew are absent from it whoever asks
-  const { rows, pictures, derived } = await projectedEntry(em, { build, entry, document: entry.published, costsShown: build.costsShown, writes: false, materials });
+  const source: EntrySource = { build, entry, document: entry.published, costsShown: build.costsShown, writes: false, materials };
+  const { rows, pictures, derived, plural } = await projectedEntry(em, source);
+  const sums = (await figuresOfEntries(em, [entry.id])).get(entry.id) ?? noFigures;
   const cover = derived.pictures.find((picture) => picture.cover) ?? derived.pictures[0];
   const src = cover ? pictures.get(cover.key)?.src : undefined;
   return {
     guid: `urn:uuid:${entry.guid}`, title: wellFormed(entry.title), url: `${publicUrl}${entryHref(build, entry)}`, lead: wellFormed(entry.published.lead),
     html: wellFormed(renderToStaticMarkup(createElement(FeedEntry, {
-      page: { lead: entry.published.lead, rows }, build: { title: build.title, url: `${publicUrl}/builds/${build.slug}` }, days: daysInWords(entry), publicUrl,
+      page: { lead: entry.published.lead, rows }, build: { title: build.title, url: `${publicUrl}/builds/${build.slug}` }, days: daysInWords(entry),
+      tally: await tallyOf(em, source, derived, sums, plural), publicUrl,
     }))),
     author: wellFormed(entry.author.name), published: entry.firstPublishedAt, modified: entry.editedAt ?? entry.firstPublishedAt,
     picture: src ? `${publicUrl}${src}` : null, tags: entry.stage ? [wellFormed(entry.stage.title)] : [],

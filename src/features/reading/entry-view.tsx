@@ -1,7 +1,7 @@
 import { Link, useLocation } from 'react-router-dom';
 import type { EntryPage, TallyView } from '#contracts/entry-view.ts';
-import { formatDayLong, formatMinutes, formatMoney, formatMoneySoFar } from '#domain/format.ts';
-import { readerRuns } from '#src/blocks/views.ts';
+import { formatDayLong } from '#domain/format.ts';
+import { buildFact, dayFacts, oneFacts, readerRuns, tallyFigure, tallySaid } from '#src/blocks/views.ts';
 import { Byline } from '#src/components/byline.tsx';
 import { Chip } from '#src/components/chip.tsx';
 import { DayLinks } from '#src/components/day-links.tsx';
@@ -9,12 +9,10 @@ import { Kicker } from '#src/components/kicker.tsx';
 import { PageColumns } from '#src/components/page-columns.tsx';
 import { PageFrame } from '#src/components/page-frame.tsx';
 import { PageHead } from '#src/components/page-head.tsx';
-import { RunningTally, type TallyFact } from '#src/components/running-tally.tsx';
+import { RunningTally } from '#src/components/running-tally.tsx';
 import { TallyMargin } from '#src/components/tally-margin.tsx';
 import { withSearch } from '#src/lib/address.ts';
 import { BuildTape } from './build-tape.tsx';
-
-const peopleWords = ['', '', ', two people', ', three people', ', four people'];
 
 /** "14 November 2026", or "12 to 14 November 2026". */
 export function workDays(day: string, dayTo: string | null): string {
@@ -23,39 +21,14 @@ export function workDays(day: string, dayTo: string | null): string {
   return from.slice(from.indexOf(' ')) === to.slice(to.indexOf(' ')) ? `${from.slice(0, from.indexOf(' '))} to ${to}` : `${from} to ${to}`;
 }
 
-function dayFacts(tally: TallyView): TallyFact[] {
-  return [
-    ...(tally.minutes > 0 ? [{ label: `Hands on${peopleWords[tally.people] ?? `, ${tally.people} people`}`, value: formatMinutes(tally.minutes) }] : []),
-    ...(tally.waiting > 0 ? [{ label: 'Waiting', value: formatMinutes(tally.waiting) }] : []),
-    ...(tally.work ? [{ label: 'Work done', value: tally.work.words }] : []),
-  ];
-}
-
-function oneFacts(tally: TallyView): TallyFact[] {
-  const { money, work, currency } = tally;
-  const one = [money?.one != null && money.one > 0 ? formatMoneySoFar(money.one, currency, money.oneUnsettled) : '', tally.oneMinutes != null ? formatMinutes(tally.oneMinutes).replaceAll(' ', '\u00a0') : ''].filter(Boolean);
-  return [
-    ...(work && one.length > 0 ? [{ label: `${work.one} takes`, value: one.join(', ') }] : []),
-    ...(money && money.bought > 0 ? [{ label: 'Bought', value: formatMoney(money.bought, currency) }] : []),
-    ...(money ? [{ label: 'Build so far', value: `${formatMoney(money.buildUsed, currency)} used${money.buildUnsettled ? ', some not bought yet' : ''}` }] : []),
-  ];
-}
-
-/** "£88.34 used, £3.40 wasted, £12.00 of costs". */
-function moneyWords({ money, currency }: TallyView): string {
-  if (!money) return '';
-  const parts = [`${formatMoney(money.used, currency)} used`, ...(money.wasted > 0 ? [`${formatMoney(money.wasted, currency)} wasted`] : []), ...(money.costs > 0 ? [`${formatMoney(money.costs, currency)} of costs`] : [])];
-  return `this day: ${parts.join(', ')}${money.unsettled ? '; some not bought yet' : ''}`;
-}
-
 /** The day's tally: the last word on what it took. */
 export function DayTally({ tally }: { tally: TallyView }) {
   return (
     <RunningTally
       label="The day's tally"
-      figure={tally.money ? formatMoney(tally.money.day, tally.currency) : formatMinutes(tally.minutes)}
-      words={tally.money ? moneyWords(tally) : 'hands on this day'}
-      groups={[dayFacts(tally), oneFacts(tally)]}
+      figure={tallyFigure(tally)}
+      words={tallySaid(tally)}
+      groups={[dayFacts(tally), [...oneFacts(tally), ...buildFact(tally)]]}
     />
   );
 }
