@@ -3,6 +3,8 @@ import { plainWords } from './plain-words.ts';
 
 // Heights are guessed in the wide layout's pixels, well enough to tell a gap one reads across from a hole in the page.
 
+/** What a row's height is guessed from. */
+export type GuessedRow = Pick<RowView, 'body' | 'slips'>;
 type BodyNode = RowView['body'][number];
 type SlipNode = RowView['slips'][number]['slip'];
 
@@ -38,7 +40,7 @@ export const mostGap = 150;
  * @param beside height of what stands first in the margin, in pixels: the day's tally
  * @returns for each row, the index of the run it belongs to
  */
-export function runsOf(rows: readonly RowView[], beside: number): number[] {
+export function runsOf(rows: readonly GuessedRow[], beside: number): number[] {
   return laidOut(rows, beside).runs;
 }
 
@@ -46,7 +48,7 @@ export function runsOf(rows: readonly RowView[], beside: number): number[] {
  * How many of the last row's slips are left hanging far below the end of the words, and stand better under them.
  * Two abreast they take half their height there.
  */
-export function hangingSlips(rows: readonly RowView[], beside: number): number {
+export function hangingSlips(rows: readonly GuessedRow[], beside: number): number {
   let { text, margin } = laidOut(rows, beside);
   const slips = rows.at(-1)?.slips ?? [];
   let hanging = 0;
@@ -63,7 +65,7 @@ export function hangingSlips(rows: readonly RowView[], beside: number): number {
 
 interface Laid { runs: number[]; text: number; margin: number }
 
-function laidOut(rows: readonly RowView[], beside: number): Laid {
+function laidOut(rows: readonly GuessedRow[], beside: number): Laid {
   let run = 0;
   let text = 0;
   let margin = beside;
@@ -82,4 +84,14 @@ function laidOut(rows: readonly RowView[], beside: number): Laid {
     return run;
   });
   return { runs, text, margin };
+}
+
+/** The day's tally, guessed in pixels. */
+const tallyHeight = 300;
+
+/** Says of each row which run it belongs to and which of its slips stand under the words, so that the browser has nothing to work out. */
+export function withRuns<R extends GuessedRow>(rows: readonly R[]): (R & { run: number; under: number })[] {
+  const runs = runsOf(rows, tallyHeight);
+  const hanging = hangingSlips(rows, tallyHeight);
+  return rows.map((row, index) => ({ ...row, run: runs[index] ?? 0, under: index === rows.length - 1 ? hanging : 0 }));
 }

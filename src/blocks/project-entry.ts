@@ -4,6 +4,7 @@ import type { HazardTag } from '#contracts/words.ts';
 import type { ProjectionContext, PureBlock } from './block.ts';
 import { cautionFor } from './caution/caution-list.ts';
 import type { CautionData } from './caution/caution.ts';
+import { withRuns } from './margin-runs.ts';
 import { isProse, type EntryDocument, type TopNode } from './entry-document.ts';
 import { pureBlocks } from './pure-list.ts';
 
@@ -12,6 +13,7 @@ export interface EntryProjection {
 }
 
 type BodyNode = RowView['body'][number];
+type CutRow = Omit<RowView, 'run' | 'under'>;
 type SlipNode = RowView['slips'][number];
 
 function cautionView(id: string, data: CautionData): BodyNode {
@@ -51,8 +53,8 @@ function unspokenHazards(document: EntryDocument, context: ProjectionContext): H
  * A slip belongs to the words before it (and to the heading over those), so a row starts there and runs on to the next words with slips.
  */
 export function projectEntry(document: EntryDocument, context: ProjectionContext, pictures: ReadonlyMap<string, PictureView>): EntryProjection {
-  const rows: RowView[] = [];
-  let row: RowView = { body: [], at: 0, slips: [] };
+  const rows: CutRow[] = [];
+  let row: CutRow = { body: [], at: 0, slips: [] };
   let slipBefore = false;
   for (const node of document.content) {
     const slip = slipOf(node, context);
@@ -67,11 +69,11 @@ export function projectEntry(document: EntryDocument, context: ProjectionContext
     if (slip || body) slipBefore = slip !== null;
   }
   for (const hazard of unspokenHazards(document, context)) row.body.push(cautionView(`hazard-${hazard}`, { hazard, title: '', words: '' }));
-  return { rows: [...rows, row].filter((one) => one.body.length > 0 || one.slips.length > 0) };
+  return { rows: withRuns([...rows, row].filter((one) => one.body.length > 0 || one.slips.length > 0)) };
 }
 
 /** Closes the row before the words a new slip belongs to, and opens one that starts with them. */
-function splitAtAnchor(rows: RowView[], row: RowView): RowView {
+function splitAtAnchor(rows: CutRow[], row: CutRow): CutRow {
   const anchor = row.body.at(-2)?.type === 'heading' ? row.body.length - 2 : row.body.length - 1;
   if (anchor <= 0 && row.slips.length === 0) return row;
   const moved = row.body.splice(Math.max(anchor, 0));

@@ -7,7 +7,6 @@ import type { PictureData } from '#src/components/picture.tsx';
 import { Prose } from '#src/components/prose.tsx';
 import { Slip } from '#src/components/slip.tsx';
 import type { TallyPart, TallyRun } from '#src/components/tally-margin.tsx';
-import { hangingSlips, runsOf } from './margin-runs.ts';
 import { ProseView } from './prose-view.tsx';
 
 type BodyNode = RowView['body'][number];
@@ -42,23 +41,19 @@ function bodyViews(body: readonly BodyNode[], firstPhotos: string | null): React
 
 const filled = (views: ReactNode[]): ReactNode => (views.length > 0 ? views : null);
 
-/** The day's tally, guessed in pixels. */
-const tallyHeight = 300;
-
 /** A projected entry as runs of the tally margin: words and pictures, with the slips beside them. */
 export function readerRuns(rows: readonly RowView[], tally: ReactNode): TallyRun[] {
   const firstPhotos = rows.flatMap((row) => row.body).find((node) => node.type === 'photos');
   const firstId = firstPhotos?.type === 'photos' ? firstPhotos.id : null;
-  const hanging = hangingSlips(rows, tallyHeight);
   const slipsOf = (row: RowView) => row.slips.map(({ id, slip }) => <Slip key={id} {...slip} />);
   const parts = rows.map((row, index) => ({
     key: row.body[0] ? keyOf(row.body[0]) : row.slips[0]?.id ?? String(index),
     before: filled(bodyViews(row.body.slice(0, row.at), firstId)),
     after: filled(bodyViews(row.body.slice(row.at), firstId)),
-    slips: [...(index === 0 ? [tally] : []), ...slipsOf(row).slice(0, index === rows.length - 1 ? row.slips.length - hanging : undefined)],
+    slips: [...(index === 0 ? [tally] : []), ...slipsOf(row).slice(0, row.slips.length - row.under)],
   }));
   const runs: { key: string; parts: TallyPart[]; under?: ReactNode[] }[] = [];
-  runsOf(rows, tallyHeight).forEach((run, index) => {
+  rows.forEach(({ run }, index) => {
     const part = parts[index];
     if (!part) return;
     const open = runs[run];
@@ -67,7 +62,7 @@ export function readerRuns(rows: readonly RowView[], tally: ReactNode): TallyRun
   });
   const last = runs.at(-1);
   const lastRow = rows.at(-1);
-  if (last && lastRow && hanging > 0) last.under = slipsOf(lastRow).slice(-hanging);
+  if (last && lastRow && lastRow.under > 0) last.under = slipsOf(lastRow).slice(-lastRow.under);
   return runs.length > 0 ? runs : [{ key: 'tally', parts: [{ key: 'tally', before: null, slips: [tally], after: null }] }];
 }
 

@@ -17,6 +17,10 @@ export const rowView = z.object({
   body: z.array(bodyNode),
   /** How many of the body the slips come after, in the order they were written. */
   at: z.number().int(),
+  /** Rows of one run have their words run on without a gap; their slips stand one under the other. */
+  run: z.number().int(),
+  /** How many of its last slips stand under the words, since none stand beside them any more. */
+  under: z.number().int(),
   slips: z.array(z.object({ type: z.string(), id: z.string(), slip: slipView })),
 });
 export type RowView = z.output<typeof rowView>;

@@ -1,10 +1,10 @@
 import { describe, expect, test } from 'vitest';
 import type { RowView } from '#contracts/entry-view.ts';
-import { hangingSlips, runsOf } from '#src/blocks/margin-runs.ts';
+import { hangingSlips, runsOf, type GuessedRow } from '#src/blocks/margin-runs.ts';
 
 const words = (letters: number): RowView['body'][number] => ({ type: 'paragraph', attrs: { id: 'node1' }, content: [{ type: 'text', text: 'a'.repeat(letters) }] });
 const slip = (lines: number): RowView['slips'][number] => ({ type: 'used', id: 'slip1', slip: { kind: 'used', word: 'Used', lines: Array.from({ length: lines }, () => ({ label: 'Roves', small: '204', value: '£9.69' })) } });
-const row = (letters: number, ...slips: number[]): RowView => ({ body: [words(letters)], at: 1, slips: slips.map(slip) });
+const row = (letters: number, ...slips: number[]): GuessedRow => ({ body: [words(letters)], slips: slips.map(slip) });
 
 describe('runs of the tally margin', () => {
   test('a slip about as tall as its words starts the next words level with the next slip', () => {
