@@ -1,17 +1,6 @@
-import { createContext, useContext, type ReactNode } from 'react';
+import type { ReactNode } from 'react';
 import type { SlipKind } from '#src/components/slip.tsx';
-
-/** What the editor lets a block do with itself. */
-export interface BlockHandle {
-  readonly word: string;
-  readonly canUp: boolean;
-  readonly canDown: boolean;
-  readonly up: () => void;
-  readonly down: () => void;
-  readonly takeOut: () => void;
-}
-const HandleContext = createContext<BlockHandle | null>(null);
-export const BlockHandleProvider = HandleContext.Provider;
+import { BlockHandles } from './block-handles.tsx';
 
 const edges: Record<SlipKind, string> = {
   used: 'border-l-scribe', bought: 'border-l-zinc', cost: 'border-l-zinc', time: 'border-l-ink', mix: 'border-l-verd', worked: 'border-l-verd', wrong: 'border-l-lead', measure: 'border-l-edge',
@@ -31,21 +20,6 @@ export interface BlockFrameProps {
 }
 
 export const textButton = 'min-h-6 text-scribe underline underline-offset-[0.18em] hover:decoration-2 max-wide:min-h-11';
-const handleButton = 'min-h-8 min-w-8 rounded-edge px-2 text-small text-ink-soft hover:bg-hover hover:text-ink aria-disabled:opacity-40 max-wide:min-h-11 max-wide:min-w-11';
-
-function Handles() {
-  const handle = useContext(HandleContext);
-  if (!handle) return null;
-  const { word, canUp, canDown, up, down, takeOut } = handle;
-  return (
-    <div role="group" aria-label={`Place of this ${word} block`} className="-mr-2 flex">
-      <button type="button" aria-disabled={!canUp} onClick={canUp ? up : undefined} className={handleButton}>Up</button>
-      <button type="button" aria-disabled={!canDown} onClick={canDown ? down : undefined} className={handleButton}>Down</button>
-      <button type="button" onClick={takeOut} className={handleButton}>Take out</button>
-    </div>
-  );
-}
-
 /** The card a block is written on: its kind, what it may be asked, and its place in the text. */
 export function BlockFrame({ kind, word, note, end, children }: BlockFrameProps) {
   const edge = kind ? edges[kind] : 'border-l-rule-strong';
@@ -57,7 +31,7 @@ export function BlockFrame({ kind, word, note, end, children }: BlockFrameProps)
           {note && <span className="text-small text-ink-soft">{note}</span>}
         </p>
         {end && <div className="text-small">{end}</div>}
-        <Handles />
+        <BlockHandles />
       </div>
       {children}
     </section>

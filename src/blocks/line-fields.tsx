@@ -89,7 +89,7 @@ export function QuietSelect({ name, label, value, onValue, options, strong = fal
   return (
     <select
       id={fieldId(name)} name={name} aria-label={label} value={value} onChange={(event) => onValue(event.target.value)}
-      className={`quiet-select min-h-7 ${tall} cursor-pointer rounded-edge border-0 border-b border-dashed border-rule-strong bg-transparent py-0.5 text-small hover:border-ink ${strong ? 'font-semibold text-lead' : 'text-ink-soft'}`}
+      className={`quiet-select min-h-7 ${tall} cursor-pointer rounded-edge border-0 border-b border-dashed border-rule-strong bg-transparent py-0.5 text-small hover:border-ink wide:border-transparent ${strong ? 'font-semibold text-lead' : 'text-ink-soft'}`}
     >
       {options.map((option) => <option key={option.value} value={option.value}>{option.label}</option>)}
     </select>

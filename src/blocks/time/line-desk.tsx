@@ -4,6 +4,7 @@ import { readMinutes } from '#domain/duration.ts';
 import { formatMinutes } from '#domain/format.ts';
 import { timeKinds, timeKindWords, type TimeKind } from '#contracts/words.ts';
 import { useBench } from '../bench.ts';
+import { ChoicesButton, FoldingLine, LineChoices } from '../line-choices.tsx';
 import { FigureInput, LineFaults, LineInput, optionsOf, QuietSelect, tall } from '../line-fields.tsx';
 import { TakeOutLine } from '../take-out-line.tsx';
 import type { LineActions } from '../use-lines.ts';
@@ -52,25 +53,26 @@ export const TimeLineDesk = memo(function TimeLineDesk(props: TimeLineDeskProps)
   const shown = minutes.ok && formatMinutes(minutes.value) !== line.time.trim() ? formatMinutes(minutes.value) : null;
   const change = (part: Partial<TimeLineData>) => lines.change(line.id, part);
   return (
-    <li className="m-0! border-b border-rule py-2.5">
-      <div className="grid grid-cols-[minmax(0,1fr)_8rem] gap-x-3.5 gap-y-1.5 wide:grid-cols-[minmax(0,12rem)_minmax(0,1fr)_8rem]">
-        <div>
-          {waiting ? <p className="py-2 font-semibold">Waiting</p> : <WhoSelect {...props} />}
-          {!waiting && line.handle === null && (
-            <div className="mt-1.5"><LineInput name={path('name')} label="Name" placeholder="Or just a name" value={line.name} onValue={(name) => change({ name })} onEnter={() => lines.goTo(line.id, 'time')} /></div>
-          )}
-        </div>
-        <div className="max-wide:order-3 max-wide:col-span-2">
+    <FoldingLine name={path('line')}>
+      <div className="grid grid-cols-[minmax(0,1fr)_8rem] gap-x-3.5 gap-y-1 wide:grid-cols-[minmax(0,12rem)_minmax(0,1fr)_8rem]">
+        {waiting ? <p className="py-2 font-semibold">Waiting</p> : <WhoSelect {...props} />}
+        {!waiting && line.handle === null && (
+          <div className="max-wide:order-3 max-wide:col-span-2 wide:order-4"><LineInput name={path('name')} label="Name" placeholder="Or just a name" value={line.name} onValue={(name) => change({ name })} onEnter={() => lines.goTo(line.id, 'time')} /></div>
+        )}
+        <div className="max-wide:order-4">
           <LineInput name={path('what')} label={`What ${of} was on`} placeholder={waiting ? 'What for: epoxy curing' : 'On what'} value={line.what} onValue={(what) => change({ what })} onEnter={() => lines.goOn(line.id)} />
         </div>
-        <FigureInput name={path('time')} label={`How long, ${of}`} placeholder="7 h 30" inputMode="text" value={line.time} onValue={(time) => change({ time })} onEnter={() => lines.goOn(line.id)} />
+        <FigureInput name={path('time')} label={`How long, ${of}`} placeholder="e.g. 7 h 30" inputMode="text" value={line.time} onValue={(time) => change({ time })} onEnter={() => lines.goOn(line.id)} />
+        <div className="order-5 wide:hidden">
+          <ChoicesButton of={of} words={timeKindWords[line.kind]} above={shown && <span className="text-ink-soft">{shown}</span>} />
+        </div>
       </div>
-      <div className="mt-1 flex flex-wrap items-center gap-x-3.5">
+      <LineChoices>
         <QuietSelect name={path('kind')} label={`What the time of ${of} counts for`} value={line.kind} options={kinds} onValue={(kind) => change({ kind: kindOf(kind) })} />
-        {shown && <span className="text-small text-ink-soft">{shown}</span>}
+        {shown && <span className="text-small text-ink-soft max-wide:hidden">{shown}</span>}
         <TakeOutLine of={of} onTakeOut={() => lines.takeOut(line.id, line.name.trim() || 'A line')} />
-      </div>
+      </LineChoices>
       <LineFaults names={[path('name'), path('time')]} />
-    </li>
+    </FoldingLine>
   );
 });

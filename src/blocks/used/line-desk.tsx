@@ -6,6 +6,7 @@ import { AmountInput, useAmountWords, useShownBack } from '../amount-input.tsx';
 import { useBench, useLineReckoning } from '../bench.ts';
 import type { MaterialFacts } from '../block.ts';
 import type { LineReckoning } from '../figures-store.ts';
+import { ChoicesButton, FoldingLine, LineChoices } from '../line-choices.tsx';
 import { LineFaults, optionsOf, QuietSelect } from '../line-fields.tsx';
 import { MaterialPicker } from '../material-picker.tsx';
 import { NewMaterial } from '../new-material.tsx';
@@ -23,6 +24,11 @@ function useLeft(line: UsedLine, reckoning: LineReckoning | undefined): { words:
   if (!reckoning || reckoning.left === null) return { words: '', short: false };
   const short = exactFrom(reckoning.short).gt(0);
   return short ? { words: `${inWords(reckoning.short)} short`, short } : { words: `${inWords(reckoning.left)} left`, short };
+}
+
+/** What is chosen for a line, in a few words; that it comes off the shelf the block says already. */
+function chosen({ fate, counts, from }: UsedLine): string {
+  return [fate === 'wasted' ? 'Wasted' : 'Used', countsWords[counts].toLowerCase(), from === 'shed' ? 'from the shed' : ''].filter(Boolean).join(', ');
 }
 
 interface UsedLineDeskProps {
@@ -49,8 +55,8 @@ export const UsedLineDesk = memo(function UsedLineDesk({ block, line, lines }: U
   };
   const of = line.name.trim() || 'this line';
   return (
-    <li className="m-0! border-b border-rule py-2.5">
-      <div className="grid grid-cols-[minmax(0,1fr)_auto] items-center gap-x-3.5 gap-y-1.5 [grid-template-areas:'name_money'_'amount_left'] wide:grid-cols-[minmax(0,1fr)_auto_7rem_5rem] wide:[grid-template-areas:'name_amount_left_money']">
+    <FoldingLine name={path('line')}>
+      <div className="grid grid-cols-[auto_minmax(0,1fr)_auto] items-center gap-x-2 wide:gap-x-3.5 [grid-template-areas:'name_name_money'_'amount_left_left'] wide:grid-cols-[minmax(0,1fr)_auto_7rem_5rem] wide:[grid-template-areas:'name_amount_left_money']">
         <div className="[grid-area:name]">
           <MaterialPicker
             name={path('material')} value={line.name} picked={line.material !== null} onPick={pick} onNew={setNewName}
@@ -58,19 +64,21 @@ export const UsedLineDesk = memo(function UsedLineDesk({ block, line, lines }: U
           />
         </div>
         <div className="[grid-area:amount]"><AmountInput block={block} line={line} onLine={change} onEnter={() => lines.goOn(line.id)} /></div>
-        <p className={`text-small [grid-area:left] max-wide:text-right ${left.short ? 'font-semibold text-lead' : 'text-ink-soft'}`}>{left.words}</p>
+        <div className="min-w-0 [grid-area:left]">
+          <ChoicesButton of={of} words={chosen(line)} strong={line.fate === 'wasted'} above={left.words && <span className={left.short ? 'font-semibold text-lead' : 'text-ink-soft'}>{left.words}</span>} />
+        </div>
         <p className="text-right [grid-area:money]">{value === undefined || (value === 0 && left.short) ? '' : formatMoney(value, bench.context.currency)}</p>
         {left.short && <p className="col-span-full text-right text-small text-ink-soft">{notBoughtYet(reckoning?.estimate ?? null, bench.context.currency)}</p>}
       </div>
       {newName !== null && <NewMaterial key={newName} at={path('material')} name={newName} onAdded={pick} onLeave={() => setNewName(null)} />}
-      <div className="mt-1 flex flex-wrap items-center gap-x-3.5 gap-y-1">
+      {shownBack && <p className="text-small text-ink-soft">{shownBack}</p>}
+      <LineChoices>
         <QuietSelect name={path('fate')} label={`Used or wasted: ${of}`} value={line.fate} options={fates} strong={line.fate === 'wasted'} onValue={(fate) => change({ fate: fate === 'wasted' ? 'wasted' : 'used' })} />
         <QuietSelect name={path('counts')} label={`What ${of} counts for`} value={line.counts} options={optionsOf(countsWords)} onValue={(counts) => change({ counts: counts === 'whole' || counts === 'opened' ? counts : 'each' })} />
         <QuietSelect name={path('from')} label={`Where ${of} came from`} value={line.from} options={places} onValue={(from) => change({ from: from === 'shed' ? 'shed' : 'shelf' })} />
-        {shownBack && <span className="text-small text-ink-soft">{shownBack}</span>}
         <TakeOutLine of={of} onTakeOut={() => lines.takeOut(line.id, line.name.trim() || 'A line')} />
-      </div>
+      </LineChoices>
       <LineFaults names={[path('material'), path('amount')]} />
-    </li>
+    </FoldingLine>
   );
 });

@@ -47,7 +47,9 @@ export function moveBlock(editor: Editor, id: string, by: -1 | 1): void {
     const view = blockElement(id);
     view?.scrollIntoView({ block: 'nearest' });
     const buttons = [...(view?.querySelectorAll('button') ?? [])];
-    buttons.find((button) => button.textContent === focused)?.focus();
+    // on a phone the words are folded away again: then what opens them has the focus
+    const shown = buttons.filter((button) => button.offsetParent !== null);
+    (shown.find((button) => button.textContent === focused) ?? shown.find((button) => button.hasAttribute('data-place-menu')))?.focus();
   });
 }
 

@@ -1,7 +1,7 @@
 import { mergeAttributes, Node, type Editor } from '@tiptap/core';
 import { NodeViewWrapper, ReactNodeViewRenderer, useEditorState, type ReactNodeViewProps } from '@tiptap/react';
 import { fieldId } from '#src/components/field.tsx';
-import { BlockHandleProvider } from '#src/blocks/block-frame.tsx';
+import { BlockHandleProvider } from '#src/blocks/block-handles.tsx';
 import type { DeskBlock } from '#src/blocks/desk-block.ts';
 import { deskBlocks } from '#src/blocks/desk.ts';
 import { blockTypes, pureBlocks, type BlockType } from '#src/blocks/pure.ts';

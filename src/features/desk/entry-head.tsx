@@ -20,7 +20,7 @@ export function EntryHead({ view, document, onHead }: EntryHeadProps) {
   const stageFault = useFault('stage');
   return (
     <>
-      <p className="text-note"><Link to={`/builds/${view.build.slug}`} className="lettering-name text-ink">{view.build.title}</Link></p>
+      <p className="text-note"><Link to={`/builds/${view.build.slug}`} className={`lettering-name inline-flex items-center text-ink ${tall}`}>{view.build.title}</Link></p>
       <div className="mt-3 flex flex-wrap items-start gap-x-3 gap-y-3">
         <DayField document={document} onHead={onHead} />
         <Field name="stage" label="Stage" error={stageFault}>
