@@ -1,3 +1,4 @@
+import type { MouseEvent } from 'react';
 import type { DeskView } from '#contracts/entries.ts';
 import { Button } from '#src/components/button.tsx';
 import { FootTally } from '#src/components/foot-tally.tsx';
@@ -13,7 +14,7 @@ import { PublishedActions } from './published-actions.tsx';
 import type { SaveState } from './saver.ts';
 import { tallyWords } from './tally-words.ts';
 import type { UploadsState } from './uploads.ts';
-import { keptWords } from './what-is-kept.ts';
+import { keptWords, nothingChanged } from './what-is-kept.ts';
 
 export interface DeskSideProps {
   view: DeskView;
@@ -60,12 +61,25 @@ function KeptAndSeen({ view, save, onTryAgain, onPreview }: Pick<DeskSideProps, 
   );
 }
 
+/** A link that leads to a field takes what was opened over it out of the way. */
+function closeOnLink({ target }: MouseEvent): void {
+  if (target instanceof Element && target.closest('a')) target.closest('details')?.removeAttribute('open');
+}
+
 /** The day's tally and all that is said beside it; on a phone the tally is pinned at the foot. */
 export function DeskSide(props: DeskSideProps) {
   const { view, reckoning, materials, faults, signingOff, onSignOff, going, onStopAll } = props;
   const words = tallyWords(reckoning, view.build.currency);
   const name = view.entry.published ? 'Sign off the changes' : 'Sign off the day';
   const button = <SubmitButton kind="zinc" full pending={signingOff} pendingWord="Signing off" onClick={onSignOff}>{name}</SubmitButton>;
+  const { remarks } = reckoning.derived;
+  const toLookAt = faults.length + remarks.length;
+  const beside = (
+    <>
+      <LookAtThis faults={faults} remarks={remarks} />
+      <OnTheShelf view={view} reckoning={reckoning} materials={materials} />
+    </>
+  );
   return (
     <>
       <div className="space-y-5">
@@ -75,16 +89,16 @@ export function DeskSide(props: DeskSideProps) {
             <KeptAndSeen {...props} />
           </RunningTally>
         </div>
-        <LookAtThis faults={faults} remarks={reckoning.derived.remarks} />
-        <OnTheShelf view={view} reckoning={reckoning} materials={materials} />
+        <div className="space-y-5 max-wide:hidden">{beside}</div>
         {going && <GoingUp going={going} onStopAll={onStopAll} />}
-        <PublishedActions {...props} />
+        <PublishedActions {...props} changed={!nothingChanged(props.save)} />
       </div>
       <FootTally
-        label="The day's tally, at the foot" figure={words.figure} words={words.short} groups={[[{ label: 'This day', value: words.words.replace('this day: ', '') }], ...words.groups]}
+        label="The day's tally, at the foot" figure={words.figure} words={toLookAt === 0 ? words.short : `${words.short}; ${toLookAt} to look at`} groups={[[{ label: 'This day', value: words.words.replace('this day: ', '') }], ...words.groups]}
         action={<Button kind="zinc" aria-disabled={signingOff || undefined} onClick={onSignOff}>{signingOff ? 'Signing off' : 'Sign off'}</Button>}
       >
         <KeptAndSeen {...props} />
+        <div onClickCapture={closeOnLink} className="mt-3 space-y-4 text-ink [--focus:var(--color-scribe)]">{beside}</div>
       </FootTally>
     </>
   );

@@ -14,7 +14,7 @@ export function LookAtThis({ faults, remarks }: LookAtThisProps) {
       <h2 className="mb-[7px] font-head font-[740] text-[var(--kind-text)] font-stretch-[110%]">Look at this</h2>
       <ul className="space-y-1.5">
         {faults.map((fault) => (
-          <li key={fault.path}><a href={`#${fieldId(fault.path)}`} className="text-inherit">{fault.words}</a></li>
+          <li key={fault.path}><a href={`#${fieldId(fault.path)}`} className="text-inherit max-wide:inline-flex max-wide:min-h-11 max-wide:items-center">{fault.words}</a></li>
         ))}
         {remarks.map((remark) => <li key={remark}>{remark}</li>)}
       </ul>

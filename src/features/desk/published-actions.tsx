@@ -7,6 +7,8 @@ import { Dialog } from '#src/components/dialog.tsx';
 
 interface PublishedActionsProps {
   view: DeskView;
+  /** There is something to throw away besides what readers see. */
+  changed: boolean;
   onTakeBack: () => Promise<void>;
   onThrowAway: () => Promise<void>;
 }
@@ -15,7 +17,7 @@ type Asked = 'take-back' | 'throw-away' | null;
 const quiet = 'min-h-6 text-small text-ink-soft underline underline-offset-[0.18em] hover:text-ink max-wide:min-h-11';
 
 /** What else can become of an entry; each is asked once more, saying what goes and what stays. */
-export function PublishedActions({ view, onTakeBack, onThrowAway }: PublishedActionsProps) {
+export function PublishedActions({ view, changed, onTakeBack, onThrowAway }: PublishedActionsProps) {
   const [asked, setAsked] = useState<Asked>(null);
   const [problem, setProblem] = useState<string | null>(null);
   const { published, href } = view.entry;
@@ -36,9 +38,9 @@ export function PublishedActions({ view, onTakeBack, onThrowAway }: PublishedAct
   const throwWord = published ? 'Throw the changes away' : 'Throw this entry away';
   return (
     <div className="flex flex-col items-start gap-1">
-      {published && href && <Link to={href} className="text-small">The entry as readers see it now</Link>}
+      {published && href && <Link to={href} className="inline-flex items-center text-small max-wide:min-h-11">The entry as readers see it now</Link>}
       {published && <button type="button" className={quiet} onClick={() => setAsked('take-back')}>Take it back</button>}
-      <button type="button" className={quiet} onClick={() => setAsked('throw-away')}>{throwWord}</button>
+      {(changed || !published) && <button type="button" className={quiet} onClick={() => setAsked('throw-away')}>{throwWord}</button>}
       <Dialog
         open={asked !== null} title={asked === 'take-back' ? 'Take it back' : throwWord} onClose={close}
         actions={

@@ -4,6 +4,11 @@ function clock(time: Date): string {
   return `${String(time.getHours()).padStart(2, '0')}:${String(time.getMinutes()).padStart(2, '0')}`;
 }
 
+/** Whether the text is still the one that was opened: no working copy of it anywhere. */
+export function nothingChanged({ phase, onServer, savedAt }: Pick<SaveState, 'phase' | 'onServer' | 'savedAt'>): boolean {
+  return phase.is === 'still' && !(savedAt && onServer);
+}
+
 /** What is kept where, in one line. */
 export function keptWords({ phase, keptHere, onServer, savedAt }: SaveState): string {
   const here = keptHere ? 'Kept here' : 'Not kept in this browser';

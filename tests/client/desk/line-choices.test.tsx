@@ -7,7 +7,7 @@ afterEach(cleanup);
 
 test('the choices of a line say what is chosen, and open and close from there', async () => {
   const user = userEvent.setup();
-  render(<ol><FoldingLine name="used1.lineA.line"><ChoicesButton of="Resin" words="Wasted, for each" above="2 l left" /><LineChoices><button>Take out</button></LineChoices></FoldingLine></ol>);
+  render(<ol><FoldingLine name="used1.lineA.line"><ChoicesButton of="Resin" words="Wasted, for each" above="2 l left" /><LineChoices><button type="button">Take out</button></LineChoices></FoldingLine></ol>);
   const button = screen.getByRole('button', { name: /^Wasted, for each: / });
   const choices = document.getElementById(button.getAttribute('aria-controls') ?? '');
   expect(choices?.textContent).toBe('Take out');
