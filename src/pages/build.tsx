@@ -9,6 +9,7 @@ import { Chip } from '#src/components/chip.tsx';
 import { Empty } from '#src/components/empty.tsx';
 import { EntryRow } from '#src/components/entry-row.tsx';
 import { Figure } from '#src/components/figure.tsx';
+import { JustDone } from '#src/components/just-done.tsx';
 import { Kicker } from '#src/components/kicker.tsx';
 import { PageColumns } from '#src/components/page-columns.tsx';
 import { PageFrame } from '#src/components/page-frame.tsx';
@@ -45,7 +46,7 @@ function BuildView({ build }: { build: BuildPage }) {
   const address = `/builds/${build.slug}`;
   return (
     <PageFrame
-      head={<BuildHead build={build} />}
+      head={<><JustDone /><BuildHead build={build} /></>}
       hang={build.tape.days.length > 0 ? <BuildTape title={build.title} tape={build.tape} currency={build.currency} hours={hours} otherHref={pathname + withSearch(search, { tape: hours ? null : 'hours' })} size="tall" /> : null}
     >
       <Head title={build.title} description={build.lead} {...(build.visibility === 'public' ? { path: address } : {})} feeds={{ title: build.title, rss: `${address}/feed.xml`, json: `${address}/feed.json` }} />

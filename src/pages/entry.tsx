@@ -1,5 +1,6 @@
 import { useSuspenseQuery, type QueryClient } from '@tanstack/react-query';
 import { redirect, useParams, type LoaderFunctionArgs } from 'react-router-dom';
+import { JustDone } from '#src/components/just-done.tsx';
 import { EntryView } from '#src/features/reading/entry-view.tsx';
 import { Head } from '#src/lib/head.tsx';
 import { entryPageQuery } from '#src/queries/reading.ts';
@@ -20,7 +21,7 @@ export function Component() {
   return (
     <>
       <Head title={`${data.title}, ${data.build.title}`} description={data.lead} {...(data.build.visibility === 'public' ? { path: `${address}/${data.slug}` } : {})} feeds={{ title: data.build.title, rss: `${address}/feed.xml`, json: `${address}/feed.json` }} />
-      <EntryView page={data} />
+      <EntryView page={data} notice={<JustDone />} />
     </>
   );
 }

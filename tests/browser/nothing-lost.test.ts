@@ -1,6 +1,6 @@
 import type { BrowserContext, Page } from 'playwright-core';
 import { expect, inject } from 'vitest';
-import { amountOf, deskIsOpen, expectKept, expectWords, leadField, lineOf, putIn, tally, titleField, wordsField, PATIENCE } from './support/desk-hand.ts';
+import { amountOf, deskIsOpen, expectKept, expectWords, leadField, lineOf, putIn, signOff, tally, titleField, wordsField, PATIENCE } from './support/desk-hand.ts';
 import { openDraft } from './support/draft.ts';
 import { journey } from './support/journey.ts';
 import { signIn } from './support/sign-in.ts';
@@ -151,4 +151,24 @@ journey('a block taken out is back with Ctrl+Z', async ({ open }) => {
   await page.keyboard.press('Control+z');
   await used.waitFor();
   expect(await amountOf(used).inputValue()).toBe('3 pints');
+});
+
+journey('signing off and taking back say that they are done', async ({ open }) => {
+  const { page } = await open();
+  await signIn(page, 'restorer');
+  const desk = await openDraft(page, 'Said aloud');
+  await titleField(page).fill('The keel bolts');
+  await wordsField(page).pressSequentially('They came out whole.');
+  const entry = await signOff(page);
+  await expectWords(page.getByRole('main').getByRole('status'), 'Signed off.');
+  await page.reload();
+  await page.getByRole('heading', { level: 1, name: 'The keel bolts' }).waitFor();
+  expect(await page.getByRole('main').getByRole('status').innerText()).toBe('');
+  await page.goto(desk);
+  await deskIsOpen(page);
+  expect(await page.getByRole('button', { name: 'Throw the changes away' }).count()).toBe(0);
+  await page.getByRole('button', { name: 'Take it back' }).click();
+  await page.getByRole('dialog').getByRole('button', { name: 'Take it back' }).click();
+  await expectWords(page.getByRole('status').filter({ hasText: 'Taken back' }), 'Readers no longer see it');
+  expect((await page.context().request.get(entry)).status()).toBe(404);
 });

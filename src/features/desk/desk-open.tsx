@@ -1,8 +1,9 @@
-import { useCallback, useMemo, useState } from 'react';
+import { useCallback, useEffect, useMemo, useState } from 'react';
 import { useNavigate } from 'react-router-dom';
 import type { DeskView } from '#contracts/entries.ts';
 import { AppError } from '#contracts/errors.ts';
 import { ErrorSummary } from '#src/components/error-summary.tsx';
+import type { Said } from '#src/components/just-done.tsx';
 import { PageColumns } from '#src/components/page-columns.tsx';
 import { PageFrame } from '#src/components/page-frame.tsx';
 import { BenchProvider, PicturesProvider } from '#src/blocks/bench.ts';
@@ -35,18 +36,25 @@ export interface DeskOpenProps {
   start: DeskStart;
   at: KeptAt;
   kept: KeptHere;
+  /** What was done to the entry that made the desk open again. */
+  said: string | null;
   /** The entry was taken back: the desk opens again on what stands now. */
-  onReopen: () => Promise<void>;
+  onReopen: (said: string) => Promise<void>;
 }
 
 /** The desk with an entry on it. */
-export function DeskOpen({ view, start, at, kept, onReopen }: DeskOpenProps) {
+export function DeskOpen({ view, start, at, kept, said, onReopen }: DeskOpenProps) {
   const navigate = useNavigate();
   const settled = useEntrySettled(at);
   const { saver, state: save, calls } = useSaver(view, start, at, kept);
   const [notice, setNotice] = useState<Notice | null>(null);
   const [later, setLater] = useState(false);
   const say = useCallback((words: string) => setNotice({ words }), []);
+  useEffect(() => {
+    if (said === null) return undefined;
+    const soon = setTimeout(() => say(said));
+    return () => clearTimeout(soon);
+  }, [said, say]);
   const tookOut = useCallback((words: string, restore: () => void) => setNotice({ words, putBack: restore }), []);
 
   const onGone = (gone: GoneBlock[]) => tookOut(goneWords(gone), () => putBack(writing.editor, gone));
@@ -73,7 +81,7 @@ export function DeskOpen({ view, start, at, kept, onReopen }: DeskOpenProps) {
       await calls.takeBack(version);
       await kept.forget();
       await settled();
-      await onReopen();
+      await onReopen('Taken back. Readers no longer see it, and the build’s figures leave it out.');
     } finally {
       saver.release();
     }
@@ -84,7 +92,7 @@ export function DeskOpen({ view, start, at, kept, onReopen }: DeskOpenProps) {
       await calls.discard(version);
       await kept.forget();
       await settled();
-      await navigate(view.entry.href ?? `/builds/${at.build}`);
+      await navigate(view.entry.href ?? `/builds/${at.build}`, { state: { said: view.entry.published ? 'The changes are thrown away. This is what readers see, as before.' : 'The entry is thrown away.' } satisfies Said });
     } catch (cause) {
       saver.release();
       if (!(cause instanceof AppError) || cause.code !== 'newer-exists') throw cause;

@@ -2,6 +2,7 @@ import { useState } from 'react';
 import { useNavigate } from 'react-router-dom';
 import { AppError } from '#contracts/errors.ts';
 import type { FormError } from '#src/components/error-summary.tsx';
+import type { Said } from '#src/components/just-done.tsx';
 import { useEntrySettled, type useEntryCalls } from '#src/queries/entries.ts';
 import type { DeskReckoning } from './desk-ledger.ts';
 import { deskFaults } from './faults.ts';
@@ -69,7 +70,7 @@ export function useSignOff({ at, kept, saver, calls, reckonNow, uploads }: SignO
       const { href } = await calls.signOff({ version, document: reckoning.document });
       await kept.forget();
       await settled();
-      await navigate(href);
+      await navigate(href, { state: { said: 'Signed off. The build’s figures count it now.' } satisfies Said });
     } catch (cause) {
       if (!(cause instanceof AppError)) throw cause;
       refused(cause, reckoning);
