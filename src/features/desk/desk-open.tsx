@@ -101,9 +101,9 @@ export function DeskOpen({ view, start, at, kept, said, onReopen }: DeskOpenProp
     }
   };
   const newer = save.phase.is === 'newer' ? save.phase.newer : null;
-  const choose = (version: number, text: typeof document) => {
+  const choose = (text: typeof document) => {
     setLater(false);
-    writing.goOnWith(version, text);
+    if (newer) writing.goOnWith(newer, text);
   };
   return (
     <BenchProvider value={bench}>
@@ -140,7 +140,7 @@ export function DeskOpen({ view, start, at, kept, said, onReopen }: DeskOpenProp
         </PageColumns>
         <Notices saving={spokenState(save)} notice={notice} onClose={() => setNotice(null)} />
         {newer && !later && (
-          <NewerTextDialog view={view} context={{ measures: view.build.measures, currency: view.build.currency, materials: byId }} mine={document} newer={newer} onChoose={choose} onLater={() => setLater(true)} />
+          <NewerTextDialog view={view} context={{ measures: view.build.measures, currency: view.build.currency, materials: byId }} mine={document} base={save.base} newer={newer} onChoose={choose} onLater={() => setLater(true)} />
         )}
       </PageFrame>
     </PicturesProvider>

@@ -10,15 +10,21 @@ export interface DeskStart {
   readonly document: EntryDocument;
   /** When the text was kept here that had not reached the server and is taken up now. */
   readonly takenUp: Date | null;
+  /** The version of the server's text this one stands on, and that text where it is known. */
+  readonly version: number;
+  readonly base: EntryDocument | null;
   /** The server has a newer text than the one this browser's stands on. */
   readonly newer: NewerText | null;
   readonly pictures: readonly KeptPicture[];
 }
 
 export function startOf({ entry }: Pick<DeskView, 'entry'>, kept: KeptText | null, pictures: readonly KeptPicture[]): DeskStart {
-  if (!kept || kept.onServer || sameText(kept.document, entry.document)) return { document: entry.document, takenUp: null, newer: null, pictures };
-  const newer = kept.version === entry.version ? null : { version: entry.version, document: entry.document };
-  return { document: kept.document, takenUp: kept.at, newer, pictures };
+  if (!kept || kept.onServer || sameText(kept.document, entry.document)) return { document: entry.document, takenUp: null, version: entry.version, base: entry.document, newer: null, pictures };
+  const onNewest = kept.version === entry.version;
+  return {
+    document: kept.document, takenUp: kept.at, version: kept.version, base: onNewest ? entry.document : kept.base,
+    newer: onNewest ? null : { version: entry.version, document: entry.document }, pictures,
+  };
 }
 
 /** Reads what this browser keeps of the entry before the desk opens; a browser that keeps nothing opens on the server's text. */

@@ -17,6 +17,8 @@ export interface KeptText {
   readonly document: EntryDocument;
   /** The version of the server's text it stands on. */
   readonly version: number;
+  /** That text itself, where it is known: what somebody changed can then be told from what somebody else did. */
+  readonly base: EntryDocument | null;
   readonly onServer: boolean;
   readonly at: Date;
 }
@@ -51,6 +53,12 @@ function keyOf({ handle, guid }: KeptKey): string {
   return `${handle}/${guid}`;
 }
 
+/** A text as this version of the site has it: an older one kept it, perhaps. */
+function readAgain(kept: EntryDocument): EntryDocument | null {
+  const parsed = entryDocument.safeParse({ ...kept, content: steppedUp(kept.content) });
+  return parsed.success ? parsed.data : null;
+}
+
 /** What this browser keeps of a desk, by account: the text not yet on the server, and the pictures not yet gone up. */
 export function keptHere(of: KeptKey) {
   const entry = keyOf(of);
@@ -58,9 +66,8 @@ export function keptHere(of: KeptKey) {
     read: async (): Promise<KeptText | null> => {
       const kept = await (await store()).get('texts', entry);
       if (!kept) return null;
-      // kept by an older version of the site, perhaps
-      const parsed = entryDocument.safeParse({ ...kept.document, content: steppedUp(kept.document.content) });
-      return parsed.success ? { ...kept, document: parsed.data } : null;
+      const document = readAgain(kept.document);
+      return document && { ...kept, document, base: kept.base ? readAgain(kept.base) : null };
     },
     keep: async (text: Omit<KeptText, 'at'>): Promise<void> => {
       await (await store()).put('texts', { ...text, at: new Date() }, entry);

@@ -5,14 +5,16 @@ import { Dialog } from '#src/components/dialog.tsx';
 import type { EntryContext } from '#src/blocks/derive-entry.ts';
 import type { EntryDocument } from '#src/blocks/pure.ts';
 import type { NewerText } from './saver.ts';
-import { differencesOf, mergedText, usualSide, type Difference, type Side } from './two-texts.ts';
+import { differencesOf, mergedText, usualSide, usualWords, type Difference, type Side } from './two-texts.ts';
 
 export interface NewerTextDialogProps {
   view: DeskView;
   context: EntryContext;
   mine: EntryDocument;
+  /** The text both stand on, where it is known. */
+  base: EntryDocument | null;
   newer: NewerText;
-  onChoose: (version: number, document: EntryDocument) => void;
+  onChoose: (document: EntryDocument) => void;
   /** Goes on writing; what is typed stays in this browser until the two texts are brought together. */
   onLater: () => void;
 }
@@ -24,22 +26,21 @@ function shown(words: string | null): ReactNode {
 }
 
 /** Two texts of one entry, side by side where they differ. */
-export function NewerTextDialog({ view, context, mine, newer, onChoose, onLater }: NewerTextDialogProps) {
+export function NewerTextDialog({ view, context, mine, base, newer, onChoose, onLater }: NewerTextDialogProps) {
   const stages = useMemo(() => new Map(view.stages.map(({ id, title }) => [id, title])), [view.stages]);
-  const differences = useMemo(() => differencesOf(mine, newer.document, context, stages), [mine, newer.document, context, stages]);
+  const differences = useMemo(() => differencesOf({ mine, theirs: newer.document, base }, context, stages), [mine, base, newer.document, context, stages]);
   const [picked, setPicked] = useState<ReadonlyMap<string, Side>>(new Map());
   const sideOf = (difference: Difference) => picked.get(difference.key) ?? usualSide(difference);
-  const all = (side: Side) => onChoose(newer.version, side === 'mine' ? mine : newer.document);
-  const together = () => onChoose(newer.version, mergedText(mine, newer.document, new Map(differences.map((one) => [one.key, sideOf(one)]))));
+  const all = (side: Side) => onChoose(side === 'mine' ? mine : newer.document);
+  const together = () => onChoose(mergedText(mine, newer.document, new Map(differences.map((one) => [one.key, sideOf(one)]))));
   return (
     <Dialog
-      open title="Somebody saved a newer text" onClose={onLater}
+      open title="Somebody saved a newer text" closeWord="Later" onClose={onLater}
       actions={
         <>
           <Button onClick={together}>Go on with what is picked</Button>
           <Button kind="plain" onClick={() => all('mine')}>Keep all of mine</Button>
           <Button kind="plain" onClick={() => all('theirs')}>Keep all of theirs</Button>
-          <Button kind="quiet" onClick={onLater}>Later</Button>
         </>
       }
     >
@@ -65,7 +66,8 @@ function Piece({ difference, side, onSide }: { difference: Difference; side: Sid
   );
   return (
     <fieldset>
-      <legend className="mb-1 text-small font-semibold">{difference.label}</legend>
+      <legend className="text-small font-semibold">{difference.label}</legend>
+      <p className="mb-1 text-note text-ink-soft">{usualWords(difference)}</p>
       <div className="grid gap-2.5 wide:grid-cols-2">
         {choice('mine', 'Yours')}
         {choice('theirs', 'Theirs')}

@@ -27,14 +27,17 @@ export interface SaveState {
   /** When it last reached the server, or nothing yet. */
   readonly savedAt: Date | null;
   readonly version: number;
+  /** The server's text of that version, where it is known. */
+  readonly base: EntryDocument | null;
 }
 
 export interface SaverParts {
   readonly version: number;
+  readonly base: EntryDocument | null;
   readonly savedAt: Date | null;
   readonly save: (version: number, document: EntryDocument) => Promise<{ version: number }>;
   /** Keeps a text in this browser; `onServer` once it has reached the server. */
-  readonly keep: (record: { document: EntryDocument; version: number; onServer: boolean }) => Promise<void>;
+  readonly keep: (record: { document: EntryDocument; version: number; base: EntryDocument | null; onServer: boolean }) => Promise<void>;
   /** False when somebody else is signed in by now: then nothing is sent in their name. */
   readonly isStillMe: () => Promise<boolean>;
   readonly now: () => Date;
@@ -47,8 +50,8 @@ export interface Saver {
   /** Sends at once what has not been sent, and waits for the answer. */
   readonly flush: () => Promise<void>;
   readonly tryAgain: () => void;
-  /** Says that the text the writer went on with stands on this version. */
-  readonly settle: (version: number, document: EntryDocument) => void;
+  /** Says that the text the writer went on with stands on this newer one. */
+  readonly settle: (newer: NewerText, document: EntryDocument) => void;
   readonly meetNewer: (newer: NewerText) => void;
   /** Waits for what is under way, and sends nothing until `release`. */
   readonly hold: () => Promise<number>;
@@ -63,7 +66,7 @@ const passing = new Set(['unreachable', 'broken', 'not-ready', 'too-many']);
 
 /** Keeps every change in the browser at once, and on the server a moment after the last one. */
 export function makeSaver(parts: SaverParts): Saver {
-  let state: SaveState = { phase: { is: 'still' }, keptHere: true, onServer: true, savedAt: parts.savedAt, version: parts.version };
+  let state: SaveState = { phase: { is: 'still' }, keptHere: true, onServer: true, savedAt: parts.savedAt, version: parts.version, base: parts.base };
   let unsent: EntryDocument | null = null;
   let sending: Promise<void> | null = null;
   let timer: ReturnType<typeof setTimeout> | undefined;
@@ -81,7 +84,7 @@ export function makeSaver(parts: SaverParts): Saver {
     // a newer text is on its way in already
     if (unsent !== null && unsent !== document) return;
     try {
-      await parts.keep({ document, version: state.version, onServer });
+      await parts.keep({ document, version: state.version, base: state.base, onServer });
       if (unsent === document || onServer) set({ keptHere: true });
     } catch (cause) {
       if (!(cause instanceof Error)) throw cause;
@@ -103,7 +106,7 @@ export function makeSaver(parts: SaverParts): Saver {
     failures = 0;
     const done = unsent === document;
     if (done) unsent = null;
-    set({ version, savedAt: parts.now(), onServer: done, phase: { is: done ? 'still' : 'waiting' } });
+    set({ version, base: document, savedAt: parts.now(), onServer: done, phase: { is: done ? 'still' : 'waiting' } });
     keep(unsent ?? document, done);
     if (!done) schedule(pause);
   };
@@ -170,10 +173,10 @@ export function makeSaver(parts: SaverParts): Saver {
       await keeping;
     },
     tryAgain: () => void again(),
-    settle: (version, document) => {
+    settle: ({ version, document: base }, document) => {
       unsent = document;
       failures = 0;
-      set({ version, onServer: false, keptHere: false, phase: { is: 'waiting' } });
+      set({ version, base, onServer: false, keptHere: false, phase: { is: 'waiting' } });
       keep(document, false);
       schedule(0);
     },

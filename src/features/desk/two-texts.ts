@@ -13,6 +13,8 @@ export interface Difference {
   /** Nothing where that text does not have it. */
   readonly mine: string | null;
   readonly theirs: string | null;
+  /** Who changed it, where the text both stand on is known. */
+  readonly changedBy: 'me' | 'them' | 'both' | null;
 }
 
 type HeadField = 'title' | 'lead' | 'day' | 'dayTo' | 'stage' | 'work';
@@ -44,9 +46,26 @@ function nodeWords(node: TopNode | undefined, context: EntryContext): string | n
   return isProse(node) ? plainWords(node) : deskBlockOf(node.type)?.words(node.attrs.data, context) ?? '';
 }
 
-/** The side to go on with unless the writer picks another: theirs where mine holds nothing, so that none of it is lost by not looking. */
-export function usualSide({ mine }: Difference): Side {
+/** The side to go on with unless the writer picks another: that of whoever changed it alone; else theirs where mine holds nothing, so that none of it is lost by not looking. */
+export function usualSide({ mine, changedBy }: Difference): Side {
+  if (changedBy === 'me' || changedBy === 'them') return changedBy === 'me' ? 'mine' : 'theirs';
   return (mine ?? '').trim() === '' ? 'theirs' : 'mine';
+}
+
+/** Why that side is picked, in words. */
+export function usualWords(difference: Difference): string {
+  const { changedBy } = difference;
+  if (changedBy === 'them') return 'Only they changed this: theirs unless you pick yours.';
+  if (changedBy === 'me') return 'Only you changed this: yours unless you pick theirs.';
+  const both = changedBy === 'both' ? 'Both changed this' : 'The two differ';
+  return usualSide(difference) === 'mine' ? `${both}: yours unless you pick theirs.` : `${both}, and yours has nothing here: theirs unless you pick yours.`;
+}
+
+/** Who made a piece another than it was. */
+function changer<T>(mine: T, theirs: T, base: T): 'me' | 'them' | 'both' {
+  const was = comparable(base ?? null);
+  if (comparable(mine ?? null) === was) return 'them';
+  return comparable(theirs ?? null) === was ? 'me' : 'both';
 }
 
 function byId(document: EntryDocument): Map<string, TopNode> {
@@ -64,16 +83,23 @@ function idsInOrder(mine: EntryDocument, theirs: EntryDocument): string[] {
   return order;
 }
 
-export function differencesOf(mine: EntryDocument, theirs: EntryDocument, context: EntryContext, stages: ReadonlyMap<number, string>): Difference[] {
+export interface TwoTexts {
+  readonly mine: EntryDocument;
+  readonly theirs: EntryDocument;
+  /** The text both stand on, where it is known. */
+  readonly base: EntryDocument | null;
+}
+
+export function differencesOf({ mine, theirs, base }: TwoTexts, context: EntryContext, stages: ReadonlyMap<number, string>): Difference[] {
   const facts = heads.filter(({ field }) => comparable(mine[field]) !== comparable(theirs[field])).map(({ field, label }) => ({
-    key: field, label, mine: headWords(mine, field, stages), theirs: headWords(theirs, field, stages),
+    key: field, label, mine: headWords(mine, field, stages), theirs: headWords(theirs, field, stages), changedBy: base && changer(mine[field], theirs[field], base[field]),
   }));
-  const [own, other] = [byId(mine), byId(theirs)];
+  const [own, other, before] = [byId(mine), byId(theirs), base && byId(base)];
   const pieces = idsInOrder(mine, theirs).flatMap((id): Difference[] => {
     const [a, b] = [own.get(id), other.get(id)];
     const node = a ?? b;
     if (!node || (a && b && comparable(a) === comparable(b))) return [];
-    return [{ key: `node:${id}`, label: nodeLabel(node), mine: nodeWords(a, context), theirs: nodeWords(b, context) }];
+    return [{ key: `node:${id}`, label: nodeLabel(node), mine: nodeWords(a, context), theirs: nodeWords(b, context), changedBy: before && changer(a, b, before.get(id)) }];
   });
   return [...facts, ...pieces];
 }

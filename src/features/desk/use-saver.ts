@@ -12,7 +12,8 @@ export function useSaver(view: DeskView, start: DeskStart, at: KeptAt, kept: Kep
   const client = useQueryClient();
   const calls = useEntryCalls(at);
   const [saver] = useState(() => makeSaver({
-    version: view.entry.version,
+    version: start.version,
+    base: start.base,
     savedAt: view.entry.savedAt === null ? null : new Date(view.entry.savedAt),
     save: (version, document) => calls.saveWorking({ version, document }),
     keep: kept.keep,

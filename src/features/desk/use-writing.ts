@@ -9,7 +9,7 @@ import { KeepsBlocks } from './keeps-blocks.ts';
 import { pastedWords } from './pasted-words.ts';
 import { proseExtensions } from './prose-extensions.ts';
 import { sameText } from './same-text.ts';
-import type { Saver } from './saver.ts';
+import type { NewerText, Saver } from './saver.ts';
 import type { DeskStart } from './desk-start.ts';
 import { editorContent, storedContent } from './stored-content.ts';
 import { goneIn, type GoneBlock } from './took-out.ts';
@@ -79,11 +79,11 @@ export function useWriting({ start, saver, onGone, onFiles }: WritingParts) {
   });
 
   /** Goes on with another text: one of two was chosen, or put together from both. */
-  const goOnWith = (version: number, text: EntryDocument) => {
+  const goOnWith = (newer: NewerText, text: EntryDocument) => {
     current.current = text;
     setDocument(text);
     editor.commands.setContent(editorContent(text.content), { emitUpdate: false });
-    saver.settle(version, text);
+    saver.settle(newer, text);
   };
   return { document, current, edit, editor, goOnWith };
 }

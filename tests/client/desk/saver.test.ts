@@ -5,7 +5,7 @@ import { makeSaver, type SaverParts } from '#src/features/desk/saver.ts';
 import { keptWords } from '#src/features/desk/what-is-kept.ts';
 import { documentOf, usedNode } from './desk-view.ts';
 
-interface Kept { document: EntryDocument; version: number; onServer: boolean }
+interface Kept { document: EntryDocument; version: number; base: EntryDocument | null; onServer: boolean }
 
 // A server that holds one text and its version, and a browser that keeps the last text given.
 function bench(part: Partial<SaverParts> = {}) {
@@ -19,7 +19,7 @@ function bench(part: Partial<SaverParts> = {}) {
     return { version: server.version };
   });
   const saver = makeSaver({
-    version: 3, savedAt: null, save, isStillMe: () => Promise.resolve(true), now: () => new Date(2026, 10, 14, 12, 4),
+    version: 3, base: documentOf(), savedAt: null, save, isStillMe: () => Promise.resolve(true), now: () => new Date(2026, 10, 14, 12, 4),
     keep: (record) => { kept.push(record); return Promise.resolve(); }, ...part,
   });
   return { server, kept, save, saver };
@@ -36,12 +36,12 @@ describe('keeping what is typed', () => {
     saver.change(titled('a'));
     saver.change(titled('ab'));
     await vi.advanceTimersByTimeAsync(100);
-    expect(kept.at(-1)).toEqual({ document: titled('ab'), version: 3, onServer: false });
+    expect(kept.at(-1)).toEqual({ document: titled('ab'), version: 3, base: documentOf(), onServer: false });
     expect(save).not.toHaveBeenCalled();
     await vi.advanceTimersByTimeAsync(1200);
     expect(save).toHaveBeenCalledTimes(1);
     expect(server.document.title).toBe('ab');
-    expect(kept.at(-1)).toEqual({ document: titled('ab'), version: 4, onServer: true });
+    expect(kept.at(-1)).toEqual({ document: titled('ab'), version: 4, base: titled('ab'), onServer: true });
     expect(keptWords(saver.state())).toBe('Kept here and on the server, 12:04');
   });
 
@@ -55,7 +55,7 @@ describe('keeping what is typed', () => {
     answer({ version: 4 });
     await vi.advanceTimersByTimeAsync(0);
     expect(saver.state().onServer).toBe(false);
-    expect(kept.at(-1)).toEqual({ document: titled('b'), version: 4, onServer: false });
+    expect(kept.at(-1)).toEqual({ document: titled('b'), version: 4, base: titled('a'), onServer: false });
     await vi.advanceTimersByTimeAsync(1200);
     expect(save).toHaveBeenLastCalledWith(4, titled('b'));
   });
@@ -86,7 +86,7 @@ describe('keeping what is typed', () => {
     await vi.advanceTimersByTimeAsync(60_000);
     expect(save).toHaveBeenCalledTimes(1);
     expect(saver.state()).toMatchObject({ keptHere: true, onServer: false });
-    saver.settle(9, titled('both'));
+    saver.settle({ version: 9, document: titled('theirs') }, titled('both'));
     await vi.advanceTimersByTimeAsync(0);
     expect(server.document.title).toBe('both');
   });

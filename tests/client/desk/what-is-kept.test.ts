@@ -2,7 +2,7 @@ import { expect, test } from 'vitest';
 import { keptWords, nothingChanged } from '#src/features/desk/what-is-kept.ts';
 import type { SaveState } from '#src/features/desk/saver.ts';
 
-const still: SaveState = { phase: { is: 'still' }, keptHere: true, onServer: true, savedAt: null, version: 3 };
+const still: SaveState = { phase: { is: 'still' }, keptHere: true, onServer: true, savedAt: null, version: 3, base: null };
 
 test('an entry opened and not written in has nothing to throw away', () => {
   expect(nothingChanged(still)).toBe(true);
