@@ -49,23 +49,27 @@ export function blankBought(): BoughtData {
 
 const stocked = (line: BoughtLine) => line.goes === 'shelf' || line.goes === 'shed';
 
-/** Reads the typed money of a receipt, gathering what cannot be read. */
-function moneyReader(currency: string, faults: BlockFault[]) {
+/** Reads the typed money of a receipt, gathering what is wrong, and where something stands that is no money. */
+function moneyReader(currency: string, faults: BlockFault[], unread: string[]) {
   return (text: string, path: string, needed: boolean): number => {
     if (text.trim() === '') {
       if (needed) faults.push({ path, problem: 'Say what it came to, such as 12.50.' });
       return 0;
     }
     const reading = readMoney(text, currency);
-    if (!reading.ok) faults.push({ path, problem: reading.problem });
+    if (!reading.ok) {
+      faults.push({ path, problem: reading.problem });
+      unread.push(path);
+    }
     return reading.ok ? reading.value.minor : 0;
   };
 }
 
-function rateOf(data: BoughtData, currency: string, into: string, faults: BlockFault[]): Fraction {
+function rateOf(data: BoughtData, currency: string, into: string, faults: BlockFault[], unread: string[]): Fraction {
   if (currency === into) return new Fraction(1);
   if (!/^\d+(\.\d+)?$/.test(data.rate.trim()) || Number(data.rate) === 0) {
     faults.push({ path: 'rate', problem: `Say how much ${into} one ${currency} cost, such as 0.86.` });
+    unread.push('rate');
     return new Fraction(1);
   }
   return new Fraction(data.rate.trim());
@@ -79,21 +83,22 @@ function fitsConverted(due: number, rate: Fraction, currency: string, into: stri
   return rate.mul(due).mul(new Fraction(10).pow(exponentOf(into) - exponentOf(currency))).lte(mostConverted);
 }
 
-interface BoughtReading { currency: string; rate: Fraction; discount: number; delivery: number; tax: number; paperTotal: number | null; own: number[]; door: DoorCosts; faults: BlockFault[] }
+interface BoughtReading { currency: string; rate: Fraction; discount: number; delivery: number; tax: number; paperTotal: number | null; own: number[]; door: DoorCosts; faults: BlockFault[]; /** Paths of figures that cannot be read: while there are any the sums are not the receipt's. */ unread: string[] }
 
 /** A receipt's figures from what was typed, with every fault. The desk and the ledger both read it here. */
 export function readBought(data: BoughtData, context: BlockContext): BoughtReading {
   const faults: BlockFault[] = [];
+  const unread: string[] = [];
   const named = data.currency ?? context.currency;
   if (!isCurrency(named)) faults.push({ path: 'currency', problem: `“${named}” is not a currency on the ISO 4217 list.` });
   const currency = isCurrency(named) ? named : context.currency;
-  const read = moneyReader(currency, faults);
+  const read = moneyReader(currency, faults, unread);
   const own = data.lines.map((line) => read(line.money, `${line.id}.money`, true));
   const [discount, delivery, tax] = [read(data.discount, 'discount', false), read(data.delivery, 'delivery', false), read(data.tax, 'tax', false)];
   const paperTotal = data.paperTotal.trim() === '' ? null : read(data.paperTotal, 'paperTotal', false);
   const lineSum = own.reduce((sum, value) => sum + value, 0);
   if (discount > lineSum && data.lines.length > 0) faults.push({ path: 'discount', problem: 'The discount is more than the lines come to.' });
-  const rate = rateOf(data, currency, context.currency, faults);
+  const rate = rateOf(data, currency, context.currency, faults, unread);
   const fits = currency === context.currency || fitsConverted(Math.max(lineSum + delivery + tax, paperTotal ?? 0), rate, currency, context.currency);
   if (!fits) faults.push({ path: 'rate', problem: `That comes to more ${context.currency} than a receipt can hold: look at the rate again.` });
   const priced = (minor: number) => (fits ? minor : 0);
@@ -101,7 +106,7 @@ export function readBought(data: BoughtData, context: BlockContext): BoughtReadi
     currency, into: context.currency, rate, lines: data.lines.map((line, index) => ({ key: line.id, value: priced(own[index] ?? 0) })),
     discount: priced(Math.min(discount, lineSum)), delivery: priced(delivery), tax: priced(tax), paperTotal: paperTotal === null ? null : priced(paperTotal),
   });
-  return { currency, rate, discount: Math.min(discount, lineSum), delivery, tax, paperTotal, own, door, faults };
+  return { currency, rate, discount: Math.min(discount, lineSum), delivery, tax, paperTotal, own, door, faults, unread };
 }
 
 function lineFaults(line: BoughtLine, context: BlockContext): BlockFault[] {
@@ -140,6 +145,11 @@ function amountWords(line: BoughtLine, context: ProjectionContext): string {
   return [amount, line.goes === 'shelf' ? '' : lineGoesWords[line.goes].toLowerCase(), line.onOrder && stocked(line) ? 'on order' : ''].filter(Boolean).join(', ');
 }
 
+/** "delivery, tax and discount" */
+function joined(words: readonly string[]): string {
+  return words.length < 2 ? words.join('') : `${words.slice(0, -1).join(', ')} and ${words.at(-1)}`;
+}
+
 function sentence(words: string): string {
   return words.charAt(0).toUpperCase() + words.slice(1);
 }
@@ -150,7 +160,7 @@ function boughtSlip(_id: string, data: BoughtData, context: ProjectionContext): 
   const shares = [reading.delivery > 0 ? 'delivery' : '', reading.tax > 0 ? 'tax' : '', reading.discount > 0 ? 'discount' : ''].filter(Boolean);
   const notes = [
     shed > 0 ? `${formatMoney(shed, context.currency)} of it to the shed` : '',
-    shares.length > 0 ? `each line with its share of ${shares.join(' and ')}` : '',
+    shares.length > 0 ? `each line with its share of ${joined(shares)}` : '',
     reading.currency === context.currency ? '' : `paid in ${reading.currency}`,
     data.basis === 'paper' ? '' : data.basis === 'memory' ? 'from memory' : 'a guess',
   ].filter(Boolean);

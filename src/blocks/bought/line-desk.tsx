@@ -19,8 +19,8 @@ interface BoughtLineDeskProps {
   lines: LineActions<BoughtLine>;
   /** The receipt's. */
   currency: string;
-  /** Minor units of the build's currency. */
-  door: number;
+  /** Minor units of the build's currency; nothing while the receipt's sums cannot be told. */
+  door: number | null;
   foreign: boolean;
 }
 
@@ -83,8 +83,8 @@ export const BoughtLineDesk = memo(function BoughtLineDesk({ block, line, lines,
   const stocked = line.goes === 'shelf' || line.goes === 'shed';
   const left = reckoning?.left;
   const own = readMoney(line.money, currency);
-  const differs = own.ok && (foreign || own.value.minor !== door);
-  const after = [shownBack, stocked && left ? `then ${inWords(left)} there` : '', differs ? `${formatMoney(door, context.currency)} to the door` : ''].filter(Boolean);
+  const atDoor = door !== null && own.ok && (foreign || own.value.minor !== door) ? `${formatMoney(door, context.currency)} to the door` : '';
+  const after = [shownBack, stocked && left ? `then ${inWords(left)} there` : '', atDoor].filter(Boolean);
   return (
     <li className="m-0! border-b border-rule py-2.5">
       <div className={`grid grid-cols-[minmax(0,1fr)_7rem] items-start gap-x-3.5 gap-y-1.5 ${stocked ? 'wide:grid-cols-[minmax(0,1fr)_auto_7rem]' : ''}`}>

@@ -5,7 +5,8 @@ import type { MaterialLedger } from '#domain/ledger/price.ts';
 import { whatOneTakes } from '#domain/one-takes.ts';
 import { exactFrom, exactText } from '#domain/quantity.ts';
 import { broughtToBuild, deriveEntry, readEntry, type EntryDerivation, type EntryDocument, type MaterialFacts } from '#src/blocks/pure.ts';
-import type { EntryContext } from '#src/blocks/derive-entry.ts';
+import { readBought } from '#src/blocks/bought/bought.ts';
+import { contextOf, type EntryContext } from '#src/blocks/derive-entry.ts';
 import type { LineReckoning } from '#src/blocks/figures-store.ts';
 import { lineKey, shelfKey, shelfReplay, type ShelfName } from './shelf-replay.ts';
 import { stageReckoning, type StageReckoning } from './stage-reckoning.ts';
@@ -20,6 +21,8 @@ export interface DayFigures {
   readonly day: number;
   /** To the door, without what went to the shed or is not ours. */
   readonly bought: number;
+  /** A figure of a receipt cannot be read, so that what was bought cannot be told. */
+  readonly boughtUnread: boolean;
   /** Lines not bought yet, or not all of it: their money is not settled. */
   readonly linesShort: number;
   /** What those would cost at the last prices paid, as far as any is known; in no sum. */
@@ -95,7 +98,7 @@ function isShort(line: LineReckoning | undefined): boolean {
   return line !== undefined && exactFrom(line.short).gt(0);
 }
 
-function figuresOf(derived: EntryDerivation, lines: ReadonlyMap<string, LineReckoning>): DayFigures {
+function figuresOf(derived: EntryDerivation, lines: ReadonlyMap<string, LineReckoning>, boughtUnread: boolean): DayFigures {
   const valueOf = (kind: 'used' | 'wasted') => sumOf(derived.uses.filter((use) => use.kind === kind).map((use) => lines.get(lineKey(use.block, use.line))?.value ?? 0));
   const [used, wasted, costs] = [valueOf('used'), valueOf('wasted'), costsOf(derived)];
   const short = derived.uses.map((use) => lines.get(lineKey(use.block, use.line))).filter(isShort);
@@ -103,7 +106,7 @@ function figuresOf(derived: EntryDerivation, lines: ReadonlyMap<string, LineReck
   const handsOn = derived.times.filter(({ kind }) => kind !== 'waiting');
   return {
     used, wasted, costs, day: used + wasted + costs,
-    bought: sumOf(derived.receipts.map(broughtToBuild)),
+    bought: sumOf(derived.receipts.map(broughtToBuild)), boughtUnread,
     linesShort: short.length,
     estimate: estimates.length === 0 ? null : sumOf(estimates),
     minutes: sumOf(handsOn.map(({ minutes }) => minutes)),
@@ -141,7 +144,8 @@ export function deskLedger(view: DeskView): DeskLedger {
       const derived = deriveEntry(document, context);
       const ledgers = replay.price(derived);
       const lines = lineReckonings(derived, ledgers);
-      const figures = figuresOf(derived, lines);
+      const unread = document.content.some((node) => node.type === 'bought' && readBought(node.attrs.data, contextOf(document, context)).unread.length > 0);
+      const figures = figuresOf(derived, lines, unread);
       return { document, derived, lines, figures, one: oneOf(derived, lines), stage: stageReckoning(view, document, derived, figures, lines), shelf: shelfAfter(ledgers) };
     },
     replayed: replay.replayed,

@@ -32,7 +32,7 @@ export function tallyWords(reckoning: DeskReckoning, currency: string): TallyWor
   const parts = [`${money(figures.used)} used`, figures.wasted > 0 ? `${money(figures.wasted)} wasted` : '', figures.costs > 0 ? `${money(figures.costs)} in costs` : ''].filter(Boolean);
   const name = one && oneOfWork(one);
   const takes = one && name ? [{ label: `One ${name} takes`, value: [formatMoneySoFar(one.money, currency, one.unsettled), one.minutes > 0 ? formatMinutes(one.minutes) : ''].filter(Boolean).join(', ') }] : [];
-  const bought = figures.bought > 0 ? [{ label: 'Bought, to the door', value: money(figures.bought) }] : [];
+  const bought = figures.bought > 0 || figures.boughtUnread ? [{ label: 'Bought, to the door', value: figures.boughtUnread ? '—' : money(figures.bought) }] : [];
   const short = figures.linesShort > 0 ? [{ label: 'Not bought yet', value: [plural(figures.linesShort, 'line', 'lines'), figures.estimate === null ? '' : `about ${money(figures.estimate)}`].filter(Boolean).join(', ') }] : [];
   return {
     figure: money(figures.day),
