@@ -4,9 +4,9 @@ import { expect } from 'vitest';
 /** How long the hand waits for the page to say something: other tests may hold the machine. */
 export const PATIENCE = { timeout: 40_000 } as const; // ms
 
-/** Waits until a place says all of these. */
+/** Waits until a place says all of these; spaces that keep a figure on one line are spaces. */
 export async function expectWords(place: Locator, ...words: readonly string[]): Promise<void> {
-  for (const one of words) await expect.poll(() => place.innerText(), PATIENCE).toContain(one);
+  for (const one of words) await expect.poll(async () => (await place.innerText()).replaceAll('\u00a0', ' '), PATIENCE).toContain(one);
 }
 
 export interface BuildFacts {
