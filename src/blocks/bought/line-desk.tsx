@@ -90,7 +90,7 @@ export const BoughtLineDesk = memo(function BoughtLineDesk({ block, line, lines,
       <div className={`grid grid-cols-[minmax(0,1fr)_7rem] items-start gap-x-3.5 gap-y-1.5 ${stocked ? 'wide:grid-cols-[minmax(0,1fr)_auto_7rem]' : ''}`}>
         <div className={stocked ? 'max-wide:col-span-2' : ''}><What block={block} line={line} lines={lines} /></div>
         {stocked && <AmountInput block={block} line={line} onLine={(part) => lines.change(line.id, part)} onEnter={() => lines.goTo(line.id, 'money')} />}
-        <FigureInput name={path('money')} label={`What ${of} came to on the paper, in ${currency}`} placeholder="12.50" value={line.money} onValue={(money) => lines.change(line.id, { money })} onEnter={() => lines.goOn(line.id)} />
+        <FigureInput name={path('money')} label={`What ${of} came to on the paper, in ${currency}`} placeholder="e.g. 12.50" value={line.money} onValue={(money) => lines.change(line.id, { money })} onEnter={() => lines.goOn(line.id)} />
       </div>
       <div className="mt-1 flex flex-wrap items-center gap-x-3.5 gap-y-1">
         <Where block={block} line={line} lines={lines} />

@@ -28,7 +28,7 @@ export function ReceiptHead({ block, data, set }: ReceiptFieldsProps) {
       <LabelledSelect name={path('basis')} label="Figures are" value={data.basis} options={optionsOf(basisWords)} onValue={(basis) => set({ basis: basisOf(basis) })} />
       {currency !== context.currency && (
         <div className="col-span-2 wide:col-span-4">
-          <LabelledInput name={path('rate')} label={`${context.currency} for one ${currency}`} figure placeholder="0.86" hint="As your bank or the shop counted it. The whole receipt is turned once." value={data.rate} onValue={(rate) => set({ rate })} />
+          <LabelledInput name={path('rate')} label={`${context.currency} for one ${currency}`} figure placeholder="e.g. 0.86" hint="As your bank or the shop counted it. The whole receipt is turned once." value={data.rate} onValue={(rate) => set({ rate })} />
         </div>
       )}
     </div>

@@ -27,7 +27,7 @@ function CautionDesk({ id, data, onChange }: BlockDeskProps<CautionData>) {
         )}
         <LabelledInput name={`${id}.title`} label={listed ? 'Another heading, if you want one' : 'Heading'} value={data.title} maxLength={160} onValue={(title) => onChange((now) => ({ ...now, title }))} />
         <TextArea
-          name={`${id}.words`} label={listed ? 'Your own words instead, if you want them' : 'What to beware of'} rows={2} value={data.words} maxLength={2000} {...(error ? { error } : {})}
+          name={`${id}.words`} label={listed ? 'Your own words instead, if you want them' : 'What to beware of'} rows={2} full value={data.words} maxLength={2000} {...(error ? { error } : {})}
           onChange={(event) => { const words = event.target.value; onChange((now) => ({ ...now, words })); }} onBlur={() => bench.touch(`${id}.words`)}
         />
       </div>

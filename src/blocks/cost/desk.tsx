@@ -30,7 +30,7 @@ function CostDesk(props: BlockDeskProps<CostData>) {
             <li key={line.id} className="m-0! border-b border-rule py-1 wide:py-2">
               <div className="grid grid-cols-[minmax(0,1fr)_7.5rem] gap-x-3.5">
                 <LineInput name={path('label')} label="What it was for" placeholder="What it was for" value={line.label} onValue={(label) => lines.change(line.id, { label })} onEnter={() => lines.goTo(line.id, 'money')} />
-                <FigureInput name={path('money')} label={`What ${of} came to, in ${context.currency}`} placeholder="12.50" value={line.money} onValue={(money) => lines.change(line.id, { money })} onEnter={() => lines.goOn(line.id)} />
+                <FigureInput name={path('money')} label={`What ${of} came to, in ${context.currency}`} placeholder="e.g. 12.50" value={line.money} onValue={(money) => lines.change(line.id, { money })} onEnter={() => lines.goOn(line.id)} />
               </div>
               <div className="flex items-center">
                 <QuietSelect name={path('category')} label={`What kind of cost ${of} is`} value={line.category} options={categories} onValue={(category) => lines.change(line.id, { category: categoryOf(category) })} />

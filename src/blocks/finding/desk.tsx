@@ -12,7 +12,7 @@ type Part = 'tried' | 'happened' | 'instead';
 function FindingWords({ id, name, label, value, onWords }: { id: string; name: Part; label: string; value: string; onWords: (words: string) => void }) {
   const { touch } = useBench();
   const path = `${id}.${name}`;
-  return <TextArea name={path} label={label} rows={2} value={value} error={useFault(path)} maxLength={2000} onChange={(event) => onWords(event.target.value)} onBlur={() => touch(path)} />;
+  return <TextArea name={path} label={label} rows={2} full value={value} error={useFault(path)} maxLength={2000} onChange={(event) => onWords(event.target.value)} onBlur={() => touch(path)} />;
 }
 
 function FindingDesk({ id, data, onChange }: BlockDeskProps<FindingData>) {

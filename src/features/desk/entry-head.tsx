@@ -35,11 +35,11 @@ export function EntryHead({ view, document, onHead }: EntryHeadProps) {
       </div>
       <WordsField
         name="title" label="Title" value={document.title} most={140} placeholder="What was done" next="lead" onValue={(title) => onHead({ title })}
-        look="lettering-page mt-5 text-ink placeholder:text-ink-faint"
+        look="lettering-page mt-5 pt-[0.08em] pb-[0.2em] leading-[1.16]! text-ink placeholder:font-[500] placeholder:text-ink-faint"
       />
       <WordsField
         name="lead" label="Lead, one or two sentences for the lists" value={document.lead} most={600} placeholder="One or two sentences for the lists" next="content" onValue={(lead) => onHead({ lead })}
-        look="mt-3 max-w-[56ch] font-read text-[1.125rem]/[1.5] text-ink-soft wide:text-lede"
+        look="mt-3 max-w-[56ch] font-read text-[1.125rem]/[1.5] text-ink-soft placeholder:text-ink-faint wide:text-lede"
       />
     </>
   );

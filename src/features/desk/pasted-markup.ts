@@ -3,11 +3,13 @@
 
 const renames: Readonly<Record<string, string>> = { B: 'strong', I: 'em', STRIKE: 's', DEL: 's', H1: 'h2', H4: 'h3', H5: 'h3', H6: 'h3', TT: 'code', KBD: 'code', SAMP: 'code', PRE: 'p', DT: 'p', DD: 'p', FIGCAPTION: 'p' };
 const boxes = 'div, section:not([data-block]), article, header, footer, main, aside, address, figure, center';
+// Where a style attribute waits to be read.
+const styleName = 'data-style';
 const standsAlone = 'p, h1, h2, h3, h4, h5, h6, ul, ol, table, blockquote, pre, div, section, article, dl, figure';
 
 function renamed(element: Element, tag: string): Element {
   const other = element.ownerDocument.createElement(tag);
-  for (const name of ['style', 'class', 'href', 'start', 'colspan', 'rowspan']) {
+  for (const name of [styleName, 'class', 'href', 'start', 'colspan', 'rowspan']) {
     const value = element.getAttribute(name);
     if (value !== null) other.setAttribute(name, value);
   }
@@ -21,13 +23,13 @@ function unwrapped(element: Element): void {
 }
 
 function styleOf(element: Element): string {
-  return (element.getAttribute('style') ?? '').toLowerCase().replaceAll(/\s/g, '');
+  return (element.getAttribute(styleName) ?? '').toLowerCase().replaceAll(/\s/g, '');
 }
 
 /** Bold and italic said by a style; and a bold element that says it is not. */
 function emphasise(body: Element): void {
-  for (const element of body.querySelectorAll('b[style], strong[style]')) if (/font-weight:(normal|400)/.test(styleOf(element))) unwrapped(element);
-  for (const element of body.querySelectorAll('span[style]')) {
+  for (const element of body.querySelectorAll('b[data-style], strong[data-style]')) if (/font-weight:(normal|400)/.test(styleOf(element))) unwrapped(element);
+  for (const element of body.querySelectorAll('span[data-style]')) {
     const style = styleOf(element);
     const tag = [/font-weight:(bold|[6-9]00)/.test(style) ? 'strong' : '', /font-style:italic/.test(style) ? 'em' : '', /text-decoration[^;]*line-through/.test(style) ? 's' : ''].filter(Boolean);
     let inside = element;
@@ -42,8 +44,8 @@ function emphasise(body: Element): void {
 
 /** Word processors write a list as paragraphs with the bullet typed in them. */
 function gatherLists(body: Element): void {
-  for (const paragraph of body.querySelectorAll('p[style*="mso-list"], p[class*="MsoList"]')) {
-    const bullet = paragraph.querySelector('span[style*="mso-list:Ignore" i], span[style*="mso-list: Ignore" i]');
+  for (const paragraph of body.querySelectorAll('p[data-style*="mso-list"], p[class*="MsoList"]')) {
+    const bullet = paragraph.querySelector('span[data-style*="mso-list:Ignore" i], span[data-style*="mso-list: Ignore" i]');
     const tag = /^\s*[\da-z]{1,3}[.)]/i.test(bullet?.textContent ?? '') ? 'OL' : 'UL';
     bullet?.remove();
     const item = body.ownerDocument.createElement('li');
@@ -69,14 +71,18 @@ function flattenBoxes(body: Element): void {
   }
 }
 
-/** Handlers are gone before anything is parsed, so that the page's own policy has nothing to refuse and report. */
-function withoutHandlers(html: string): string {
-  return html.replaceAll(/<[a-z][^>]*>/gi, (tag) => tag.replaceAll(/([\s/"'])on[a-z]+(?=\s*=)/gi, '$1data-off'));
+const styleSheet = /<style\b[^>]*>[\s\S]*?(?:<\/style\s*>|$)/gi;
+// quoted values may hold a >
+const anyTag = /<[a-z](?:"[^"]*"|'[^']*'|[^'">])*>/gi;
+
+/** Handlers and styles are set aside before anything is parsed, as even in a document that is never shown the page's own policy refuses and reports them. */
+function withoutOrders(html: string): string {
+  return html.replaceAll(styleSheet, '').replaceAll(anyTag, (tag) => tag.replaceAll(/([\s/"'])on[a-z]+(?=\s*=)/gi, '$1data-off').replaceAll(/([\s/"'])style(?=\s*=)/gi, `$1${styleName}`));
 }
 
 export function tidiedMarkup(html: string): string {
   // Parsed in a document of its own that runs nothing and fetches nothing.
-  const { body } = new DOMParser().parseFromString(withoutHandlers(html), 'text/html');
+  const { body } = new DOMParser().parseFromString(withoutOrders(html), 'text/html');
   emphasise(body);
   gatherLists(body);
   for (const element of body.querySelectorAll(Object.keys(renames).join(','))) renamed(element, renames[element.tagName] ?? 'p');

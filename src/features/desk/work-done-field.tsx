@@ -29,8 +29,8 @@ export function WorkDoneField({ work, kinds, onWork }: WorkDoneFieldProps) {
       <div className="flex flex-wrap gap-1">
         <input
           id={ids.amount} aria-label="How much work" aria-invalid={faults.amount ? true : undefined} aria-describedby={faults.amount ? `${ids.amount}-error` : undefined}
-          inputMode="decimal" autoComplete="off" value={now.amount} maxLength={20} placeholder="17" onChange={(event) => change({ amount: event.target.value })} onBlur={() => bench.touch('work.amount')}
-          className={`${control} num w-16!`}
+          inputMode="decimal" autoComplete="off" value={now.amount} maxLength={20} placeholder="e.g. 17" onChange={(event) => change({ amount: event.target.value })} onBlur={() => bench.touch('work.amount')}
+          className={`${control} num w-22!`}
         />
         <select
           id={fieldId('work.unit')} aria-label="Unit of the work" value={now.unit} onChange={(event) => change({ unit: workUnits.find((unit) => unit === event.target.value) ?? 'piece' })}
@@ -40,7 +40,7 @@ export function WorkDoneField({ work, kinds, onWork }: WorkDoneFieldProps) {
         </select>
         <input
           id={ids.kind} aria-label="Kind of work, one of it" aria-invalid={faults.kind ? true : undefined} aria-describedby={faults.kind ? `${ids.kind}-error` : undefined}
-          list="work-kinds" autoComplete="off" value={now.kind} maxLength={60} placeholder="steamed rib" onChange={(event) => change({ kind: event.target.value })} onBlur={() => bench.touch('work.kind')}
+          list="work-kinds" autoComplete="off" value={now.kind} maxLength={60} placeholder="e.g. steamed rib" onChange={(event) => change({ kind: event.target.value })} onBlur={() => bench.touch('work.kind')}
           className={`${control} w-40!`}
         />
         <datalist id="work-kinds">{kinds.map(({ one }) => <option key={one} value={one}>{one}</option>)}</datalist>
