@@ -131,7 +131,8 @@ journey('a press on the blank of a block, then a letter, a paste or Backspace: t
   await page.keyboard.press('Delete');
   await used.evaluate((block) => {
     const clipboardData = new DataTransfer();
-    clipboardData.setData('text/plain', 'pasted');
+    // the site's policy would complain of these styles if they were ever parsed
+    clipboardData.setData('text/html', '<style>p { color: red }</style><p style="color: red">pasted</p>');
     block.dispatchEvent(new ClipboardEvent('paste', { clipboardData, bubbles: true, cancelable: true }));
   });
   await expectKept(page);
@@ -151,6 +152,18 @@ journey('a block taken out is back with Ctrl+Z', async ({ open }) => {
   await page.keyboard.press('Control+z');
   await used.waitFor();
   expect(await amountOf(used).inputValue()).toBe('3 pints');
+});
+
+journey('a button under a field that turns out to be at fault still does what it says', async ({ open }) => {
+  const { page } = await open();
+  await signIn(page, 'restorer');
+  await openDraft(page, 'Pressed at once');
+  const cost = await putIn(page, 'Cost');
+  await expect.poll(() => cost.getByRole('textbox', { name: 'What it was for' }).evaluate((field) => field === document.activeElement), PATIENCE).toBe(true);
+  await putIn(page, 'Time');
+  await cost.getByRole('textbox', { name: 'What it was for' }).click();
+  await cost.getByRole('button', { name: 'Add a line' }).click();
+  await expect.poll(() => cost.getByRole('listitem').count(), PATIENCE).toBe(2);
 });
 
 journey('signing off and taking back say that they are done', async ({ open }) => {

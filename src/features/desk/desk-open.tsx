@@ -1,4 +1,4 @@
-import { useCallback, useEffect, useMemo, useState } from 'react';
+import { useCallback, useEffect, useMemo, useState, type MouseEvent } from 'react';
 import { useNavigate } from 'react-router-dom';
 import type { DeskView } from '#contracts/entries.ts';
 import { AppError } from '#contracts/errors.ts';
@@ -40,6 +40,11 @@ export interface DeskOpenProps {
   said: string | null;
   /** The entry was taken back: the desk opens again on what stands now. */
   onReopen: (said: string) => Promise<void>;
+}
+
+/** A press on a button leaves the focus in its field until it has done its work: leaving a field may show its fault, which would move the button from under the press. */
+function stayInField(event: MouseEvent): void {
+  if (event.target instanceof Element && event.target.closest('button')) event.preventDefault();
 }
 
 /** The desk with an entry on it. */
@@ -121,6 +126,7 @@ export function DeskOpen({ view, start, at, kept, said, onReopen }: DeskOpenProp
           }
         >
           <div
+            onMouseDownCapture={stayInField}
             onPaste={(event) => {
               const files = filesOf(event.clipboardData);
               const block = event.target instanceof Element ? event.target.closest('[data-block-view]')?.getAttribute('data-block-view') : undefined;
