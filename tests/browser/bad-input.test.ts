@@ -82,7 +82,7 @@ journey('photos that cannot go up say why, each in its place, and the good one g
   const folder = await mkdtemp(join(tmpdir(), 'bad-photos-'));
   const file = (name: string) => join(folder, name);
   await writeFile(file('heavy.jpg'), await quadrants().jpeg().toBuffer());
-  await truncate(file('heavy.jpg'), 60 * 1024 * 1024);
+  await truncate(file('heavy.jpg'), 60_000_000);
   await writeFile(file('notes.jpg'), 'Two pints of resin, set in the pot.\n');
   await writeFile(file('huge.png'), blankPng(30_000, 30_000));
   await writeFile(file('good.jpg'), await quadrants(320, 240).jpeg().toBuffer());
@@ -110,7 +110,7 @@ journey('photos that cannot go up say why, each in its place, and the good one g
 async function expectPhotoFaults(photos: Locator): Promise<void> {
   const item = (name: string) => photos.getByRole('listitem').filter({ hasText: name });
   await expectWords(item('heavy.jpg'), '“heavy.jpg” is 60 MB; 40 MB is the most.');
-  await expectWords(item('notes.jpg'), 'That is not a picture we can read. JPEG, PNG, WebP or HEIC.');
+  await expectWords(item('notes.jpg'), 'That is not a picture we can read. JPEG, PNG, WebP, HEIC or GIF.');
   await expectWords(item('huge.png'), 'That picture is 30,000 by 30,000 pixels.', '12,000 pixels a side');
   await expect.poll(() => photos.getByLabel('For people who cannot see it').count(), PATIENCE).toBe(1);
 }

@@ -1,20 +1,21 @@
 /** What a picture may be. The upload stands at 40 MB: a phone's largest photograph with room to spare. */
-export const mebibyte = 1024 * 1024;
-export const maxUploadBytes = 40 * mebibyte;
+/** As phones and file managers count, and as the desk says it. */
+export const megabyte = 1_000_000;
+export const maxUploadBytes = 40 * megabyte;
 export const maxPixels = 50_000_000;
 export const maxSide = 12_000;
 /** Widths made of every picture that is as wide. */
 export const widthSteps: readonly number[] = [480, 960, 1600];
 /** Everything kept of one build's pictures, in bytes. */
-export const maxBuildBytes = 8 * 1024 * mebibyte;
+export const maxBuildBytes = 8000 * megabyte;
 /** Pictures of one person that may wait to be made at the same time. */
 export const maxWaiting = 40;
 /** A 50 megapixel photograph takes about 10 s on one slow core. */
 export const maxMakingMs = 60_000;
 
 export function tooHeavyWords(bytes: number): string {
-  const size = Math.max(Math.round(bytes / mebibyte), maxUploadBytes / mebibyte + 1);
-  return `That file is ${size} MB; ${maxUploadBytes / mebibyte} MB is the most.`;
+  const size = Math.max(Math.round(bytes / megabyte), maxUploadBytes / megabyte + 1);
+  return `That file is ${size} MB; ${maxUploadBytes / megabyte} MB is the most.`;
 }
 
 export function tooBigWords(width: number, height: number): string {

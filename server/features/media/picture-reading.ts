@@ -21,7 +21,7 @@ export function kindOf(head: Buffer): Kind | null {
   return null;
 }
 
-const wrongType = () => new RefusedPicture('wrong-type', 'That is not a picture we can read. JPEG, PNG, WebP or HEIC.');
+const wrongType = () => new RefusedPicture('wrong-type', 'That is not a picture we can read. JPEG, PNG, WebP, HEIC or GIF.');
 const damaged = () => new RefusedPicture('bad-input', 'That picture is damaged or cut short. Send it again, or save a fresh copy first.');
 
 async function headOf(path: string): Promise<Buffer> {

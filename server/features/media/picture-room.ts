@@ -2,7 +2,7 @@ import { raw } from '@mikro-orm/core';
 import { AppError } from '#contracts/errors.ts';
 import { Picture, type Build } from '#server/entities/index.ts';
 import type { Caller, Em } from '#server/http/context.ts';
-import { maxBuildBytes, maxMakingMs, maxWaiting, mebibyte } from './picture-limits.ts';
+import { maxBuildBytes, maxMakingMs, maxWaiting, megabyte } from './picture-limits.ts';
 
 async function storedBytes(em: Em, build: Build): Promise<number> {
   const { bytes } = await em.createQueryBuilder(Picture).select(raw('sum(bytes) as bytes')).where({ build: build.id }).execute<{ bytes: number | null }>('get');
@@ -16,6 +16,6 @@ export async function requireRoom(em: Em, caller: Caller, build: Build, now: Dat
   const waiting = await em.count(Picture, { uploader: caller.id, state: 'working', createdAt: { $gt: since } });
   if (waiting >= maxWaiting) throw new AppError('too-many', `${maxWaiting} of your pictures are being made already. Send this one when they are done.`);
   if (await storedBytes(em, build) > maxBuildBytes) {
-    throw new AppError('falls-short', `The pictures of this build fill ${maxBuildBytes / mebibyte / 1024} GB, which is the most. Pictures you take out of entries make room a week later.`);
+    throw new AppError('falls-short', `The pictures of this build fill ${maxBuildBytes / megabyte / 1000} GB, which is the most. Pictures you take out of entries make room a week later.`);
   }
 }

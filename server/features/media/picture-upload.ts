@@ -5,7 +5,7 @@ import { AppError } from '#contracts/errors.ts';
 import { requireWritableBuild } from '#server/features/builds/build-access.service.ts';
 import type { Parts } from '#server/http/context.ts';
 import { contextOf } from '#server/http/request-context.ts';
-import { maxUploadBytes, mebibyte, tooHeavyWords } from './picture-limits.ts';
+import { maxUploadBytes, megabyte, tooHeavyWords } from './picture-limits.ts';
 import { newPictureKey, readyQuarantine } from './picture-store.ts';
 import { requireRoom } from './picture-room.ts';
 
@@ -28,7 +28,7 @@ function askFirst(parts: Parts): RequestHandler {
 }
 
 function wordsFor(error: multer.MulterError): AppError {
-  if (error.code === 'LIMIT_FILE_SIZE') return aboutField('too-large', `That file is over ${maxUploadBytes / mebibyte} MB, which is the most.`);
+  if (error.code === 'LIMIT_FILE_SIZE') return aboutField('too-large', `That file is over ${maxUploadBytes / megabyte} MB, which is the most.`);
   if (error.code === 'LIMIT_UNEXPECTED_FILE' || error.code === 'LIMIT_FILE_COUNT') return aboutField('bad-input', 'Send one picture at a time, in a field called picture.');
   return new AppError('malformed', 'The form with the picture could not be read.');
 }

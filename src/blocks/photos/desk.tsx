@@ -74,7 +74,7 @@ function PhotosDesk({ id, data, onChange }: BlockDeskProps<PhotosData>) {
         {input(true)}
         <Button kind="plain" onClick={() => picker.current?.click()}>Pick photos</Button>
         <span className="hidden pointer-coarse:inline-flex"><Button kind="quiet" onClick={() => camera.current?.click()}>Take a photo</Button></span>
-        <p className="text-small text-ink-soft">or drop them here, or paste. 40 MB each at the most; JPEG, PNG, WebP, HEIC.</p>
+        <p className="text-small text-ink-soft">or drop them here, or paste. 40 MB each at the most; JPEG, PNG, WebP, HEIC, GIF.</p>
       </div>
     </BlockFrame>
   );

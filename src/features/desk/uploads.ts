@@ -30,16 +30,16 @@ export interface UploadsState {
   readonly going: { readonly count: number; readonly sent: number; readonly size: number; readonly secondsLeft: number | null } | null;
 }
 
-const mebibyte = 1024 * 1024;
+const megabyte = 1_000_000;
 /** The server's own limit: what is larger is not even sent. */
-export const mostBytes = 40 * mebibyte;
+export const mostBytes = 40 * megabyte;
 const atOnce = 2;
 
 /** Why a file is not even sent, in words for beside it. */
 export function refusalOf(file: { name: string; size: number; type: string }): string | null {
-  if (file.size > mostBytes) return `“${file.name}” is ${Math.round(file.size / mebibyte)} MB; 40 MB is the most. Save a smaller copy and pick that.`;
+  if (file.size > mostBytes) return `“${file.name}” is ${Math.max(Math.round(file.size / megabyte), 41)} MB; 40 MB is the most. Save a smaller copy and pick that.`;
   if (file.size === 0) return `“${file.name}” is empty. Pick the photo again.`;
-  if (file.type !== '' && !file.type.startsWith('image/')) return `“${file.name}” is not a photo. JPEG, PNG, WebP and HEIC can go up.`;
+  if (file.type !== '' && !file.type.startsWith('image/')) return `“${file.name}” is not a photo. JPEG, PNG, WebP, HEIC and GIF can go up.`;
   return null;
 }
 

@@ -75,14 +75,15 @@ test('a stopped or failed picture is kept and goes up when tried again; a refuse
 
 test('a file that is too large, empty or no picture is not even sent', () => {
   const { uploads, sent, kept } = desk();
-  uploads.add('block', [file('big.jpg', 60 * 1024 * 1024), file('film.mp4', 1000, 'video/mp4')]);
+  uploads.add('block', [file('big.jpg', 60_000_000), file('film.mp4', 1000, 'video/mp4')]);
   expect(sent).toEqual([]);
   expect(kept.size).toBe(0);
   expect(uploads.state().uploads.map(({ problem }) => problem)).toEqual([
-    '“big.jpg” is 60 MB; 40 MB is the most. Save a smaller copy and pick that.', '“film.mp4” is not a photo. JPEG, PNG, WebP and HEIC can go up.',
+    '“big.jpg” is 60 MB; 40 MB is the most. Save a smaller copy and pick that.', '“film.mp4” is not a photo. JPEG, PNG, WebP, HEIC and GIF can go up.',
   ]);
   expect(refusalOf({ name: 'IMG_1.HEIC', size: 1000, type: '' })).toBeNull();
-  expect(refusalOf({ name: 'edge.jpg', size: 40 * 1024 * 1024, type: 'image/jpeg' })).toBeNull();
+  expect(refusalOf({ name: 'edge.jpg', size: 40_000_000, type: 'image/jpeg' })).toBeNull();
+  expect(refusalOf({ name: 'over.jpg', size: 40_000_001, type: 'image/jpeg' })).toContain('is 41 MB; 40 MB is the most');
 });
 
 test('time left follows the pace of the last seconds', () => {

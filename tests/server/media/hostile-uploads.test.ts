@@ -3,7 +3,7 @@ import { deflateRawSync } from 'node:zlib';
 import sharp from 'sharp';
 import { afterAll, beforeAll, describe, expect, test } from 'vitest';
 import { Picture } from '#server/entities/index.ts';
-import { mebibyte } from '#server/features/media/picture-limits.ts';
+import { megabyte } from '#server/features/media/picture-limits.ts';
 import { pictureMaker } from '#server/features/media/picture-maker.ts';
 import { blankPng, fromPhone, heicSample, holds, jpegClaiming, noisy, quadrants } from './picture-samples.ts';
 import { startPictureSite, type PictureSite } from './picture-site.ts';
@@ -14,7 +14,7 @@ beforeAll(async () => {
 });
 afterAll(() => site.server.close());
 
-const notAPicture = 'That is not a picture we can read. JPEG, PNG, WebP or HEIC.';
+const notAPicture = 'That is not a picture we can read. JPEG, PNG, WebP, HEIC or GIF.';
 const damaged = 'That picture is damaged or cut short. Send it again, or save a fresh copy first.';
 
 async function expectRefusal(file: Buffer, code: string, words: string, name?: string): Promise<void> {
@@ -48,7 +48,7 @@ describe('what is no picture', () => {
 
 describe('what is too much', () => {
   test('a file of 60 MB is refused in words with its size, before it is read', async () => {
-    const problem = await site.refused(Buffer.alloc(60 * mebibyte), 'huge.jpg');
+    const problem = await site.refused(Buffer.alloc(60 * megabyte), 'huge.jpg');
     expect(problem).toMatchObject({ code: 'too-large', status: 413, detail: 'That file is 60 MB; 40 MB is the most.', fields: { picture: 'That file is 60 MB; 40 MB is the most.' } });
   });
 
@@ -85,7 +85,7 @@ function sentInChunks(size: number): Promise<{ status: number; body: string }> {
     });
     sending.on('error', reject);
     sending.write(fileHead);
-    for (let sent = 0; sent < size; sent++) sending.write(Buffer.alloc(mebibyte, 7));
+    for (let sent = 0; sent < size; sent++) sending.write(Buffer.alloc(megabyte, 7));
     sending.end('\r\n--plank--\r\n');
   });
 }

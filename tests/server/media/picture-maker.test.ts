@@ -6,7 +6,7 @@ import { tmpdir } from 'node:os';
 import { join } from 'node:path';
 import { fileURLToPath } from 'node:url';
 import { afterAll, afterEach, beforeAll, expect, test } from 'vitest';
-import { mebibyte } from '#server/features/media/picture-limits.ts';
+import { megabyte } from '#server/features/media/picture-limits.ts';
 import { PictureMaker } from '#server/features/media/picture-maker.ts';
 import type { MadePicture } from '#server/features/media/picture-messages.ts';
 import { noisy, quadrants } from './picture-samples.ts';
@@ -113,9 +113,9 @@ test.runIf(process.platform === 'linux')('memory stays bounded over forty photog
     sizes.push(residentBytes(maker.pid ?? 0));
   }
   const mean = (some: readonly number[]) => some.reduce((sum, one) => sum + one, 0) / some.length;
-  expect(Math.max(...sizes)).toBeLessThan(500 * mebibyte);
+  expect(Math.max(...sizes)).toBeLessThan(500 * megabyte);
   // no leak: the last ten stand no higher than the second ten, give or take
-  expect(mean(sizes.slice(-10))).toBeLessThan(mean(sizes.slice(10, 20)) + 40 * mebibyte);
+  expect(mean(sizes.slice(-10))).toBeLessThan(mean(sizes.slice(10, 20)) + 40 * megabyte);
 });
 
 test('sixty small ones at once are all made, one after the other', { timeout: 60_000 }, async () => {
