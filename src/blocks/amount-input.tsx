@@ -57,7 +57,9 @@ export function useShownBack(line: AmountLine): string | null {
   if (!reading.ok) return null;
   const amount = line.amount.trim();
   const same = [typedAmount(line), amount, `${amount} ${pluralOf(line.unit)}`].includes(reading.value.shownBack);
-  return [same ? '' : reading.value.shownBack, reading.value.note ?? ''].filter(Boolean).join('; ') || null;
+  // a comma between thousands may have been meant for a decimal one
+  const words = amount.includes(',') ? `read as ${reading.value.shownBack}` : same ? '' : reading.value.shownBack;
+  return [words, reading.value.note ?? ''].filter(Boolean).join('; ') || null;
 }
 
 /** An exact amount of a line's material, in the unit of the line; where the typed amount names its own, in whole packs or shares of one, or as the material is usually said. */

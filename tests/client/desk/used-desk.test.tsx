@@ -58,6 +58,17 @@ describe('the Used block', () => {
     expect(document.getElementById(field.getAttribute('aria-describedby') ?? '')?.textContent).toMatch(/^Write 1\.5 with a point/);
   });
 
+  test('an amount with a comma says what it was read as', async () => {
+    const user = userEvent.setup();
+    render(<Bare bench={{}} start={blank} />);
+    await user.type(screen.getByRole('combobox', { name: 'Material' }), 'res{Enter}');
+    await user.keyboard('1,500');
+    expect(screen.getByText(/^read as 1,500 US gal/)).toBeTruthy();
+    await user.clear(screen.getByRole('textbox', { name: 'Amount of Laminating resin' }));
+    await user.keyboard('1500');
+    expect(screen.queryByText(/read as/)).toBeNull();
+  });
+
   test('a material that is not there yet is added in place', async () => {
     const user = userEvent.setup();
     const addMaterial = vi.fn<Bench['addMaterial']>(() => Promise.resolve({ ok: true, material: { ...brushes, id: 9, name: 'Mahogany plugs' } }));
