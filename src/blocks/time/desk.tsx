@@ -1,10 +1,9 @@
-import { useState } from 'react';
 import { readMinutes } from '#domain/duration.ts';
-import { formatMinutes, plural } from '#domain/format.ts';
-import { useBench } from '../bench.ts';
+import { formatMinutes } from '#domain/format.ts';
 import { BlockFrame, BlockSum, textButton } from '../block-frame.tsx';
 import { deskBlock, type BlockDeskProps } from '../desk-block.ts';
 import { OwnDaySelect } from '../own-day-select.tsx';
+import { useSameAsLastTime } from '../same-as-last-time.tsx';
 import { newId, useLines } from '../use-lines.ts';
 import { TimeLineDesk } from './line-desk.tsx';
 import { blankTimeLine, time, type TimeData, type TimeLineData } from './time.ts';
@@ -18,26 +17,14 @@ function handsOn(data: TimeData): number {
 
 function TimeDesk(props: BlockDeskProps<TimeData>) {
   const { id, data } = props;
-  const bench = useBench();
   const lines = useLines<TimeLineData, TimeData>(props, blankTimeLine, 'person');
-  const [asking, setAsking] = useState(false);
-  const sameAsLastTime = async () => {
-    setAsking(true);
-    try {
-      const last = await bench.lastTime();
-      if (last.time.length === 0) bench.say('No time was written up before this day.');
-      else {
-        lines.fill(last.time.map((line) => ({ ...blankTimeLine(newId()), ...line })), (line) => line.name.trim() === '' && line.time.trim() === '');
-        bench.say(`Filled in from “${last.title ?? 'the day before'}”: ${plural(last.time.length, 'line', 'lines')}.`);
-      }
-    } catch (cause) {
-      bench.say(cause instanceof Error ? cause.message : 'The last time could not be fetched.');
-    } finally {
-      setAsking(false);
-    }
-  };
+  const last = useSameAsLastTime({
+    linesOf: ({ time: before }) => before, nothing: 'No time was written up before this day.',
+    fill: (before) => lines.fill(before.map((line) => ({ ...blankTimeLine(newId()), ...line })), (line) => line.name.trim() === '' && line.time.trim() === ''),
+  });
   return (
-    <BlockFrame kind="time" word="Time" end={<button type="button" onClick={() => void sameAsLastTime()} aria-disabled={asking} className={textButton}>Same as last time</button>}>
+    <BlockFrame kind="time" word="Time" end={last.button}>
+      {last.answer}
       <OwnDaySelect block={id} word="Time" day={data.day} onDay={(day) => props.onChange((now) => ({ ...now, day }))} />
       <ol className="list-none! p-0!">
         {data.lines.map((line) => <TimeLineDesk key={line.id} block={id} line={line} lines={lines} />)}

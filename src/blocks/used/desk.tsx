@@ -1,6 +1,5 @@
-import { useState } from 'react';
 import { exactFrom } from '#domain/quantity.ts';
-import { formatMoneySoFar, plural } from '#domain/format.ts';
+import { formatMoneySoFar } from '#domain/format.ts';
 import { typedAmount } from '../amount-line.ts';
 import { useBench, useFigure } from '../bench.ts';
 import { BlockFrame, BlockSum, textButton } from '../block-frame.tsx';
@@ -8,6 +7,7 @@ import { deskBlock, type BlockDeskProps } from '../desk-block.ts';
 import type { Figures } from '../figures-store.ts';
 import { shortTitle } from '../short-title.ts';
 import { OwnDaySelect } from '../own-day-select.tsx';
+import { useSameAsLastTime } from '../same-as-last-time.tsx';
 import { newId, useLines } from '../use-lines.ts';
 import { UsedLineDesk } from './line-desk.tsx';
 import { blankUsedLine, used, type UsedData, type UsedLine } from './used.ts';
@@ -16,34 +16,23 @@ function UsedDesk(props: BlockDeskProps<UsedData>) {
   const { id, data } = props;
   const bench = useBench();
   const lines = useLines<UsedLine, UsedData>(props, blankUsedLine, 'material');
-  const [asking, setAsking] = useState(false);
   const currency = bench.context.currency;
   const sumOf = (fate: UsedLine['fate']) => ({ lines: priced }: Figures) => data.lines.filter((line) => line.fate === fate).reduce((sum, line) => sum + (priced.get(`${id}:${line.id}`)?.value ?? 0), 0);
   const [usedSum, wastedSum] = [useFigure(sumOf('used')), useFigure(sumOf('wasted'))];
   const shortOf = (fate: UsedLine['fate']) => ({ lines: priced }: Figures) => data.lines.some((line) => line.fate === fate && exactFrom(priced.get(`${id}:${line.id}`)?.short ?? '0/1').gt(0));
   const [usedShort, wastedShort] = [useFigure(shortOf('used')), useFigure(shortOf('wasted'))];
 
-  const sameAsLastTime = async () => {
-    setAsking(true);
-    try {
-      const last = await bench.lastTime();
-      if (last.used.length === 0) bench.say('Nothing was written up as used before this day.');
-      else {
-        lines.fill(last.used.map((line) => ({ ...blankUsedLine(newId()), ...line })), (line) => line.name.trim() === '' && line.amount.trim() === '');
-        bench.say(`Filled in from “${last.title ?? 'the day before'}”: ${plural(last.used.length, 'line', 'lines')}.`);
-      }
-    } catch (cause) {
-      bench.say(cause instanceof Error ? cause.message : 'The last time could not be fetched.');
-    } finally {
-      setAsking(false);
-    }
-  };
+  const last = useSameAsLastTime({
+    linesOf: ({ used: before }) => before, nothing: 'Nothing was written up as used before this day.',
+    fill: (before) => lines.fill(before.map((line) => ({ ...blankUsedLine(newId()), ...line })), (line) => line.name.trim() === '' && line.amount.trim() === ''),
+  });
 
   return (
     <BlockFrame
       kind="used" word="Used" note={`off ${shortTitle(bench.buildTitle)}’s shelf`}
-      end={<button type="button" onClick={() => void sameAsLastTime()} aria-disabled={asking} className={textButton}>Same as last time</button>}
+      end={last.button}
     >
+      {last.answer}
       <OwnDaySelect block={id} word="Used" day={data.day} onDay={(day) => props.onChange((now) => ({ ...now, day }))} />
       <ol className="list-none! p-0!">
         {data.lines.map((line) => <UsedLineDesk key={line.id} block={id} line={line} lines={lines} />)}

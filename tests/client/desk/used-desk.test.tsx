@@ -81,6 +81,16 @@ describe('the Used block', () => {
     expect(screen.getByRole('combobox', { name: 'Material' })).toHaveProperty('value', 'Mahogany plugs');
   });
 
+  test('same as last time says in the block that nothing was before', async () => {
+    const user = userEvent.setup();
+    const say = vi.fn<Bench['say']>();
+    render(<Bare bench={{ say }} start={blank} />);
+    await user.click(screen.getByRole('button', { name: 'Same as last time' }));
+    expect(await screen.findByText('Nothing was written up as used before this day.')).toBeTruthy();
+    expect(say).toHaveBeenCalledWith('Nothing was written up as used before this day.');
+    expect(screen.getAllByRole('listitem')).toHaveLength(1);
+  });
+
   test('same as last time fills the lines, and a line taken out can be put back', async () => {
     const user = userEvent.setup();
     let putBack: () => void = () => undefined;
