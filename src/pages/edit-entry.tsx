@@ -16,13 +16,24 @@ export function makeLoader(client: QueryClient): LoaderFunction {
   };
 }
 
-function DeskShape() {
+function DeskComing() {
+  return (
+    <PageFrame>
+      <Loading label="Fetching the desk" shape="page" />
+    </PageFrame>
+  );
+}
+
+/** What stands here before scripts run, and all there is where they never do: nothing that looks as if it were still coming. */
+function BeforeScripts({ build }: { build: string }) {
   return (
     <PageFrame>
       <noscript>
-        <p className="mb-6 max-w-reading">The desk works out costs while you type, so it needs scripts. Turn them on for this site and load the page again; what was written before is kept.</p>
+        <h1 className="lettering-place">The desk needs scripts</h1>
+        <p className="mt-4 max-w-reading">The desk works out costs while you type, so it needs scripts. Turn them on for this site and load the page again; what was written before is kept.</p>
+        <p className="mt-4"><a href={`/builds/${build}`}>Back to the build</a></p>
       </noscript>
-      <Loading label="Fetching the desk" shape="page" />
+      <div className="min-h-80" />
     </PageFrame>
   );
 }
@@ -36,10 +47,10 @@ export function Component() {
     <>
       <Head title="Write up a day" />
       {inBrowser ? (
-        <Suspense fallback={<DeskShape />}>
+        <Suspense fallback={<DeskComing />}>
           <Desk key={`${build}/${number}`} build={build} number={Number(number)} />
         </Suspense>
-      ) : <DeskShape />}
+      ) : <BeforeScripts build={build} />}
     </>
   );
 }

@@ -185,3 +185,17 @@ journey('signing off and taking back say that they are done', async ({ open }) =
   await expectWords(page.getByRole('status').filter({ hasText: 'Taken back' }), 'Readers no longer see it');
   expect((await page.context().request.get(entry)).status()).toBe(404);
 });
+
+journey('without scripts the desk says what it needs and leads back, and nothing looks as if it were still coming', async ({ open }) => {
+  const { page } = await open();
+  await signIn(page, 'restorer');
+  const desk = await openDraft(page, 'No scripts');
+  const { page: plain } = await open({ scripts: false });
+  await signIn(plain, 'restorer');
+  await plain.goto(desk);
+  const main = plain.getByRole('main');
+  await expectWords(main, 'The desk needs scripts', 'what was written before is kept');
+  expect(await main.getByRole('status').count()).toBe(0);
+  await main.getByRole('link', { name: 'Back to the build' }).click();
+  await plain.getByRole('heading', { level: 1, name: 'No scripts' }).waitFor();
+});
