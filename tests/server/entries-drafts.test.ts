@@ -155,3 +155,21 @@ test('drafts of another build reach the shed only for those who work on that bui
   expect(await shed(owner)).toEqual([{ material: screws.id, shelf: 'shed', left: '70/1', short: '0/1', worth: 700 }]);
   expect(await shed(crew)).toEqual([{ material: screws.id, shelf: 'shed', left: '100/1', short: '0/1', worth: 1000 }]);
 });
+
+test('opening the desk again on a day nothing was written on leads back to the same draft', async () => {
+  const first = await shop.start(owner, build, '2026-02-01');
+  expect(await shop.start(owner, build, '2026-02-01')).toBe(first);
+  expect((await readDeskOf(shop.em(), owner, build, first)).entry.version).toBe(1);
+  const nextDay = await shop.start(owner, build, '2026-02-02');
+  expect(nextDay).not.toBe(first);
+  await shop.save(owner, build, first, dayOf('2026-02-01', [timeBlock([{ time: '1 h' }])]));
+  const second = await shop.start(owner, build, '2026-02-01');
+  expect([first, nextDay]).not.toContain(second);
+});
+
+test('a blank draft of somebody else of the crew is theirs', async () => {
+  const mate = await shop.person(`mate${rounds}`);
+  await shop.joins(build, mate);
+  const mine = await shop.start(owner, build, '2026-02-01');
+  expect(await shop.start(mate, build, '2026-02-01')).not.toBe(mine);
+});

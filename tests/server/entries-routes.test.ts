@@ -50,7 +50,8 @@ test('a day from start to sign-off and back, over the wire, by the crew on the r
 test('a hundred days started at once get a hundred numbers', async () => {
   const em = site.orm.em.fork();
   const { version } = await em.findOneOrFail(Build, { slug: build });
-  const started = await Promise.all(Array.from({ length: 100 }, (_, at) => (at % 2 ? owner : crew).ask(startEntry, { params: { build }, body: { day: '2026-05-04' } })));
+  const dayAt = (at: number) => new Date(Date.UTC(2025, 0, 1 + at)).toISOString().slice(0, 10);
+  const started = await Promise.all(Array.from({ length: 100 }, (_, at) => (at % 2 ? owner : crew).ask(startEntry, { params: { build }, body: { day: dayAt(at) } })));
   const numbers = started.map(({ number }) => number);
   expect(new Set(numbers).size).toBe(100);
   const rows = await em.execute<{ sequence: number }[]>(`select sequence from entry where number in (${numbers.join(', ')})`);
