@@ -15,7 +15,7 @@ export async function killUnderWriting(rounds: number): Promise<number> {
         await site.start();
         await writerOf(site, false);
       }
-      const writing = Promise.all([writeUntilGone(site, shelf, known), writeUntilGone(site, shelf, known)]);
+      const writing = Promise.all([writeUntilGone(site, shelf, known, '2026-06-14'), writeUntilGone(site, shelf, known, '2026-06-15')]);
       // a busy machine takes its time to write the first day; from then on the blow falls anywhere
       for (const before = known.saved.size; known.saved.size === before;) await wait(10);
       await wait((round * 137) % 400);

@@ -107,23 +107,23 @@ export async function writerOf(site: KilledSite, first: boolean): Promise<void> 
   else await site.client.ask(signIn, { body: { email, password } });
 }
 
-export async function shelfToDrawOn(site: KilledSite): Promise<{ build: string; document: (title: string) => EntryDocument }> {
+export async function shelfToDrawOn(site: KilledSite): Promise<{ build: string; document: (title: string, day: string) => EntryDocument }> {
   const { slug } = await site.client.ask(startBuild, { body: { kind: 'boat', title: 'Killed boat', currency: 'GBP', measures: 'imperial' } });
   const nails = await site.client.ask(addMaterial, { body: { name: 'Copper nails', dimension: 'count', unit: 'piece', packs: [] } });
-  const document = (title: string) => dayOf('2026-06-14', [boughtBlock([{ of: nails, amount: '7', unit: 'piece', money: '10.00' }]), usedBlock([{ of: nails, amount: '3', unit: 'piece' }])], { title });
+  const document = (title: string, day: string) => dayOf(day, [boughtBlock([{ of: nails, amount: '7', unit: 'piece', money: '10.00' }]), usedBlock([{ of: nails, amount: '3', unit: 'piece' }])], { title });
   return { build: slug, document };
 }
 
-/** Writes days until the site goes away; what it acknowledged is told to `known` before the next write. */
-export async function writeUntilGone(site: KilledSite, shelf: { build: string; document: (title: string) => EntryDocument }, known: Acknowledged): Promise<void> {
+/** Writes up one day over and over until the site goes away (each writer its own day: a blank draft of a day is taken up again); what it acknowledged is told to `known` before the next write. */
+export async function writeUntilGone(site: KilledSite, shelf: { build: string; document: (title: string, day: string) => EntryDocument }, known: Acknowledged, day: string): Promise<void> {
   const { client } = site;
   const { build } = shelf;
   try {
     for (let turn = 0; ; turn += 1) {
-      const { number } = await client.ask(startEntry, { params: { build }, body: { day: '2026-06-14' } });
+      const { number } = await client.ask(startEntry, { params: { build }, body: { day } });
       const { entry } = await client.ask(readDesk, { params: { build, number } });
       const title = `Day ${number}, turn ${turn}`;
-      const saved = await client.ask(saveWorking, { params: { build, number }, body: { version: entry.version, document: shelf.document(title) } });
+      const saved = await client.ask(saveWorking, { params: { build, number }, body: { version: entry.version, document: shelf.document(title, day) } });
       known.saved.set(number, title);
       await client.ask(signOffEntry, { params: { build, number }, body: { version: saved.version, document: saved.document } });
       known.signedOff.add(number);
