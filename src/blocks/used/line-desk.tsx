@@ -26,9 +26,12 @@ function useLeft(line: UsedLine, reckoning: LineReckoning | undefined): { words:
   return short ? { words: `${inWords(reckoning.short)} short`, short } : { words: `${inWords(reckoning.left)} left`, short };
 }
 
+// As long as there is room for beside an amount on a phone.
+const shortCounts: Readonly<Record<UsedLine['counts'], string>> = { each: 'for each', whole: 'whole job', opened: 'not counted' };
+
 /** What is chosen for a line, in a few words; that it comes off the shelf the block says already. */
 function chosen({ fate, counts, from }: UsedLine): string {
-  return [fate === 'wasted' ? 'Wasted' : 'Used', countsWords[counts].toLowerCase(), from === 'shed' ? 'from the shed' : ''].filter(Boolean).join(', ');
+  return [fate === 'wasted' ? 'Wasted' : 'Used', shortCounts[counts], from === 'shed' ? 'from the shed' : ''].filter(Boolean).join(', ');
 }
 
 interface UsedLineDeskProps {
@@ -56,7 +59,7 @@ export const UsedLineDesk = memo(function UsedLineDesk({ block, line, lines }: U
   const of = line.name.trim() || 'this line';
   return (
     <FoldingLine name={path('line')}>
-      <div className="grid grid-cols-[auto_minmax(0,1fr)_auto] items-center gap-x-2 wide:gap-x-3.5 [grid-template-areas:'name_name_money'_'amount_left_left'] wide:grid-cols-[minmax(0,1fr)_auto_7rem_5rem] wide:[grid-template-areas:'name_amount_left_money']">
+      <div className={`grid grid-cols-[auto_minmax(0,1fr)_auto] items-center gap-x-2 ${line.material === null ? 'gap-y-1' : ''} wide:gap-x-3.5 [grid-template-areas:'name_name_money'_'amount_left_left'] wide:grid-cols-[minmax(0,1fr)_auto_7rem_5rem] wide:[grid-template-areas:'name_amount_left_money']`}>
         <div className="[grid-area:name]">
           <MaterialPicker
             name={path('material')} value={line.name} picked={line.material !== null} onPick={pick} onNew={setNewName}
