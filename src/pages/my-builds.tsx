@@ -26,7 +26,7 @@ export function Component() {
     <PageFrame head={<PageHead title="My builds" lettering="place" actions={<><ButtonLink kind="scribe" to="/builds/new">Start a build</ButtonLink>{builds.length > 0 && <ButtonLink kind="quiet" to="/write">Write up a day</ButtonLink>}</>} />}>
       <Head title="My builds" />
       {builds.map((build) => (
-        <section key={build.slug} aria-label={build.title}>
+        <div key={build.slug}>
           <BuildRow
             to={`/builds/${build.slug}`}
             title={build.title}
@@ -44,7 +44,7 @@ export function Component() {
               ))}
             </ul>
           )}
-        </section>
+        </div>
       ))}
       {builds.length === 0 && <Empty title="You have not started a build yet" action={<ButtonLink to="/builds/new">Start a build</ButtonLink>}>Any member becomes a restorer by starting one.</Empty>}
     </PageFrame>
