@@ -2,7 +2,7 @@ import type { QueryClient } from '@tanstack/react-query';
 import { redirect, type ActionFunction, type LoaderFunction, type RouteObject } from 'react-router-dom';
 import type { ComponentType } from 'react';
 import { AppError } from '#contracts/errors.ts';
-import { SignedOutForm } from '#src/lib/form-action.ts';
+import { SignedOutForm } from '#src/lib/signed-out-form.ts';
 import { sessionQuery } from '#src/queries/session.ts';
 import { ErrorPage } from './error-page.tsx';
 import { Layout } from './layout.tsx';

@@ -1,5 +1,6 @@
 import { data, useActionData, useNavigation } from 'react-router-dom';
 import { AppError, type FieldProblems } from '#contracts/errors.ts';
+import { SignedOutForm } from './signed-out-form.ts';
 
 /** What a form gets back when something in it needs mending: problems by field, and all that was typed. */
 export interface FormResult {
@@ -19,15 +20,6 @@ export function typedValues(form: FormData): Record<string, string> {
     if (typeof value === 'string' && !/password|current/i.test(name)) values[name] = value;
   }
   return values;
-}
-
-/** A form that was sent by nobody signed in: the page it stands on cannot be drawn for them, so what was typed goes along. */
-export class SignedOutForm extends Error {
-  readonly values: Readonly<Record<string, string>>;
-  constructor(values: Readonly<Record<string, string>>) {
-    super('Nothing was done, and nothing of what you typed is lost.');
-    this.values = values;
-  }
 }
 
 function newerVersion({ newer }: AppError): { newer?: string } {
